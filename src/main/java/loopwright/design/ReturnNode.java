@@ -1,0 +1,7 @@
+package loopwright.design;
+
+/** The node that a signal is referred to. */
+public enum ReturnNode {
+  GROUND,
+  MID_RAIL
+}

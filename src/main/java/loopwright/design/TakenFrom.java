@@ -1,0 +1,7 @@
+package loopwright.design;
+
+/** The node that the feedback is taken from. */
+public enum TakenFrom {
+  OUT,
+  LOAD
+}

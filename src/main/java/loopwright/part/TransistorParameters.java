@@ -1,0 +1,58 @@
+package loopwright.part;
+
+/**
+ * A complete set of parameters of the transistor equations at 298.15 K, in SI units.
+ *
+ * @param saturationCurrent I_S, A
+ * @param forwardBeta β_F
+ * @param reverseBeta β_R
+ * @param earlyVoltage V_A, V; infinite for none
+ * @param kneeCurrent I_K, A; infinite for none
+ * @param recombinationCurrent I_rec, A
+ * @param recombinationIdeality n_rec
+ * @param baseResistance r_B, Ω
+ * @param emitterResistance r_E, Ω
+ * @param collectorResistance r_C, Ω
+ * @param baseEmitterCapacitance zero-bias depletion capacitance, F
+ * @param baseCollectorCapacitance zero-bias depletion capacitance, F
+ * @param transitTime forward, s
+ * @param reverseTransitTime reverse, s
+ * @param flickerCorner Hz; 0 when not known
+ */
+public record TransistorParameters(
+    double saturationCurrent,
+    double forwardBeta,
+    double reverseBeta,
+    double earlyVoltage,
+    double kneeCurrent,
+    double recombinationCurrent,
+    double recombinationIdeality,
+    double baseResistance,
+    double emitterResistance,
+    double collectorResistance,
+    double baseEmitterCapacitance,
+    double baseCollectorCapacitance,
+    double transitTime,
+    double reverseTransitTime,
+    double flickerCorner) {
+  /**
+   * What holds where a record says nothing; saturation current and forward beta have no default.
+   */
+  public static final TransistorParameters DEFAULTS =
+      new TransistorParameters(
+          Double.NaN,
+          Double.NaN,
+          3,
+          Double.POSITIVE_INFINITY,
+          Double.POSITIVE_INFINITY,
+          0,
+          2,
+          0,
+          0,
+          0,
+          0,
+          0,
+          0,
+          0,
+          0);
+}
