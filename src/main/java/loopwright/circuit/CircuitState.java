@@ -169,6 +169,18 @@ public final class CircuitState {
     shunt = other.shunt;
   }
 
+  /**
+   * Takes over the point of a state of a circuit of the same topology but other values or
+   * temperatures, as a start for solving.
+   */
+  public void startFrom(CircuitState other) {
+    if (other.unknowns.length != unknowns.length || other.memory.length != memory.length) {
+      throw new IllegalArgumentException("the circuits differ in topology");
+    }
+    System.arraycopy(other.unknowns, 0, unknowns, 0, unknowns.length);
+    System.arraycopy(other.memory, 0, memory, 0, memory.length);
+  }
+
   /** A copy that moves on its own. */
   public CircuitState copy() {
     CircuitState copy = circuit.newState();

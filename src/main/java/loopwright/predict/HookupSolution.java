@@ -2,6 +2,7 @@ package loopwright.predict;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.DeviceModels;
 import loopwright.circuit.CircuitState;
@@ -36,10 +37,17 @@ final class HookupSolution {
   private final Lazy<Map<String, DeviceState>> devices;
 
   HookupSolution(Design design, Hookup hookup, DeviceModels models) {
+    this(design, hookup, models, Optional.empty());
+  }
+
+  /**
+   * @param near the same hookup at rest in surroundings that differ little
+   */
+  HookupSolution(Design design, Hookup hookup, DeviceModels models, Optional<RestSolution> near) {
     this.design = design;
     this.hookup = hookup;
     this.gains = new HookupGains(hookup);
-    this.rest = new Lazy<>(() -> RestSolution.of(design, hookup, models));
+    this.rest = new Lazy<>(() -> RestSolution.of(design, hookup, models, near));
     this.levels = new Lazy<>(() -> Levels.find(assembled(), gains, rest.get().state()));
     this.midbandHigh = new Lazy<>(() -> midband(levels().high()));
     this.midbandLow = new Lazy<>(() -> midband(levels().low()));

@@ -81,7 +81,8 @@ record LoopMargins(
     return (2 * Math.max(oddTurns(low), oddTurns(high)) - 1) * Math.PI;
   }
 
-  private static double[] grid(List<Pole> poles) {
+  /** Frequencies to begin with, Hz: a regular grid, and the resonances among the roots. */
+  static double[] grid(List<Pole> poles) {
     int count = (int) Math.round(Math.log10(HIGHEST / LOWEST)) * PER_DECADE + 1;
     double[] regular = new double[count];
     for (int i = 0; i < count; i++) {

@@ -4,6 +4,7 @@ import static loopwright.quantity.Unit.VOLT;
 import static loopwright.quantity.Unit.VOLT_PER_KELVIN;
 
 import java.util.List;
+import java.util.Optional;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.DeviceModels;
 import loopwright.circuit.CircuitState;
@@ -106,6 +107,7 @@ final class OffsetFigures {
                 here.strayCapacitance(),
                 here.selfHeating(),
                 here.biasCoupling()));
-    return new HookupSolution(moved, solution.hookup(), new DeviceModels(moved));
+    return new HookupSolution(
+        moved, solution.hookup(), new DeviceModels(moved), Optional.of(solution.rest()));
   }
 }

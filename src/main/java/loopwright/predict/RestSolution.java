@@ -2,6 +2,7 @@ package loopwright.predict;
 
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Optional;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.Assembler;
 import loopwright.assembly.DeviceModels;
@@ -29,19 +30,20 @@ record RestSolution(
   /**
    * Solves a hookup at rest.
    *
+   * @param near the same hookup solved in surroundings that differ little, to start from
    * @throws UnsolvedException with the reason when there is no operating point
    */
-  static RestSolution of(Design design, Hookup hookup, DeviceModels models) {
+  static RestSolution of(
+      Design design, Hookup hookup, DeviceModels models, Optional<RestSolution> near) {
     JunctionHeat heat = new JunctionHeat(design);
-    Map<String, Double> kelvins = Map.of();
+    Solver solver = new Solver(design, hookup, models, heat);
     if (!design.surroundings().selfHeating()) {
-      return at(design, hookup, models, heat, kelvins);
+      return solver.at(Map.of(), near);
     }
-    RestSolution solution = at(design, hookup, models, heat, kelvins);
+    RestSolution solution = solver.at(near.map(RestSolution::kelvins).orElse(Map.of()), near);
     for (int round = 0; round < MOST_ROUNDS; round++) {
       Map<String, Double> next = solution.heated(heat);
-      double change = change(solution.kelvins(), next);
-      if (change < SETTLED) {
+      if (change(solution.kelvins(), next) < SETTLED) {
         return solution;
       }
       next.forEach(
@@ -51,24 +53,25 @@ record RestSolution(
                   "thermal runaway: the junction of " + role + " finds no rest");
             }
           });
-      solution = at(design, hookup, models, heat, next);
+      solution = solver.at(next, Optional.of(solution));
     }
     throw new UnsolvedException("the junction temperatures do not settle");
   }
 
-  private static RestSolution at(
-      Design design,
-      Hookup hookup,
-      DeviceModels models,
-      JunctionHeat heat,
-      Map<String, Double> kelvins) {
-    AssembledHookup assembled =
-        Assembler.assemble(design, hookup, models, heat.temperatures(kelvins));
-    OperatingPoint point = OperatingPointSolver.solve(assembled.circuit());
-    if (point instanceof OperatingPoint.Found found) {
-      return new RestSolution(assembled, found.state(), found.remark(), kelvins);
+  /** Solves one hookup at given junction temperatures. */
+  private record Solver(Design design, Hookup hookup, DeviceModels models, JunctionHeat heat) {
+    RestSolution at(Map<String, Double> kelvins, Optional<RestSolution> near) {
+      AssembledHookup assembled =
+          Assembler.assemble(design, hookup, models, heat.temperatures(kelvins));
+      OperatingPoint point =
+          near.map(start -> OperatingPointSolver.solveNear(assembled.circuit(), start.state()))
+              .orElseGet(() -> OperatingPointSolver.solve(assembled.circuit()));
+      if (point instanceof OperatingPoint.Found found) {
+        String remark = near.map(RestSolution::remark).orElse(found.remark());
+        return new RestSolution(assembled, found.state(), remark, kelvins);
+      }
+      throw new UnsolvedException(((OperatingPoint.NotFound) point).reason());
     }
-    throw new UnsolvedException(((OperatingPoint.NotFound) point).reason());
   }
 
   private Map<String, Double> heated(JunctionHeat heat) {

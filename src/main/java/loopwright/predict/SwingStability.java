@@ -5,12 +5,14 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
 import loopwright.assembly.AssembledHookup;
 import loopwright.circuit.CircuitState;
 import loopwright.solve.GeneratorWalk;
 import loopwright.solve.LinearNetwork;
-import loopwright.solve.NaturalFrequencies;
 import loopwright.solve.NaturalFrequencies.Pole;
+import loopwright.solve.RootCount;
+import loopwright.solve.RootFollower;
 
 /**
  * The linear circuit at every level that the output passes: generator at 41 equally spaced values
@@ -33,7 +35,7 @@ final class SwingStability {
   private final AssembledHookup hookup;
   private final LinearNetwork network;
   private final List<Solved> levels = new ArrayList<>();
-  private NaturalFrequencies frequencies;
+  private RootFollower roots;
   private String remark = "";
 
   /**
@@ -141,15 +143,18 @@ final class SwingStability {
   private Solved solve(GeneratorWalk walk) {
     CircuitState state = walk.state().copy();
     network.linearise(state);
-    if (frequencies == null) {
-      frequencies = new NaturalFrequencies(network);
+    if (roots == null) {
+      roots = new RootFollower(network);
     }
-    List<Pole> poles = frequencies.of(network);
+    List<Pole> poles = roots.follow(network);
+    Traced traced = poles.isEmpty() ? null : trace(poles);
+    if (traced == null || !roots.confirms(poles, traced.samples())) {
+      poles = roots.solveAll(network);
+      traced = trace(poles);
+    }
     List<Pole> growing = poles.stream().filter(Pole::grows).toList();
     Optional<Pole> leading =
         poles.stream().filter(pole -> pole.im() > 0).max(Comparator.comparingDouble(Pole::re));
-    OptionalDouble margin =
-        hookup.isOpen() ? OptionalDouble.empty() : LoopMargins.of(network, poles).phaseMargin();
     SwingLevel level =
         new SwingLevel(
             walk.generator(),
@@ -159,8 +164,29 @@ final class SwingStability {
                 .map(p -> OptionalDouble.of(p.im() / (2 * Math.PI)))
                 .orElse(OptionalDouble.empty()),
             leading.map(p -> OptionalDouble.of(p.re())).orElse(OptionalDouble.empty()),
-            margin,
+            traced.margin(),
             walk.gain());
     return new Solved(level, growing, state);
+  }
+
+  /** The margin at a level, and the determinant at every frequency that was solved for it. */
+  private record Traced(OptionalDouble margin, List<RootCount.Sample> samples) {}
+
+  private Traced trace(List<Pole> poles) {
+    List<RootCount.Sample> samples = new ArrayList<>();
+    double[] grid = LoopMargins.grid(poles);
+    DoubleFunction<double[]> loopGain =
+        frequency -> {
+          double[] value = network.loopGain(frequency);
+          samples.add(new RootCount.Sample(2 * Math.PI * frequency, network.determinantArgument()));
+          return value;
+        };
+    if (hookup.isOpen()) {
+      for (double frequency : grid) {
+        loopGain.apply(frequency);
+      }
+      return new Traced(OptionalDouble.empty(), samples);
+    }
+    return new Traced(LoopMargins.of(loopGain, grid).phaseMargin(), samples);
   }
 }

@@ -82,6 +82,13 @@ public final class LinearNetwork {
   }
 
   /**
+   * Argument of det(G + jωC) at the frequency that was solved last, rad, up to a multiple of 2π.
+   */
+  public double determinantArgument() {
+    return system.determinantArgument();
+  }
+
+  /**
    * Loop gain by double injection in the lead of the inverting input (Middlebrook, International
    * Journal of Electronics 38, 1975, 485–512): T_v = −v(network side)/v(amplifier side) with a
    * series voltage; T_i = i into the network/i into the amplifier with a current into the

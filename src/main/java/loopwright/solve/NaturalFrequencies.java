@@ -149,7 +149,7 @@ public final class NaturalFrequencies {
    *
    * @return the root nearby, or null when there is none within a tenth of its magnitude
    */
-  private Pole refine(LinearNetwork network, Pole start) {
+  Pole refine(LinearNetwork network, Pole start) {
     int n = pattern.size();
     double re = start.re();
     double im = start.im();

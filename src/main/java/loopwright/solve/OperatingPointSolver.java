@@ -11,6 +11,7 @@ import loopwright.circuit.CircuitState;
 public final class OperatingPointSolver {
   private static final double SOURCE_PATH_ERROR = 0.3;
   private static final int PLAIN_NEWTON_STEPS = 300;
+  private static final int NEAR_STEPS = 20;
   private static final double FIRST_SHUNT = 1e-2;
   private static final double LAST_SHUNT = 1e-14;
 
@@ -45,6 +46,20 @@ public final class OperatingPointSolver {
             + ", and the currents at node "
             + solver.worstNode(state)
             + " do not balance");
+  }
+
+  /**
+   * The operating point of a circuit that differs little from one already solved, such as the same
+   * at another temperature: Newton from there, and from all sources at zero where that fails.
+   *
+   * @param near solved state of a circuit of the same topology
+   */
+  public static OperatingPoint solveNear(Circuit circuit, CircuitState near) {
+    CircuitState state = circuit.newState();
+    state.startFrom(near);
+    return new StaticSolver(circuit).solve(state, NEAR_STEPS)
+        ? new OperatingPoint.Found(state, "")
+        : solve(circuit);
   }
 
   private static boolean follow(Continuation path) {
