@@ -23,6 +23,12 @@ record LoopMargins(
   private static final double LOWEST = 1e-2;
   private static final double HIGHEST = 1e11;
   private static final int PER_DECADE = 4;
+
+  /**
+   * Below this the loop gain is rounding, and no margin is of interest; natural logarithm of 1e-9.
+   */
+  private static final double LEAST = Math.log(1e-9);
+
   private static final double QUICK_TURN = Math.toRadians(60);
   private static final int MOST_HALVINGS = 12;
 
@@ -51,7 +57,7 @@ record LoopMargins(
         unity = OptionalDouble.of(crossing.frequency());
         margin = OptionalDouble.of(180 + Math.toDegrees(crossing.argument()));
       }
-      if (oddTurns(low) != oddTurns(high)) {
+      if (oddTurns(low) != oddTurns(high) && low.logMagnitude() > LEAST) {
         Point crossing =
             refine(loopGain, low, high, point -> point.argument() - boundary(low, high));
         gains.add(Math.exp(-crossing.logMagnitude()));
@@ -142,6 +148,9 @@ record LoopMargins(
 
   private static Point refine(
       DoubleFunction<double[]> loopGain, Point low, Point high, Measure measure) {
+    if (measure.of(low) * measure.of(high) > 0) {
+      return low;
+    }
     double root =
         RootSearch.find(
             logarithm -> measure.of(between(loopGain, low, high, Math.exp(logarithm))),
@@ -153,9 +162,10 @@ record LoopMargins(
 
   private static Point between(
       DoubleFunction<double[]> loopGain, Point low, Point high, double frequency) {
-    if (frequency <= low.frequency()) {
+    double slack = 1e-12 * frequency;
+    if (frequency <= low.frequency() + slack) {
       return low;
     }
-    return frequency >= high.frequency() ? high : point(loopGain, low, frequency);
+    return frequency >= high.frequency() - slack ? high : point(loopGain, low, frequency);
   }
 }
