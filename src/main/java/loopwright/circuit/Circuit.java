@@ -140,11 +140,11 @@ public final class Circuit {
     return new CircuitState(this, layout.memory(), layout.blocking());
   }
 
-  void stampShunt(CircuitState state) {
+  void stampTethers(CircuitState state) {
     for (int node = 0; node < layout.nodes(); node++) {
-      double current = state.shunt() * state.voltage(node);
-      state.stamps().current(node, current, Math.abs(current));
-      state.stamps().conductance(diagonal[node], state.shunt());
+      double current = state.tether() * (state.voltage(node) - state.anchored(node));
+      state.stamps().current(node, current, 0);
+      state.stamps().conductance(diagonal[node], state.tether());
     }
   }
 }

@@ -20,11 +20,12 @@ public final class CircuitState {
   private final double[] memory;
   private final Stamps stamps;
   private final double[] held;
+  private final double[] anchor;
   private Blocking blocking = Blocking.OPEN;
   private int openDespite = NONE;
   private double sourceScale = 1;
   private double generator;
-  private double shunt;
+  private double tether;
   private boolean limited;
 
   CircuitState(Circuit circuit, int memorySize, int blockingCapacitors) {
@@ -33,6 +34,7 @@ public final class CircuitState {
     this.memory = new double[memorySize];
     this.stamps = new Stamps(circuit.unknowns(), circuit.pattern().slots());
     this.held = new double[blockingCapacitors];
+    this.anchor = new double[circuit.nodes()];
     this.generator = circuit.restGenerator();
   }
 
@@ -115,14 +117,24 @@ public final class CircuitState {
     generator = volts;
   }
 
-  /** Conductance that a homotopy adds from every node to ground, S; 0 in the circuit itself. */
-  public double shunt() {
-    return shunt;
+  /** Conductance that ties every node to where it was anchored, S; 0 in the circuit itself. */
+  public double tether() {
+    return tether;
   }
 
-  /** Sets the conductance that a homotopy adds from every node to ground, S. */
-  public void setShunt(double siemens) {
-    shunt = siemens;
+  /** Sets the conductance that ties every node to where it was anchored, S. */
+  public void setTether(double siemens) {
+    tether = siemens;
+  }
+
+  /** Anchors every node at its present voltage. */
+  public void anchor() {
+    System.arraycopy(unknowns, 0, anchor, 0, anchor.length);
+  }
+
+  /** Voltage at which a node is anchored, V. */
+  double anchored(int node) {
+    return anchor[node];
   }
 
   /** Whether the last evaluation linearised some junction elsewhere than at its voltage. */
@@ -149,8 +161,8 @@ public final class CircuitState {
     for (Element element : circuit.elements()) {
       element.stamp(this);
     }
-    if (shunt > 0) {
-      circuit.stampShunt(this);
+    if (tether > 0) {
+      circuit.stampTethers(this);
     }
   }
 
@@ -166,7 +178,8 @@ public final class CircuitState {
     openDespite = other.openDespite;
     sourceScale = other.sourceScale;
     generator = other.generator;
-    shunt = other.shunt;
+    tether = other.tether;
+    System.arraycopy(other.anchor, 0, anchor, 0, anchor.length);
   }
 
   /**

@@ -5,15 +5,17 @@ import loopwright.circuit.CircuitState;
 
 /**
  * Finds the operating point that is reached continuously from all sources at zero: the sources are
- * stepped up together along the solution. Where that path ends at a fold, or its steps fail, plain
- * Newton and then a shunt-conductance homotopy are tried, and the result says so.
+ * stepped up together along the solution. Where that path ends at a fold, the circuit would jump;
+ * the jump is followed by {@link Settling} and the path goes on from there. Where that fails,
+ * settling is tried at full supply. A result that was not reached continuously says so.
  */
 public final class OperatingPointSolver {
   private static final double SOURCE_PATH_ERROR = 0.3;
-  private static final int PLAIN_NEWTON_STEPS = 300;
   private static final int NEAR_STEPS = 20;
-  private static final double FIRST_SHUNT = 1e-2;
-  private static final double LAST_SHUNT = 1e-14;
+  private static final int MOST_JUMPS = 5;
+
+  /** How far beyond a fold the jump is followed, as a share of the supply. */
+  private static final double BEYOND_FOLD = 1e-3;
 
   private OperatingPointSolver() {}
 
@@ -22,30 +24,24 @@ public final class OperatingPointSolver {
     StaticSolver solver = new StaticSolver(circuit);
     CircuitState state = circuit.newState();
     state.setSourceScale(0);
-    double reached = 0;
-    if (solver.solve(state, PLAIN_NEWTON_STEPS)) {
+    if (!solver.solve(state, NEAR_STEPS)) {
+      return settled(solver, 0);
+    }
+    StringBuilder remark = new StringBuilder();
+    for (int jumps = 0; jumps <= MOST_JUMPS; jumps++) {
       Continuation path = new Continuation(solver, state, Drive.sources(), 1, SOURCE_PATH_ERROR);
       if (follow(path)) {
-        return new OperatingPoint.Found(state, "");
+        return new OperatingPoint.Found(state, remark.toString());
       }
-      reached = path.drive();
+      double reached = state.sourceScale();
+      remark.append(remark.isEmpty() ? "the path from all sources at zero jumps at " : " and ");
+      remark.append(Math.round(100 * reached)).append(" % of the supply");
+      state.setSourceScale(Math.min(1, reached + BEYOND_FOLD));
+      if (!Settling.settle(solver, state)) {
+        return settled(solver, reached);
+      }
     }
-    String where = Math.round(100 * reached) + " % of the supply";
-    state.setSourceScale(1);
-    if (solver.solve(state, PLAIN_NEWTON_STEPS)) {
-      return new OperatingPoint.Found(state, "the path from all sources at zero jumps at " + where);
-    }
-    CircuitState shunted = circuit.newState();
-    if (byShunt(solver, shunted)) {
-      return new OperatingPoint.Found(
-          shunted, "found by a shunt homotopy; the path from all sources at zero ends at " + where);
-    }
-    return new OperatingPoint.NotFound(
-        "no operating point found: the sources could be raised to "
-            + where
-            + ", and the currents at node "
-            + solver.worstNode(state)
-            + " do not balance");
+    return settled(solver, state.sourceScale());
   }
 
   /**
@@ -70,14 +66,19 @@ public final class OperatingPointSolver {
     }
   }
 
-  private static boolean byShunt(StaticSolver solver, CircuitState state) {
-    for (double shunt = FIRST_SHUNT; shunt > LAST_SHUNT; shunt /= 10) {
-      state.setShunt(shunt);
-      if (!solver.solve(state, PLAIN_NEWTON_STEPS)) {
-        return false;
-      }
+  /** Last resort: let the circuit settle at full supply from every node at zero. */
+  private static OperatingPoint settled(StaticSolver solver, double reached) {
+    String where = Math.round(100 * reached) + " % of the supply";
+    CircuitState state = solver.circuit().newState();
+    if (Settling.settle(solver, state)) {
+      return new OperatingPoint.Found(
+          state, "the path from all sources at zero ends at " + where + "; found by settling");
     }
-    state.setShunt(0);
-    return solver.solve(state, PLAIN_NEWTON_STEPS);
+    return new OperatingPoint.NotFound(
+        "no operating point found: the sources could be raised to "
+            + where
+            + ", and the currents at node "
+            + solver.worstNode(state)
+            + " do not balance");
   }
 }
