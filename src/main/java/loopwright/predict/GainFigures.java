@@ -27,7 +27,7 @@ final class GainFigures {
               double low = mean(solution.midbandLow());
               return FigureValue.of(2 / (1 / high + 1 / low), solution.levels().remark());
             },
-            NoFormula.ROAD),
+            LoopFormulas::openLoopGain),
         level("openLoopGainHigh", "A at the high level", "high", HookupSolution::midbandHigh),
         level("openLoopGainLow", "A at the low level", "low", HookupSolution::midbandLow),
         level("openLoopGainAtRest", "A at rest", "at rest", HookupSolution::midbandRest),
@@ -44,7 +44,7 @@ final class GainFigures {
               return FigureValue.of(
                   1 / Math.abs(share), share < 0 ? "A₊ is the smaller" : "A₊ is the larger");
             },
-            NoFormula.ROAD),
+            LoopFormulas::commonModeRejection),
         new Figure(
             "idealGain",
             "Ideal gain",
@@ -77,7 +77,7 @@ final class GainFigures {
                 + " dead zone",
             CostClass.WAVEFORM,
             GainFigures::closedLoopGain,
-            NoFormula.ROAD),
+            LoopFormulas::closedLoopGain),
         new Figure(
             "closedLoopGainAtRest",
             "Closed-loop gain at rest",

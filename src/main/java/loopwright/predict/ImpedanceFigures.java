@@ -25,7 +25,7 @@ final class ImpedanceFigures {
             "R_id (1 + A/NG); inverting inputResistor + upper/(1 + A) (Blackman 1943)",
             CostClass.LINEAR,
             solution -> mean(solution, MidbandNetwork::inputResistance),
-            NoFormula.ROAD),
+            LoopFormulas::inputResistance),
         new Figure(
             "outputResistance",
             "Output resistance",
@@ -36,7 +36,7 @@ final class ImpedanceFigures {
             "R_o/(1 + A/NG) (Blackman 1943)",
             CostClass.LINEAR,
             solution -> mean(solution, network -> unloaded(solution, network)),
-            NoFormula.ROAD));
+            LoopFormulas::outputResistance));
   }
 
   private static FigureValue mean(

@@ -31,7 +31,7 @@ final class LoopFigures {
               solution.needLoop();
               return FigureValue.of(solution.midbandRest().loopGain());
             },
-            NoFormula.ROAD),
+            LoopFormulas::loopGain),
         new Figure(
             "unityFrequency",
             "Unity-gain frequency of the loop",
@@ -41,7 +41,7 @@ final class LoopFigures {
             "G_m1/(2π (C_c + C_cb + strays) NG)",
             CostClass.LINEAR,
             solution -> some(solution.margins().unityFrequency(), "the loop gain never passes 1"),
-            NoFormula.ROAD),
+            LoopFormulas::unityFrequency),
         new Figure(
             "phaseMargin",
             "Phase margin",
@@ -122,7 +122,7 @@ final class LoopFigures {
             "unity-gain frequency of the loop",
             CostClass.LINEAR,
             solution -> some(solution.closedLoop().bandwidth(), "no fall below 3 dB up to 100 GHz"),
-            NoFormula.ROAD),
+            LoopFormulas::bandwidth),
         new Figure(
             "lowCorner",
             "Low corner",

@@ -23,7 +23,7 @@ final class NoiseFigures {
                 + " + 2q I_B (R₊² + (upper ∥ lower)²)",
             CostClass.LINEAR,
             solution -> FigureValue.none(NOT_YET),
-            NoFormula.ROAD),
+            SwingFormulas::inputNoise),
         new Figure(
             "outputNoise",
             "Output noise",

@@ -30,7 +30,7 @@ final class OffsetFigures {
             "V_T ln(I_C1/I_C2), Early term, mismatch, base and emitter resistances",
             CostClass.LINEAR,
             solution -> FigureValue.of(inputOffset(solution), solution.levels().remark()),
-            NoFormula.ROAD),
+            OffsetFormula::inputOffset),
         new Figure(
             "outputOffset",
             "Output offset",
@@ -40,7 +40,7 @@ final class OffsetFigures {
             "(−inputOffset − I_B1 R₊) NG₀/(1 + NG₀/A) + I_B2 upper/(1 + NG₀/A)",
             CostClass.LINEAR,
             solution -> FigureValue.of(outputOffset(solution)),
-            NoFormula.ROAD),
+            OffsetBudget::outputOffset),
         new Figure(
             "outputMean",
             "Mean of the output",

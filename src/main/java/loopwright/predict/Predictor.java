@@ -80,7 +80,7 @@ public final class Predictor {
             ? swing.value().levels().stream().map(SwingStability.Solved::level).toList()
             : List.of(),
         swing.isPresent() ? swing.value().remark() : swing.reason(),
-        List.of(),
+        OffsetBudget.shares(solution),
         harmonics(solution),
         solution.waveformOutcome().isPresent()
             ? Optional.of(solution.waveform().toWaveform())

@@ -23,7 +23,7 @@ final class SwingFigures {
             "rail less saturation and drops, or the limit of the current that is left",
             CostClass.WAVEFORM,
             solution -> clip(solution.clipHigh()),
-            NoFormula.ROAD),
+            solution -> SwingFormulas.clip(solution, 1)),
         new Figure(
             "clipLow",
             "Lowest output",
@@ -34,12 +34,12 @@ final class SwingFigures {
             "rail less saturation and drops, or the limit of the current that is left",
             CostClass.WAVEFORM,
             solution -> clip(solution.clipLow()),
-            NoFormula.ROAD),
-        slew("slewRising", "Slew rate, rising"),
-        slew("slewFalling", "Slew rate, falling"));
+            solution -> SwingFormulas.clip(solution, -1)),
+        slew("slewRising", "Slew rate, rising", 1),
+        slew("slewFalling", "Slew rate, falling", -1));
   }
 
-  private static Figure slew(String key, String label) {
+  private static Figure slew(String key, String label, int direction) {
     return new Figure(
         key,
         label,
@@ -49,7 +49,7 @@ final class SwingFigures {
         "current that the pair can give/(C_c + C_cb + strays) (Solomon 1974)",
         CostClass.TIME,
         solution -> FigureValue.none(NOT_YET),
-        NoFormula.ROAD);
+        solution -> SwingFormulas.slew(solution, direction));
   }
 
   private static FigureValue clip(ClipLevel level) {

@@ -21,7 +21,7 @@ final class WaveformFigures {
             "V_BE at the load current for joined bases, twice with drivers; about 0 when biased",
             CostClass.WAVEFORM,
             solution -> FigureValue.of(solution.waveform().deadZone()),
-            NoFormula.ROAD),
+            DeadZoneFormulas::deadZone),
         new Figure(
             "deadZoneAtInput",
             "Dead zone at the input",
@@ -39,7 +39,7 @@ final class WaveformFigures {
                             .number()
                             .orElseThrow(
                                 () -> new UnsolvedException("the open-loop gain is missing"))),
-            NoFormula.ROAD),
+            DeadZoneFormulas::atInput),
         new Figure(
             "crossoverError",
             "Crossover error",
@@ -49,8 +49,8 @@ final class WaveformFigures {
             "over the waveform",
             "deadZone/(1 + A/NG): the dead zone divided by 1 + loop gain",
             CostClass.WAVEFORM,
-            solution -> FigureValue.of(solution.waveform().residual()),
-            NoFormula.ROAD),
+            solution -> FigureValue.of(solution.waveform().residual(), lines(solution)),
+            DeadZoneFormulas::crossoverError),
         new Figure(
             "thd",
             "Total harmonic distortion",
@@ -67,6 +67,32 @@ final class WaveformFigures {
                   "referred to the total output (IEC 60268-3) "
                       + Text.ratio(ratio / Math.sqrt(1 + ratio * ratio)));
             },
-            NoFormula.ROAD));
+            DeadZoneFormulas::distortion));
+  }
+
+  /**
+   * Lines of the crossover's budget: loop gain by double injection, and what curvature alone
+   * leaves.
+   */
+  private static String lines(HookupSolution solution) {
+    if (solution.assembled().isOpen()) {
+      return "";
+    }
+    double noiseGain = solution.gains().noiseGain().orElseThrow();
+    double high = GainFigures.mean(solution.midbandHigh());
+    double low = GainFigures.mean(solution.midbandLow());
+    double gain = 2 / (1 / high + 1 / low);
+    double curvature =
+        solution.levels().peak()
+            / 4
+            * Math.abs(1 / high - 1 / low)
+            * noiseGain
+            / (1 + noiseGain / gain);
+    return "loop gain "
+        + Text.ratio(solution.midbandHigh().loopGain())
+        + " at the high and "
+        + Text.ratio(solution.midbandLow().loopGain())
+        + " at the low level; curvature of the gain alone "
+        + Text.volts(curvature);
   }
 }
