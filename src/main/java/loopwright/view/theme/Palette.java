@@ -25,18 +25,18 @@ public final class Palette {
   }
 
   /** What fails. */
-  public static Color fail() {
-    return colour("fail");
+  public static Color fails() {
+    return colour("fails");
   }
 
   /** A faint ground behind what fails. */
-  public static Color failGround() {
-    return colour("failGround");
+  public static Color failsGround() {
+    return colour("failsGround");
   }
 
   /** What deserves a look. */
-  public static Color caution() {
-    return colour("caution");
+  public static Color risky() {
+    return colour("risky");
   }
 
   /** Text. */
@@ -76,7 +76,7 @@ public final class Palette {
    * @param index from 0; taken modulo {@link #PLOT_COLOURS}
    */
   public static Color plot(int index) {
-    return colour("plot" + (Math.floorMod(index, PLOT_COLOURS) + 1));
+    return colour("plot." + (Math.floorMod(index, PLOT_COLOURS) + 1));
   }
 
   /** The font of captions and notes. */

@@ -28,12 +28,12 @@ class ThemeTest {
     theme.apply();
     for (Color text :
         new Color[] {
-          Palette.text(), Palette.quiet(), Palette.accent(), Palette.fail(), Palette.caution()
+          Palette.text(), Palette.quiet(), Palette.accent(), Palette.fails(), Palette.risky()
         }) {
       assertThat(contrast(text, Palette.card())).isGreaterThan(LEAST_TEXT_CONTRAST);
     }
     assertThat(contrast(Palette.text(), Palette.accentGround())).isGreaterThan(LEAST_TEXT_CONTRAST);
-    assertThat(contrast(Palette.fail(), Palette.failGround())).isGreaterThan(LEAST_TEXT_CONTRAST);
+    assertThat(contrast(Palette.fails(), Palette.failsGround())).isGreaterThan(LEAST_TEXT_CONTRAST);
     assertThat(contrast(Palette.quiet(), Palette.ground())).isGreaterThan(LEAST_TEXT_CONTRAST);
     assertThat(contrast(Palette.wire(), Palette.card())).isGreaterThan(LEAST_LINE_CONTRAST);
   }
