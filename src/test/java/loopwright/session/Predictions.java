@@ -7,26 +7,17 @@ import java.util.Optional;
 import loopwright.design.CurrentSource;
 import loopwright.design.Design;
 import loopwright.design.StagesAmplifier;
-import loopwright.predict.CostClass;
+import loopwright.predict.Catalogue;
 import loopwright.predict.Figure;
 import loopwright.predict.FigureResult;
 import loopwright.predict.FigureValue;
 import loopwright.predict.HookupPrediction;
 import loopwright.predict.Prediction;
-import loopwright.quantity.Unit;
 
 /** Predictions that cost nothing: one figure that follows the gain stage's load. */
 public final class Predictions {
   /** The one figure. */
-  public static final Figure LOAD =
-      new Figure(
-          "closedLoopGain",
-          "Closed-loop gain",
-          Unit.ONE,
-          "the gain stage's load in kilohms",
-          "at rest",
-          "load/1 kΩ",
-          CostClass.DESIGN);
+  public static final Figure LOAD = Catalogue.find("closedLoopGain").orElseThrow();
 
   private Predictions() {}
 

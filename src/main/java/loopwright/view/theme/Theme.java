@@ -49,6 +49,11 @@ public enum Theme {
     field.putClientProperty("JTextField.placeholderText", text);
   }
 
+  /** Puts a component at the right end of a text field, inside its border. */
+  public static void trailing(JComponent field, JComponent inside) {
+    field.putClientProperty("JTextField.trailingComponent", inside);
+  }
+
   /** Marks a field as holding something that cannot be, or as sound again. */
   public static void markWrong(JComponent field, boolean wrong) {
     field.putClientProperty("JComponent.outline", wrong ? "error" : null);
