@@ -31,16 +31,17 @@ public record FiguresAmplifier(
     @Measure(unit = Unit.VOLT) @Otherwise("0") Quantity inputOffset,
     @Measure(unit = Unit.VOLT, range = Range.NOT_NEGATIVE) @Otherwise("0") Quantity deadZone,
     @Measure(unit = Unit.HERTZ, range = Range.POSITIVE) List<Quantity> poles,
-    @Measure(unit = Unit.OHM, range = Range.POSITIVE) @Otherwise("infinite")
+    @Measure(unit = Unit.OHM, range = Range.POSITIVE_OR_INFINITE) @Otherwise("infinite")
         Quantity inputResistance,
     @Measure(unit = Unit.FARAD, range = Range.NOT_NEGATIVE) @Otherwise("0")
         Quantity inputCapacitance,
     @Measure(unit = Unit.AMPERE) @Otherwise("0") Quantity inputBiasCurrent,
-    @Measure(unit = Unit.ONE) @Otherwise("infinite") Quantity commonModeRejection,
+    @Measure(unit = Unit.ONE, range = Range.NOT_ZERO_OR_INFINITE) @Otherwise("infinite")
+        Quantity commonModeRejection,
     @Measure(unit = Unit.OHM, range = Range.NOT_NEGATIVE) @Otherwise("0") Quantity outputResistance,
     @Measure(unit = Unit.VOLT) Optional<Quantity> outputHigh,
     @Measure(unit = Unit.VOLT) Optional<Quantity> outputLow,
-    @Measure(unit = Unit.VOLT_PER_SECOND, range = Range.POSITIVE) @Otherwise("infinite")
+    @Measure(unit = Unit.VOLT_PER_SECOND, range = Range.POSITIVE_OR_INFINITE) @Otherwise("infinite")
         Quantity slewRate)
     implements Amplifier {
   /** Keeps its own copy of the poles. */

@@ -32,4 +32,4 @@ public record Instrument(
     @Measure(unit = Unit.VOLT, range = Range.POSITIVE) Optional<Quantity> voltsPerDivision,
     @Measure(unit = Unit.OHM, range = Range.POSITIVE) Optional<Quantity> inputResistance,
     @Measure(unit = Unit.FARAD, range = Range.NOT_NEGATIVE) Optional<Quantity> inputCapacitance,
-    @Measure(unit = Unit.OHM, range = Range.POSITIVE) Optional<Quantity> displayLoad) {}
+    @Measure(unit = Unit.OHM, range = Range.POSITIVE_OR_INFINITE) Optional<Quantity> displayLoad) {}

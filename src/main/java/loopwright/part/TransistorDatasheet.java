@@ -16,7 +16,7 @@ public record TransistorDatasheet(
     Optional<Capacitance> outputCapacitance,
     Optional<Capacitance> inputCapacitance,
     Optional<OutputConductance> outputConductance,
-    @Measure(unit = Unit.VOLT, range = Range.POSITIVE) Optional<Quantity> earlyVoltage,
+    @Measure(unit = Unit.VOLT, range = Range.POSITIVE_OR_INFINITE) Optional<Quantity> earlyVoltage,
     @Measure(unit = Unit.OHM, range = Range.NOT_NEGATIVE) Optional<Quantity> baseResistance) {
   /** Keeps its own copies of the lists. */
   public TransistorDatasheet {

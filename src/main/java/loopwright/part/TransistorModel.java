@@ -14,8 +14,8 @@ public record TransistorModel(
     @Measure(unit = Unit.AMPERE, range = Range.POSITIVE) Optional<Quantity> saturationCurrent,
     @Measure(unit = Unit.ONE, range = Range.POSITIVE) Optional<Quantity> forwardBeta,
     @Measure(unit = Unit.ONE, range = Range.POSITIVE) Optional<Quantity> reverseBeta,
-    @Measure(unit = Unit.VOLT, range = Range.POSITIVE) Optional<Quantity> earlyVoltage,
-    @Measure(unit = Unit.AMPERE, range = Range.POSITIVE) Optional<Quantity> kneeCurrent,
+    @Measure(unit = Unit.VOLT, range = Range.POSITIVE_OR_INFINITE) Optional<Quantity> earlyVoltage,
+    @Measure(unit = Unit.AMPERE, range = Range.POSITIVE_OR_INFINITE) Optional<Quantity> kneeCurrent,
     @Measure(unit = Unit.AMPERE, range = Range.NOT_NEGATIVE)
         Optional<Quantity> recombinationCurrent,
     @Measure(unit = Unit.ONE, range = Range.POSITIVE) Optional<Quantity> recombinationIdeality,

@@ -28,9 +28,22 @@ public record Quantity(double value, String spelling, boolean bare) {
     return new Quantity(value, plain(value), true);
   }
 
-  /** A number literal as it stands in a file. */
+  /** A value of the program's own making, written as a person would: {@code 4.7k}. */
+  public static Quantity spelled(double value, Unit unit) {
+    return new Quantity(value, EngineeringFormat.spelling(value, unit), false);
+  }
+
+  /**
+   * A number literal as it stands in a file.
+   *
+   * @throws QuantityException when it is too large for a finite number
+   */
   public static Quantity literal(String number) {
-    return new Quantity(Double.parseDouble(number), number, true);
+    double value = Double.parseDouble(number);
+    if (!Double.isFinite(value)) {
+      throw new QuantityException("found " + number + ", expected a finite number");
+    }
+    return new Quantity(value, number, true);
   }
 
   /**
@@ -42,6 +55,46 @@ public record Quantity(double value, String spelling, boolean bare) {
    */
   public static Quantity parse(String text, Unit unit) {
     return new Quantity(QuantityParser.parse(text, unit), text, false);
+  }
+
+  /**
+   * Reads a value that must lie in a range.
+   *
+   * @throws QuantityException when the text is no value, carries another unit, or lies outside
+   */
+  public static Quantity parse(String text, Unit unit, Range range) {
+    Quantity quantity = parse(text, unit);
+    quantity.requireWithin(range, unit);
+    return quantity;
+  }
+
+  /**
+   * Reads a value of any unit, for a caller that learns from the text what was meant.
+   *
+   * @throws QuantityException when the text is no value
+   */
+  public static WrittenValue parseAny(String text) {
+    return QuantityParser.parseAny(text);
+  }
+
+  /**
+   * Checks the range.
+   *
+   * @throws QuantityException when the value lies outside; the message says what was expected
+   */
+  public void requireWithin(Range range, Unit unit) {
+    if (!range.contains(value)) {
+      String expected = range == Range.ANY ? "finite" : range.says();
+      String unitSays = unit.symbol().isEmpty() ? "" : " in " + unit.symbol();
+      throw new QuantityException(
+          "found "
+              + (bare ? spelling : "\"" + spelling + "\"")
+              + ", expected "
+              + unit.says()
+              + unitSays
+              + " that is "
+              + expected);
+    }
   }
 
   private static String plain(double value) {
