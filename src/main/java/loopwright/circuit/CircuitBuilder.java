@@ -17,6 +17,12 @@ import loopwright.part.TransistorParameters;
  * when all is known.
  */
 public final class CircuitBuilder {
+  /**
+   * Leakage to ground of a part of the circuit that only capacitors tie to the rest, S: without it
+   * the voltage there would be undefined.
+   */
+  public static final double LEAKAGE = 1e-12;
+
   /** Name of the ground node. */
   public static final String GROUND = "ground";
 
@@ -24,6 +30,7 @@ public final class CircuitBuilder {
   private final Set<String> withoutStray = new HashSet<>();
   private final List<Supplier<Element>> plans = new ArrayList<>();
   private final List<DeviceTerminals.Named> devices = new ArrayList<>();
+  private final List<String[]> conducting = new ArrayList<>();
   private final SparsityPattern.Builder pattern = new SparsityPattern.Builder();
   private final Map<String, Integer> indices = new LinkedHashMap<>();
   private final double kelvin;
@@ -75,6 +82,7 @@ public final class CircuitBuilder {
     }
     node(from);
     node(to);
+    conducts(from, to);
     plans.add(() -> new Resistor(name, index(from), index(to), resistance, this));
   }
 
@@ -112,6 +120,7 @@ public final class CircuitBuilder {
   /** An ideal supply from ground to a node. */
   public void supply(String name, String node, double voltage) {
     node(node);
+    conducts(node, GROUND);
     int branch = branch();
     plans.add(
         () -> new VoltageSource(name, index(node), branchIndex(branch), voltage, false, this));
@@ -125,6 +134,7 @@ public final class CircuitBuilder {
     }
     node(from);
     node(to);
+    conducts(from, to);
     int branch = branch();
     plans.add(
         () ->
@@ -136,6 +146,7 @@ public final class CircuitBuilder {
   public void generator(String name, String node, double rest) {
     node(node);
     restGenerator = rest;
+    conducts(node, GROUND);
     int branch = branch();
     plans.add(() -> new VoltageSource(name, index(node), branchIndex(branch), rest, true, this));
   }
@@ -144,6 +155,7 @@ public final class CircuitBuilder {
   public void lead(String name, String from, String to) {
     node(from);
     node(to);
+    conducts(from, to);
     int branch = branch();
     plans.add(() -> new Lead(name, index(from), index(to), branchIndex(branch), this));
   }
@@ -164,6 +176,8 @@ public final class CircuitBuilder {
     String c = behind(role, "collector", collector, parameters.collectorResistance());
     String b = behind(role, "base", base, parameters.baseResistance());
     String e = behind(role, "emitter", emitter, parameters.emitterResistance());
+    conducts(c, b);
+    conducts(b, e);
     int at = memory;
     memory += 2;
     TransistorEquations equations = new TransistorEquations(parameters, kelvin);
@@ -181,6 +195,7 @@ public final class CircuitBuilder {
       String role, String anode, String cathode, DiodeParameters parameters, double kelvin) {
     String a = behind(role, "anode", anode, parameters.seriesResistance());
     node(cathode);
+    conducts(a, cathode);
     int at = memory++;
     DiodeEquations equations = new DiodeEquations(parameters, kelvin);
     plans.add(() -> new JunctionDiode(role, index(a), index(cathode), equations, at, this));
@@ -193,6 +208,8 @@ public final class CircuitBuilder {
     for (String name : List.of(inPlus, inMinus, gainOut, out)) {
       node(name);
     }
+    conducts(gainOut, GROUND);
+    conducts(out, GROUND);
     int first = branches;
     branches += FigureAmplifier.branches(figures);
     int at = memory++;
@@ -213,6 +230,7 @@ public final class CircuitBuilder {
    * @param strayCapacitance from every node to ground, F, but for those that were excluded
    */
   public Circuit build(double strayCapacitance) {
+    addLeakage();
     if (strayCapacitance > 0) {
       addStrays(strayCapacitance);
     }
@@ -288,6 +306,35 @@ public final class CircuitBuilder {
         capacitor("stray." + root, root, GROUND, capacitance);
       }
     }
+  }
+
+  private void conducts(String one, String other) {
+    conducting.add(new String[] {one, other});
+  }
+
+  /** Ties every part of the circuit that no conductance reaches to ground. */
+  private void addLeakage() {
+    Map<String, String> island = new LinkedHashMap<>();
+    joined.keySet().forEach(name -> island.put(root(name), root(name)));
+    for (String[] pair : conducting) {
+      island.put(shore(island, root(pair[0])), shore(island, root(pair[1])));
+    }
+    for (String name : List.copyOf(island.keySet())) {
+      String shore = shore(island, name);
+      String ground = shore(island, root(GROUND));
+      if (!shore.equals(ground)) {
+        resistor("leakage." + name, name, GROUND, 1 / LEAKAGE);
+        island.put(shore, ground);
+      }
+    }
+  }
+
+  private static String shore(Map<String, String> island, String name) {
+    String at = name;
+    while (!island.get(at).equals(at)) {
+      at = island.get(at);
+    }
+    return at;
   }
 
   private void numberNodes() {

@@ -4,7 +4,10 @@ import org.ejml.data.ZMatrixRMaj;
 import org.ejml.dense.row.decompose.lu.LUDecompositionAlt_ZDRM;
 import org.ejml.dense.row.linsol.lu.LinearSolverLu_ZDRM;
 
-/** A complex system solved by EJML's dense complex LU with partial pivoting. */
+/**
+ * A complex system solved by EJML's dense complex LU with partial pivoting; singularity is judged
+ * as in {@link DenseRealSystem}.
+ */
 public final class DenseComplexSystem implements ComplexSystem {
   private final SparsityPattern pattern;
   private final ZMatrixRMaj matrix;
@@ -99,7 +102,24 @@ public final class DenseComplexSystem implements ComplexSystem {
         return false;
       }
     }
-    return solver.setA(matrix) && solver.quality() > 0;
+    if (!solver.setA(matrix)) {
+      return false;
+    }
+    int n = matrix.numRows;
+    ZMatrixRMaj factors = solver.getDecomposition().getLU();
+    for (int column = 0; column < n; column++) {
+      double largest = 0;
+      for (int row = 0; row < n; row++) {
+        int at = 2 * (row * n + column);
+        largest = Math.max(largest, Math.hypot(matrix.data[at], matrix.data[at + 1]));
+      }
+      int at = 2 * (column * n + column);
+      double pivot = Math.hypot(factors.data[at], factors.data[at + 1]);
+      if (!(pivot > DenseRealSystem.SINGULAR * largest)) {
+        return false;
+      }
+    }
+    return true;
   }
 
   private void solve(LinearSolverLu_ZDRM with, double[] rightHandSide) {

@@ -8,10 +8,14 @@ import org.ejml.dense.row.linsol.lu.LinearSolverLu_DDRM;
  * A real system solved by EJML's dense LU with partial pivoting.
  *
  * <p>EJML's own word on singularity is not enough: its factorisation reports success for an exactly
- * singular matrix, and its singularity test is absolute. Here the scale-free quality of the factors
- * and finiteness decide.
+ * singular matrix, its singularity test is absolute, and its quality, a product of relative pivots,
+ * underflows for matrices of some tens of rows. Here finiteness and every pivot against the largest
+ * entry of its own column decide, which no scaling of the matrix changes.
  */
 public final class DenseRealSystem implements RealSystem {
+  /** A pivot below this share of its column's largest entry makes the matrix singular. */
+  static final double SINGULAR = 1e-25;
+
   private final SparsityPattern pattern;
   private final DMatrixRMaj matrix;
   private final DMatrixRMaj vector;
@@ -81,7 +85,21 @@ public final class DenseRealSystem implements RealSystem {
         return false;
       }
     }
-    return solver.setA(matrix) && solver.quality() > 0;
+    if (!solver.setA(matrix)) {
+      return false;
+    }
+    int n = matrix.numRows;
+    DMatrixRMaj factors = solver.getDecomposition().getLU();
+    for (int column = 0; column < n; column++) {
+      double largest = 0;
+      for (int row = 0; row < n; row++) {
+        largest = Math.max(largest, Math.abs(matrix.data[row * n + column]));
+      }
+      if (!(Math.abs(factors.data[column * n + column]) > SINGULAR * largest)) {
+        return false;
+      }
+    }
+    return true;
   }
 
   private void solve(LinearSolverLu_DDRM with, double[] rightHandSide) {
