@@ -1,9 +1,14 @@
 package loopwright.assembly;
 
 import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import loopwright.characterise.DiodeFit;
+import loopwright.characterise.FitException;
+import loopwright.characterise.FittedDiode;
+import loopwright.characterise.FittedTransistor;
 import loopwright.characterise.TransistorFit;
 import loopwright.circuit.Physics;
 import loopwright.design.Design;
@@ -25,6 +30,7 @@ public final class DeviceModels {
   private final Map<Choice, TransistorParameters> transistors = new HashMap<>();
   private final Map<String, DiodeParameters> diodes = new HashMap<>();
 
+  private final Map<String, List<String>> notes = new LinkedHashMap<>();
   private final Map<String, String> usedParts = new HashMap<>();
 
   private record Choice(String part, Optional<TransistorMeasured> measured) {}
@@ -59,14 +65,40 @@ public final class DeviceModels {
     TransistorParameters parameters =
         transistors.computeIfAbsent(
             new Choice(partName(role, stagePart), measured),
-            choice -> TransistorFit.fit(transistorRecord(choice.part()), measured).parameters());
+            choice -> fitted(choice.part(), transistorRecord(choice.part()), measured));
     return role.equals("pair.q1") ? mismatched(parameters) : parameters;
   }
 
   /** Parameters of a diode at 25 °C. */
   DiodeParameters diode(String role, String stagePart) {
     String name = partName(role, stagePart);
-    return diodes.computeIfAbsent(name, key -> DiodeFit.fit(diodeRecord(key)).parameters());
+    return diodes.computeIfAbsent(name, key -> fitted(key, diodeRecord(key)));
+  }
+
+  /** What a person should know of the fits that were made, by part name. */
+  public Map<String, List<String>> notes() {
+    return notes;
+  }
+
+  private TransistorParameters fitted(
+      String name, TransistorRecord record, Optional<TransistorMeasured> measured) {
+    try {
+      FittedTransistor fitted = TransistorFit.fit(record, measured);
+      notes.put(name, fitted.notes());
+      return fitted.parameters();
+    } catch (FitException e) {
+      throw new AssemblyException("parts." + name + ": " + e.getMessage());
+    }
+  }
+
+  private DiodeParameters fitted(String name, DiodeRecord record) {
+    try {
+      FittedDiode fitted = DiodeFit.fit(record);
+      notes.put(name, fitted.notes());
+      return fitted.parameters();
+    } catch (FitException e) {
+      throw new AssemblyException("parts." + name + ": " + e.getMessage());
+    }
   }
 
   private TransistorParameters mismatched(TransistorParameters parameters) {

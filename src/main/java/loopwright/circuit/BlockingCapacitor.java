@@ -49,6 +49,16 @@ public final class BlockingCapacitor implements Element {
     return capacitance;
   }
 
+  /** Index of its first node. */
+  public int from() {
+    return from;
+  }
+
+  /** Index of its second node. */
+  public int to() {
+    return to;
+  }
+
   int index() {
     return index;
   }
@@ -65,7 +75,7 @@ public final class BlockingCapacitor implements Element {
     stamps.current(to, -current, 0);
     stamps.conductance(fromBranch, 1);
     stamps.conductance(toBranch, -1);
-    if (state.blocking() == CircuitState.Blocking.HELD) {
+    if (state.holds(index)) {
       double voltage = voltage(state);
       stamps.current(branch, voltage - state.held(index), Math.abs(voltage));
       stamps.conductance(branchFrom, 1);

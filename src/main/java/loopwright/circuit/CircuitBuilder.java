@@ -23,6 +23,9 @@ public final class CircuitBuilder {
    */
   public static final double LEAKAGE = 1e-12;
 
+  /** How the names of such leakages begin; the node's name follows. */
+  public static final String LEAKAGE_PREFIX = "leakage.";
+
   /** Name of the ground node. */
   public static final String GROUND = "ground";
 
@@ -323,7 +326,7 @@ public final class CircuitBuilder {
       String shore = shore(island, name);
       String ground = shore(island, root(GROUND));
       if (!shore.equals(ground)) {
-        resistor("leakage." + name, name, GROUND, 1 / LEAKAGE);
+        resistor(LEAKAGE_PREFIX + name, name, GROUND, 1 / LEAKAGE);
         island.put(shore, ground);
       }
     }

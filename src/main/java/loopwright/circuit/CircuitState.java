@@ -13,12 +13,15 @@ public final class CircuitState {
     HELD
   }
 
+  private static final int NONE = -1;
+
   private final Circuit circuit;
   private final double[] unknowns;
   private final double[] memory;
   private final Stamps stamps;
   private final double[] held;
   private Blocking blocking = Blocking.OPEN;
+  private int openDespite = NONE;
   private double sourceScale = 1;
   private double generator;
   private double shunt;
@@ -76,10 +79,20 @@ public final class CircuitState {
       }
     }
     blocking = Blocking.HELD;
+    openDespite = NONE;
+  }
+
+  /** Opens one blocking capacitor while the others go on holding their voltage. */
+  public void openOnly(BlockingCapacitor capacitor) {
+    openDespite = capacitor.index();
   }
 
   double held(int index) {
     return held[index];
+  }
+
+  boolean holds(int index) {
+    return blocking == Blocking.HELD && index != openDespite;
   }
 
   /** Factor on every independent source: 1, or less while the supply is stepped up. */
@@ -150,6 +163,7 @@ public final class CircuitState {
     System.arraycopy(other.memory, 0, memory, 0, memory.length);
     System.arraycopy(other.held, 0, held, 0, held.length);
     blocking = other.blocking;
+    openDespite = other.openDespite;
     sourceScale = other.sourceScale;
     generator = other.generator;
     shunt = other.shunt;

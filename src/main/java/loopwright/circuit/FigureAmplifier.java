@@ -126,7 +126,8 @@ public final class FigureAmplifier implements Element {
     double gainSlope = drive > lowest && drive < widest ? 1 : 0;
     stamps.current(nodes.gainOut(), -state.voltage(gainBranch), 0);
     stamps.conductance(gainSlots[0], -1);
-    stamps.current(gainBranch, state.voltage(nodes.gainOut()) - gainOut, Math.abs(gainOut));
+    double gainNode = state.voltage(nodes.gainOut());
+    stamps.current(gainBranch, gainNode - gainOut, Math.abs(gainOut) + Math.abs(gainNode));
     stamps.conductance(gainSlots[1], 1);
     stamps.conductance(gainSlots[2], -gainSlope);
 
@@ -136,10 +137,11 @@ public final class FigureAmplifier implements Element {
     double current = state.voltage(outBranch);
     stamps.current(nodes.out(), -current, 0);
     stamps.conductance(outSlots[0], -1);
+    double outNode = state.voltage(nodes.out());
     stamps.current(
         outBranch,
-        state.voltage(nodes.out()) + figures.outputResistance() * current - output,
-        Math.abs(output));
+        outNode + figures.outputResistance() * current - output,
+        Math.abs(output) + Math.abs(drive) + Math.abs(outNode));
     stamps.conductance(outSlots[1], 1);
     stamps.conductance(outSlots[2], -slope);
     stamps.conductance(outSlots[3], figures.outputResistance());
@@ -153,11 +155,16 @@ public final class FigureAmplifier implements Element {
     double byPlus = common + figures.gain();
     double byMinus = common - figures.gain();
     double input = byPlus * plus + byMinus * minus - figures.gain() * figures.offset();
+    double inputSize =
+        Math.abs(byPlus * plus)
+            + Math.abs(byMinus * minus)
+            + Math.abs(figures.gain() * figures.offset());
     for (int k = 0; k < stages; k++) {
       int row = firstStage + k;
       double value = state.voltage(row);
       double from = k == 0 ? input : state.voltage(row - 1);
-      stamps.current(row, value - from, Math.abs(value));
+      double size = k == 0 ? inputSize : Math.abs(from);
+      stamps.current(row, value - from, Math.abs(value) + size);
       stamps.conductance(stageSlots[k], 1);
       if (k == 0) {
         stamps.conductance(inPlusSlot, -byPlus);

@@ -94,7 +94,7 @@ public record Field(
 
   /** The records of a family or of alternatives, in the order of their declaration. */
   public List<Class<?>> variants() {
-    return type.isSealed() ? List.of(type.getPermittedSubclasses()) : List.of();
+    return Schema.variants(type);
   }
 
   /** The words that the field {@code kind} may hold for a record of a family; empty for others. */

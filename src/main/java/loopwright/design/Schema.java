@@ -1,5 +1,7 @@
 package loopwright.design;
 
+import java.lang.reflect.Constructor;
+import java.lang.reflect.Method;
 import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
 import java.lang.reflect.Type;
@@ -8,6 +10,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import loopwright.quantity.Measure;
 import loopwright.quantity.Otherwise;
 import loopwright.quantity.Quantity;
@@ -28,20 +31,49 @@ public final class Schema {
         }
       };
 
+  /** The runtime looks the permitted records of a family up anew at every question. */
+  private static final ClassValue<List<Class<?>>> VARIANTS =
+      new ClassValue<>() {
+        @Override
+        protected List<Class<?>> computeValue(Class<?> type) {
+          return type.isSealed() ? List.of(type.getPermittedSubclasses()) : List.of();
+        }
+      };
+
   private final Class<?> type;
   private final List<Field> fields;
+  private final Map<String, Method> accessors;
+  private final Constructor<?> constructor;
 
   private Schema(Class<?> type) {
     if (!type.isRecord()) {
       throw new IllegalArgumentException(type.getName() + " is no record");
     }
+    RecordComponent[] components = type.getRecordComponents();
     this.type = type;
-    this.fields = Arrays.stream(type.getRecordComponents()).map(Schema::field).toList();
+    this.fields = Arrays.stream(components).map(Schema::field).toList();
+    this.accessors =
+        Arrays.stream(components)
+            .collect(
+                Collectors.toUnmodifiableMap(
+                    RecordComponent::getName, RecordComponent::getAccessor));
+    this.constructor = canonicalConstructor(type, components);
   }
 
-  private Schema(Class<?> type, List<Field> fields) {
-    this.type = type;
+  private Schema(Schema schema, List<Field> fields) {
+    this.type = schema.type;
     this.fields = fields;
+    this.accessors = schema.accessors;
+    this.constructor = schema.constructor;
+  }
+
+  private static Constructor<?> canonicalConstructor(Class<?> type, RecordComponent[] components) {
+    try {
+      return type.getDeclaredConstructor(
+          Arrays.stream(components).map(RecordComponent::getType).toArray(Class<?>[]::new));
+    } catch (NoSuchMethodException e) {
+      throw new IllegalStateException(type.getName() + " has no canonical constructor", e);
+    }
   }
 
   /**
@@ -62,8 +94,13 @@ public final class Schema {
   static Schema inside(Field field, Class<?> variant) {
     Schema schema = of(variant);
     return field.shape() == Shape.PART_VALUE
-        ? new Schema(variant, schema.fields.stream().map(part -> measured(part, field)).toList())
+        ? new Schema(schema, schema.fields.stream().map(part -> measured(part, field)).toList())
         : schema;
+  }
+
+  /** The records of a sealed family in the order of their declaration; none for other types. */
+  static List<Class<?>> variants(Class<?> type) {
+    return VARIANTS.get(type);
   }
 
   /** The record type that this describes. */
@@ -88,16 +125,15 @@ public final class Schema {
    * @param name name of a field
    */
   public Object value(Object block, String name) {
-    for (RecordComponent component : type.getRecordComponents()) {
-      if (component.getName().equals(name)) {
-        try {
-          return component.getAccessor().invoke(block);
-        } catch (ReflectiveOperationException e) {
-          throw new IllegalStateException("cannot read " + name + " of " + type.getName(), e);
-        }
-      }
+    Method accessor = accessors.get(name);
+    if (accessor == null) {
+      throw new IllegalArgumentException(type.getName() + " has no field " + name);
     }
-    throw new IllegalArgumentException(type.getName() + " has no field " + name);
+    try {
+      return accessor.invoke(block);
+    } catch (ReflectiveOperationException e) {
+      throw new IllegalStateException("cannot read " + name + " of " + type.getName(), e);
+    }
   }
 
   /**
@@ -108,10 +144,6 @@ public final class Schema {
    * @throws IllegalStateException when a needed field is missing
    */
   public Object build(Map<String, ?> values) {
-    Class<?>[] types =
-        Arrays.stream(type.getRecordComponents())
-            .map(RecordComponent::getType)
-            .toArray(Class<?>[]::new);
     Object[] arguments =
         fields.stream()
             .map(
@@ -119,7 +151,7 @@ public final class Schema {
                     values.containsKey(field.name()) ? values.get(field.name()) : field.absent())
             .toArray();
     try {
-      return type.getDeclaredConstructor(types).newInstance(arguments);
+      return constructor.newInstance(arguments);
     } catch (ReflectiveOperationException e) {
       throw new IllegalStateException("cannot build " + type.getName(), e);
     }
@@ -216,9 +248,7 @@ public final class Schema {
     } else if (type.isEnum()) {
       return Shape.CHOICE;
     } else if (type.isSealed()) {
-      boolean told =
-          Arrays.stream(type.getPermittedSubclasses())
-              .noneMatch(variant -> Field.kinds(variant).isEmpty());
+      boolean told = variants(type).stream().noneMatch(variant -> Field.kinds(variant).isEmpty());
       return told ? Shape.FAMILY : Shape.ALTERNATIVES;
     } else if (type.isRecord()) {
       return Shape.BLOCK;

@@ -44,7 +44,8 @@ record ClipLevel(double output, String says) {
       before.copyFrom(walk.state());
       double next = walk.generator() + sense * stride;
       double target = sense * (limit - next) > 0 ? next : limit;
-      if (!walk.advance(target)) {
+      boolean arrived = walk.advance(target);
+      if (!arrived && !leaves(walk.gain(), gain)) {
         return new ClipLevel(
             walk.output(),
             "jumps at "
@@ -52,7 +53,7 @@ record ClipLevel(double output, String says) {
                 + "; "
                 + mostChanged(hookup, start, walk.state()));
       }
-      if (leaves(walk.gain(), gain)) {
+      if (!arrived || leaves(walk.gain(), gain)) {
         GeneratorWalk edge = bisect(hookup, before, walk.generator(), gain);
         return new ClipLevel(edge.output(), mostChanged(hookup, start, edge.state()));
       }

@@ -32,6 +32,8 @@ public final class Predictor {
    * @param frequencies of the responses, Hz; empty means 20 a decade from 1 Hz to 1 GHz
    * @param progress reported to, and asked whether the result is still wanted
    * @throws loopwright.task.CancelledException when it is not
+   * @throws loopwright.assembly.AssemblyException when the design names a node that a hookup lacks,
+   *     or a part record that no model can be made of; the message is one sentence that says where
    */
   public static Prediction predict(
       Design design, List<String> hookups, double[] frequencies, Progress progress) {
@@ -84,7 +86,8 @@ public final class Predictor {
         harmonics(solution),
         solution.waveformOutcome().isPresent()
             ? Optional.of(solution.waveform().toWaveform())
-            : Optional.empty());
+            : Optional.empty(),
+        SolveNotes.of(solution));
   }
 
   private static RestState restState(HookupSolution solution) {

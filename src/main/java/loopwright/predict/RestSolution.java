@@ -4,7 +4,6 @@ import java.util.HashMap;
 import java.util.Map;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.Assembler;
-import loopwright.assembly.AssemblyException;
 import loopwright.assembly.DeviceModels;
 import loopwright.circuit.CircuitState;
 import loopwright.design.Design;
@@ -63,12 +62,8 @@ record RestSolution(
       DeviceModels models,
       JunctionHeat heat,
       Map<String, Double> kelvins) {
-    AssembledHookup assembled;
-    try {
-      assembled = Assembler.assemble(design, hookup, models, heat.temperatures(kelvins));
-    } catch (AssemblyException e) {
-      throw new UnsolvedException(e.getMessage());
-    }
+    AssembledHookup assembled =
+        Assembler.assemble(design, hookup, models, heat.temperatures(kelvins));
     OperatingPoint point = OperatingPointSolver.solve(assembled.circuit());
     if (point instanceof OperatingPoint.Found found) {
       return new RestSolution(assembled, found.state(), found.remark(), kelvins);
