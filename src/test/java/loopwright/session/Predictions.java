@@ -46,6 +46,7 @@ public final class Predictions {
         "",
         List.of(),
         List.of(),
-        Optional.empty());
+        Optional.empty(),
+        List.of());
   }
 }
