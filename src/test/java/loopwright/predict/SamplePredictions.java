@@ -45,7 +45,8 @@ public final class SamplePredictions {
         "",
         List.of(new OffsetShare("input offset", -0.0067), new OffsetShare("base current", 0.0007)),
         List.of(0.001, 2.0, 0.0, 3e-4),
-        Optional.empty());
+        Optional.empty(),
+        List.of());
   }
 
   private static HookupPrediction failed(Hookup hookup) {
@@ -70,7 +71,8 @@ public final class SamplePredictions {
         "",
         List.of(),
         List.of(),
-        Optional.empty());
+        Optional.empty(),
+        List.of());
   }
 
   private static RestState rest() {
@@ -132,7 +134,17 @@ public final class SamplePredictions {
       Unit unit,
       FigureValue formula,
       FigureValue solved) {
-    Figure figure = new Figure(key, label, unit, label, "at rest", "", CostClass.LINEAR);
+    Figure figure =
+        new Figure(
+            key,
+            label,
+            unit,
+            label,
+            "at rest",
+            "",
+            CostClass.LINEAR,
+            NoFormula.ROAD,
+            NoFormula.ROAD);
     figures.put(key, new FigureResult(figure, formula, solved));
   }
 
