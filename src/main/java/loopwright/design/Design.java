@@ -55,4 +55,23 @@ public record Design(
   public Optional<Hookup> hookup(String hookupName) {
     return hookups.stream().filter(hookup -> hookup.name().equals(hookupName)).findFirst();
   }
+
+  /** The same design in other surroundings. */
+  public Design withSurroundings(Surroundings other) {
+    return new Design(
+        loopwright,
+        name,
+        notes,
+        rails,
+        other,
+        parts,
+        amplifier,
+        devices,
+        extras,
+        hookups,
+        tolerances,
+        limits,
+        drawer,
+        bench);
+  }
 }

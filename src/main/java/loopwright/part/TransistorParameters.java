@@ -55,4 +55,164 @@ public record TransistorParameters(
           0,
           0,
           0);
+
+  /** These parameters with another saturation current, A. */
+  public TransistorParameters withSaturationCurrent(double value) {
+    return new TransistorParameters(
+        value,
+        forwardBeta,
+        reverseBeta,
+        earlyVoltage,
+        kneeCurrent,
+        recombinationCurrent,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        baseEmitterCapacitance,
+        baseCollectorCapacitance,
+        transitTime,
+        reverseTransitTime,
+        flickerCorner);
+  }
+
+  /** These parameters with another forward beta. */
+  public TransistorParameters withForwardBeta(double value) {
+    return new TransistorParameters(
+        saturationCurrent,
+        value,
+        reverseBeta,
+        earlyVoltage,
+        kneeCurrent,
+        recombinationCurrent,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        baseEmitterCapacitance,
+        baseCollectorCapacitance,
+        transitTime,
+        reverseTransitTime,
+        flickerCorner);
+  }
+
+  /** These parameters with another Early voltage, V. */
+  public TransistorParameters withEarlyVoltage(double value) {
+    return new TransistorParameters(
+        saturationCurrent,
+        forwardBeta,
+        reverseBeta,
+        value,
+        kneeCurrent,
+        recombinationCurrent,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        baseEmitterCapacitance,
+        baseCollectorCapacitance,
+        transitTime,
+        reverseTransitTime,
+        flickerCorner);
+  }
+
+  /** These parameters with another knee current, A. */
+  public TransistorParameters withKneeCurrent(double value) {
+    return new TransistorParameters(
+        saturationCurrent,
+        forwardBeta,
+        reverseBeta,
+        earlyVoltage,
+        value,
+        recombinationCurrent,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        baseEmitterCapacitance,
+        baseCollectorCapacitance,
+        transitTime,
+        reverseTransitTime,
+        flickerCorner);
+  }
+
+  /** These parameters with another recombination current, A. */
+  public TransistorParameters withRecombinationCurrent(double value) {
+    return new TransistorParameters(
+        saturationCurrent,
+        forwardBeta,
+        reverseBeta,
+        earlyVoltage,
+        kneeCurrent,
+        value,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        baseEmitterCapacitance,
+        baseCollectorCapacitance,
+        transitTime,
+        reverseTransitTime,
+        flickerCorner);
+  }
+
+  /** These parameters with another zero-bias base-emitter capacitance, F. */
+  public TransistorParameters withBaseEmitterCapacitance(double value) {
+    return new TransistorParameters(
+        saturationCurrent,
+        forwardBeta,
+        reverseBeta,
+        earlyVoltage,
+        kneeCurrent,
+        recombinationCurrent,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        value,
+        baseCollectorCapacitance,
+        transitTime,
+        reverseTransitTime,
+        flickerCorner);
+  }
+
+  /** These parameters with another zero-bias base-collector capacitance, F. */
+  public TransistorParameters withBaseCollectorCapacitance(double value) {
+    return new TransistorParameters(
+        saturationCurrent,
+        forwardBeta,
+        reverseBeta,
+        earlyVoltage,
+        kneeCurrent,
+        recombinationCurrent,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        baseEmitterCapacitance,
+        value,
+        transitTime,
+        reverseTransitTime,
+        flickerCorner);
+  }
+
+  /** These parameters with another forward transit time, s. */
+  public TransistorParameters withTransitTime(double value) {
+    return new TransistorParameters(
+        saturationCurrent,
+        forwardBeta,
+        reverseBeta,
+        earlyVoltage,
+        kneeCurrent,
+        recombinationCurrent,
+        recombinationIdeality,
+        baseResistance,
+        emitterResistance,
+        collectorResistance,
+        baseEmitterCapacitance,
+        baseCollectorCapacitance,
+        value,
+        reverseTransitTime,
+        flickerCorner);
+  }
 }

@@ -22,6 +22,7 @@ import loopwright.design.Hookup;
  * @param offsetContributions what makes the output offset, adding up to it
  * @param harmonics peak values, V, index 0 the mean; empty without a waveform
  * @param waveform the static waveform; empty without an amplitude
+ * @param notes what is to be said about how it was solved
  */
 public record HookupPrediction(
     Hookup hookup,
@@ -35,7 +36,8 @@ public record HookupPrediction(
     String swingRemark,
     List<OffsetShare> offsetContributions,
     List<Double> harmonics,
-    Optional<Waveform> waveform) {
+    Optional<Waveform> waveform,
+    List<SolveNote> notes) {
   /** Keeps its own copies. */
   public HookupPrediction {
     figures = Collections.unmodifiableMap(new LinkedHashMap<>(figures));
@@ -45,5 +47,6 @@ public record HookupPrediction(
     overSwing = List.copyOf(overSwing);
     offsetContributions = List.copyOf(offsetContributions);
     harmonics = List.copyOf(harmonics);
+    notes = List.copyOf(notes);
   }
 }

@@ -1,0 +1,124 @@
+package loopwright.assembly;
+
+import java.util.Optional;
+import loopwright.circuit.CircuitBuilder;
+import loopwright.design.Design;
+import loopwright.design.FeedFrom;
+import loopwright.design.PartValue;
+import loopwright.design.ReturnNode;
+import loopwright.part.Polarity;
+
+/**
+ * The circuit in the making and what every stage needs to add itself to it: the design, the device
+ * models, and which rail is which for the pair's polarity.
+ */
+final class Workpiece {
+  private final Design design;
+  private final DeviceModels models;
+  private final Temperatures temperatures;
+  private final CircuitBuilder circuit;
+  private final Polarity pairPolarity;
+
+  Workpiece(
+      Design design,
+      DeviceModels models,
+      Temperatures temperatures,
+      CircuitBuilder circuit,
+      Polarity pairPolarity) {
+    this.design = design;
+    this.models = models;
+    this.temperatures = temperatures;
+    this.circuit = circuit;
+    this.pairPolarity = pairPolarity;
+  }
+
+  Design design() {
+    return design;
+  }
+
+  CircuitBuilder circuit() {
+    return circuit;
+  }
+
+  Polarity pairPolarity() {
+    return pairPolarity;
+  }
+
+  /** The rail that the pair's collectors hang on: P. */
+  String collectorRail() {
+    return pairPolarity == Polarity.NPN ? Nodes.POSITIVE : Nodes.NEGATIVE;
+  }
+
+  /** The rail that tail and load pull toward: M. */
+  String tailRail() {
+    return pairPolarity == Polarity.NPN ? Nodes.NEGATIVE : Nodes.POSITIVE;
+  }
+
+  /** Adds a transistor of a stage. */
+  void transistor(String role, String part, String collector, String base, String emitter) {
+    circuit.transistor(
+        role,
+        models.polarity(role, part),
+        collector,
+        base,
+        emitter,
+        models.transistor(role, part),
+        temperatures.kelvin(role));
+  }
+
+  /** Adds a diode of a stage. */
+  void diode(String role, String part, String anode, String cathode) {
+    circuit.diode(role, anode, cathode, models.diode(role, part), temperatures.kelvin(role));
+  }
+
+  /**
+   * Adds a chain of diodes that conducts downward from one node to the other.
+   *
+   * @param rolePrefix roles are this and 1, 2, …
+   * @param nodePrefix the nodes between are this and 1, 2, …
+   */
+  void diodeChain(
+      String rolePrefix, String nodePrefix, String part, int count, String high, String low) {
+    String anode = high;
+    for (int i = 1; i <= count; i++) {
+      String cathode = i == count ? low : nodePrefix + i;
+      diode(rolePrefix + i, part, anode, cathode);
+      anode = cathode;
+    }
+  }
+
+  void resistor(String path, String from, String to, PartValue value) {
+    circuit.resistor(path, from, to, value.effective());
+  }
+
+  void capacitor(String path, String from, String to, PartValue value) {
+    circuit.capacitor(path, from, to, value.effective());
+  }
+
+  void blockingCapacitor(String path, String from, String to, PartValue value) {
+    circuit.blockingCapacitor(path, from, to, value.effective());
+  }
+
+  /** The node that the bias of a current source is fed from. */
+  String feedNode(Optional<FeedFrom> feedFrom) {
+    FeedFrom standard = tailRailIsZero() ? FeedFrom.OPPOSITE_RAIL : FeedFrom.GROUND;
+    return switch (feedFrom.orElse(standard)) {
+      case GROUND -> CircuitBuilder.GROUND;
+      case MID_RAIL -> Nodes.MID_RAIL;
+      case OPPOSITE_RAIL -> collectorRail();
+    };
+  }
+
+  /** The node of a return. */
+  static String returnNode(ReturnNode node) {
+    return node == ReturnNode.GROUND ? CircuitBuilder.GROUND : Nodes.MID_RAIL;
+  }
+
+  private boolean tailRailIsZero() {
+    double volts =
+        pairPolarity == Polarity.NPN
+            ? design.rails().negative().value()
+            : design.rails().positive().value();
+    return volts == 0;
+  }
+}

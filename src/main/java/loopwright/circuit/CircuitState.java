@@ -1,0 +1,178 @@
+package loopwright.circuit;
+
+/**
+ * The point at which a circuit is evaluated, with the stamps it gives there. It belongs to one run
+ * and one thread.
+ */
+public final class CircuitState {
+  /** How capacitors count in the static equations. */
+  public enum Blocking {
+    /** Every capacitor is open. */
+    OPEN,
+    /** Blocking capacitors hold the voltage that they had at rest; all others are open. */
+    HELD
+  }
+
+  private static final int NONE = -1;
+
+  private final Circuit circuit;
+  private final double[] unknowns;
+  private final double[] memory;
+  private final Stamps stamps;
+  private final double[] held;
+  private Blocking blocking = Blocking.OPEN;
+  private int openDespite = NONE;
+  private double sourceScale = 1;
+  private double generator;
+  private double shunt;
+  private boolean limited;
+
+  CircuitState(Circuit circuit, int memorySize, int blockingCapacitors) {
+    this.circuit = circuit;
+    this.unknowns = new double[circuit.unknowns()];
+    this.memory = new double[memorySize];
+    this.stamps = new Stamps(circuit.unknowns(), circuit.pattern().slots());
+    this.held = new double[blockingCapacitors];
+    this.generator = circuit.restGenerator();
+  }
+
+  /** The circuit. */
+  public Circuit circuit() {
+    return circuit;
+  }
+
+  /** Node voltages, V, then branch currents, A; to be changed by solvers only. */
+  public double[] unknowns() {
+    return unknowns;
+  }
+
+  /** What the last evaluation gave. */
+  public Stamps stamps() {
+    return stamps;
+  }
+
+  /** Voltage of a node by index, V; ground has index −1. */
+  public double voltage(int node) {
+    return node < 0 ? 0 : unknowns[node];
+  }
+
+  /** Voltage of a node by name, V. */
+  public double voltage(String node) {
+    return voltage(circuit.node(node));
+  }
+
+  /** How blocking capacitors count. */
+  public Blocking blocking() {
+    return blocking;
+  }
+
+  /** Opens the blocking capacitors. */
+  public void openBlockingCapacitors() {
+    blocking = Blocking.OPEN;
+  }
+
+  /** Holds every blocking capacitor at the voltage it has in this state. */
+  public void holdBlockingCapacitors() {
+    for (Element element : circuit.elements()) {
+      if (element instanceof BlockingCapacitor capacitor) {
+        held[capacitor.index()] = capacitor.voltage(this);
+      }
+    }
+    blocking = Blocking.HELD;
+    openDespite = NONE;
+  }
+
+  /** Opens one blocking capacitor while the others go on holding their voltage. */
+  public void openOnly(BlockingCapacitor capacitor) {
+    openDespite = capacitor.index();
+  }
+
+  double held(int index) {
+    return held[index];
+  }
+
+  boolean holds(int index) {
+    return blocking == Blocking.HELD && index != openDespite;
+  }
+
+  /** Factor on every independent source: 1, or less while the supply is stepped up. */
+  public double sourceScale() {
+    return sourceScale;
+  }
+
+  /** Sets the factor on every independent source. */
+  public void setSourceScale(double scale) {
+    sourceScale = scale;
+  }
+
+  /** Generator voltage before the source scale, V. */
+  public double generator() {
+    return generator;
+  }
+
+  /** Sets the generator voltage, V. */
+  public void setGenerator(double volts) {
+    generator = volts;
+  }
+
+  /** Conductance that a homotopy adds from every node to ground, S; 0 in the circuit itself. */
+  public double shunt() {
+    return shunt;
+  }
+
+  /** Sets the conductance that a homotopy adds from every node to ground, S. */
+  public void setShunt(double siemens) {
+    shunt = siemens;
+  }
+
+  /** Whether the last evaluation linearised some junction elsewhere than at its voltage. */
+  public boolean limited() {
+    return limited;
+  }
+
+  void setLimited() {
+    limited = true;
+  }
+
+  double memory(int index) {
+    return memory[index];
+  }
+
+  void setMemory(int index, double value) {
+    memory[index] = value;
+  }
+
+  /** Evaluates every element at the present unknowns, limiting junction steps. */
+  public void evaluate() {
+    stamps.clear();
+    limited = false;
+    for (Element element : circuit.elements()) {
+      element.stamp(this);
+    }
+    if (shunt > 0) {
+      circuit.stampShunt(this);
+    }
+  }
+
+  /** Takes over point and conditions of another state of the same circuit. */
+  public void copyFrom(CircuitState other) {
+    if (other.circuit != circuit) {
+      throw new IllegalArgumentException("a state belongs to one circuit");
+    }
+    System.arraycopy(other.unknowns, 0, unknowns, 0, unknowns.length);
+    System.arraycopy(other.memory, 0, memory, 0, memory.length);
+    System.arraycopy(other.held, 0, held, 0, held.length);
+    blocking = other.blocking;
+    openDespite = other.openDespite;
+    sourceScale = other.sourceScale;
+    generator = other.generator;
+    shunt = other.shunt;
+  }
+
+  /** A copy that moves on its own. */
+  public CircuitState copy() {
+    CircuitState copy = circuit.newState();
+    copy.copyFrom(this);
+    return copy;
+  }
+}

@@ -1,0 +1,32 @@
+package loopwright.circuit;
+
+/**
+ * An element of a circuit: two-terminal parts, devices, sources and leads. It is immutable; what it
+ * remembers between evaluations lives in the {@link CircuitState}.
+ */
+public sealed interface Element
+    permits Resistor,
+        Capacitor,
+        BlockingCapacitor,
+        CurrentSourceElement,
+        VoltageSource,
+        Lead,
+        Inductor,
+        Transistor,
+        JunctionDiode,
+        FigureAmplifier {
+  /** Name in the design: path of a part, role of a device. */
+  String name();
+
+  /** Adds currents, charges and derivatives at the state's unknowns to its stamps. */
+  void stamp(CircuitState state);
+
+  /**
+   * Adds −∂f/∂(source scale) to a right-hand side; only independent sources have one.
+   *
+   * @param rightHandSide by unknown; added to
+   */
+  default void exciteSources(CircuitState state, double[] rightHandSide) {
+    // Most elements are no sources.
+  }
+}

@@ -1,0 +1,149 @@
+package loopwright.circuit;
+
+import loopwright.part.Polarity;
+
+/**
+ * A bipolar transistor between its internal nodes; ohmic resistances are resistors of their own.
+ * For pnp every voltage and current is mirrored.
+ */
+public final class Transistor implements Element {
+  private final String role;
+  private final int sign;
+  private final int collector;
+  private final int base;
+  private final int emitter;
+  private final TransistorEquations equations;
+  private final int memory;
+  private final int[] slots = new int[9];
+
+  Transistor(
+      String role,
+      Polarity polarity,
+      int collector,
+      int base,
+      int emitter,
+      TransistorEquations equations,
+      int memory,
+      CircuitBuilder builder) {
+    this.role = role;
+    this.sign = polarity.sign();
+    this.collector = collector;
+    this.base = base;
+    this.emitter = emitter;
+    this.equations = equations;
+    this.memory = memory;
+    int[] nodes = {collector, base, emitter};
+    for (int row = 0; row < 3; row++) {
+      for (int column = 0; column < 3; column++) {
+        slots[3 * row + column] = builder.slot(nodes[row], nodes[column]);
+      }
+    }
+  }
+
+  @Override
+  public String name() {
+    return role;
+  }
+
+  /** The equations, as the last evaluation of any state left them. */
+  public TransistorEquations equations() {
+    return equations;
+  }
+
+  /** Voltage across the internal base-emitter junction in the device's own polarity, V. */
+  public double baseEmitter(CircuitState state) {
+    return sign * (state.voltage(base) - state.voltage(emitter));
+  }
+
+  /** Voltage across the internal base-collector junction in the device's own polarity, V. */
+  public double baseCollector(CircuitState state) {
+    return sign * (state.voltage(base) - state.voltage(collector));
+  }
+
+  /** Collector current in the device's own polarity, A. */
+  public double collectorCurrent(CircuitState state) {
+    equations.evaluate(baseEmitter(state), baseCollector(state));
+    return equations.collectorCurrent();
+  }
+
+  /** Base current in the device's own polarity, A. */
+  public double baseCurrent(CircuitState state) {
+    equations.evaluate(baseEmitter(state), baseCollector(state));
+    return equations.baseCurrent();
+  }
+
+  /** ∂I_C/∂v_BE at the state, S. */
+  public double transconductance(CircuitState state) {
+    equations.evaluate(baseEmitter(state), baseCollector(state));
+    return equations.collectorByBaseEmitter();
+  }
+
+  @Override
+  public void stamp(CircuitState state) {
+    double actualForward = baseEmitter(state);
+    double actualReverse = baseCollector(state);
+    double forward = limit(state, memory, actualForward);
+    double reverse = limit(state, memory + 1, actualReverse);
+    equations.evaluate(forward, reverse);
+
+    double moreForward = actualForward - forward;
+    double moreReverse = actualReverse - reverse;
+    if (moreForward != 0 || moreReverse != 0) {
+      state.setLimited();
+    }
+    double cf = equations.collectorByBaseEmitter();
+    double cr = equations.collectorByBaseCollector();
+    double bf = equations.baseByBaseEmitter();
+    double br = equations.baseByBaseCollector();
+    double ic = equations.collectorCurrent() + cf * moreForward + cr * moreReverse;
+    double ib = equations.baseCurrent() + bf * moreForward + br * moreReverse;
+
+    Stamps stamps = state.stamps();
+    double vc = Math.abs(state.voltage(collector));
+    double vb = Math.abs(state.voltage(base));
+    double ve = Math.abs(state.voltage(emitter));
+    double conductedCollector = Math.abs(cf + cr) * vb + Math.abs(cf) * ve + Math.abs(cr) * vc;
+    double conductedBase = Math.abs(bf + br) * vb + Math.abs(bf) * ve + Math.abs(br) * vc;
+    stamps.current(collector, sign * ic, conductedCollector);
+    stamps.current(base, sign * ib, conductedBase);
+    stamps.current(emitter, -sign * (ic + ib), conductedCollector + conductedBase);
+
+    stamps.conductance(slots[0], -cr);
+    stamps.conductance(slots[1], cf + cr);
+    stamps.conductance(slots[2], -cf);
+    stamps.conductance(slots[3], -br);
+    stamps.conductance(slots[4], bf + br);
+    stamps.conductance(slots[5], -bf);
+    stamps.conductance(slots[6], cr + br);
+    stamps.conductance(slots[7], -(cf + cr + bf + br));
+    stamps.conductance(slots[8], cf + bf);
+    stampCharges(stamps, moreForward, moreReverse);
+  }
+
+  private void stampCharges(Stamps stamps, double moreForward, double moreReverse) {
+    double ef = equations.baseEmitterChargeByBaseEmitter();
+    double er = equations.baseEmitterChargeByBaseCollector();
+    double rr = equations.baseCollectorChargeByBaseCollector();
+    double chargeEmitter = equations.baseEmitterCharge() + ef * moreForward + er * moreReverse;
+    double chargeCollector = equations.baseCollectorCharge() + rr * moreReverse;
+    stamps.charge(base, sign * (chargeEmitter + chargeCollector));
+    stamps.charge(emitter, -sign * chargeEmitter);
+    stamps.charge(collector, -sign * chargeCollector);
+    stamps.capacitance(slots[0], rr);
+    stamps.capacitance(slots[1], -rr);
+    stamps.capacitance(slots[3], -(er + rr));
+    stamps.capacitance(slots[4], ef + er + rr);
+    stamps.capacitance(slots[5], -ef);
+    stamps.capacitance(slots[6], er);
+    stamps.capacitance(slots[7], -(ef + er));
+    stamps.capacitance(slots[8], ef);
+  }
+
+  private double limit(CircuitState state, int at, double proposed) {
+    double limited =
+        JunctionLimit.limit(
+            proposed, state.memory(at), equations.thermalVoltage(), equations.criticalVoltage());
+    state.setMemory(at, limited);
+    return limited;
+  }
+}

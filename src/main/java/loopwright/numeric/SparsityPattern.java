@@ -1,0 +1,69 @@
+package loopwright.numeric;
+
+import java.util.HashMap;
+import java.util.Map;
+
+/**
+ * The places of a square matrix that may differ from zero. Each has a slot: an index into the flat
+ * array that holds the values. A pattern is fixed once built; values are refilled many times.
+ */
+public final class SparsityPattern {
+  private final int size;
+  private final int[] rows;
+  private final int[] columns;
+
+  private SparsityPattern(int size, int[] rows, int[] columns) {
+    this.size = size;
+    this.rows = rows;
+    this.columns = columns;
+  }
+
+  /** Number of rows, and of columns. */
+  public int size() {
+    return size;
+  }
+
+  /** Number of slots. */
+  public int slots() {
+    return rows.length;
+  }
+
+  /** Row of a slot. */
+  public int row(int slot) {
+    return rows[slot];
+  }
+
+  /** Column of a slot. */
+  public int column(int slot) {
+    return columns[slot];
+  }
+
+  /** Collects the places of a matrix and hands out their slots. */
+  public static final class Builder {
+    private final Map<Long, Integer> slots = new HashMap<>();
+
+    /**
+     * The slot of a place, made when it is new.
+     *
+     * @return the slot, or −1 when row or column is negative (ground has no row)
+     */
+    public int slot(int row, int column) {
+      if (row < 0 || column < 0) {
+        return -1;
+      }
+      return slots.computeIfAbsent(((long) row << 32) | column, key -> slots.size());
+    }
+
+    /** The pattern of a matrix of the given size. */
+    public SparsityPattern build(int size) {
+      int[] rows = new int[slots.size()];
+      int[] columns = new int[slots.size()];
+      slots.forEach(
+          (place, slot) -> {
+            rows[slot] = (int) (place >> 32);
+            columns[slot] = (int) (long) place;
+          });
+      return new SparsityPattern(size, rows, columns);
+    }
+  }
+}

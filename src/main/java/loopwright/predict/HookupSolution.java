@@ -1,0 +1,193 @@
+package loopwright.predict;
+
+import java.util.List;
+import java.util.Map;
+import loopwright.assembly.AssembledHookup;
+import loopwright.assembly.DeviceModels;
+import loopwright.circuit.CircuitState;
+import loopwright.design.Design;
+import loopwright.design.Hookup;
+import loopwright.solve.LinearNetwork;
+import loopwright.solve.MidbandNetwork;
+import loopwright.solve.NaturalFrequencies;
+import loopwright.solve.NaturalFrequencies.Pole;
+
+/**
+ * Everything that is solved of one hookup, each piece when it is first asked for. The entries of
+ * the catalogue read their values from here.
+ */
+final class HookupSolution {
+  private final Design design;
+  private final Hookup hookup;
+  private final HookupGains gains;
+  private final Lazy<RestSolution> rest;
+  private final Lazy<Levels> levels;
+  private final Lazy<MidbandNetwork> midbandHigh;
+  private final Lazy<MidbandNetwork> midbandLow;
+  private final Lazy<MidbandNetwork> midbandRest;
+  private final Lazy<StaticWaveform> waveform;
+  private final Lazy<LinearNetwork> network;
+  private final Lazy<List<Pole>> poles;
+  private final Lazy<LoopMargins> margins;
+  private final Lazy<ClosedLoop> closedLoop;
+  private final Lazy<SwingStability> swing;
+  private final Lazy<ClipLevel> clipHigh;
+  private final Lazy<ClipLevel> clipLow;
+  private final Lazy<Map<String, DeviceState>> devices;
+
+  HookupSolution(Design design, Hookup hookup, DeviceModels models) {
+    this.design = design;
+    this.hookup = hookup;
+    this.gains = new HookupGains(hookup);
+    this.rest = new Lazy<>(() -> RestSolution.of(design, hookup, models));
+    this.levels = new Lazy<>(() -> Levels.find(assembled(), gains, rest.get().state()));
+    this.midbandHigh = new Lazy<>(() -> midband(levels().high()));
+    this.midbandLow = new Lazy<>(() -> midband(levels().low()));
+    this.midbandRest = new Lazy<>(() -> midband(levels().linearRest()));
+    this.waveform = new Lazy<>(() -> new StaticWaveform(assembled(), heldRest()));
+    this.network = new Lazy<>(this::networkAtRest);
+    this.poles = new Lazy<>(() -> new NaturalFrequencies(network.get()).of(network.get()));
+    this.margins = new Lazy<>(this::marginsAtRest);
+    this.closedLoop = new Lazy<>(this::closedLoopAtRest);
+    this.swing = new Lazy<>(() -> new SwingStability(assembled(), heldRest()));
+    this.clipHigh = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().high(), 1));
+    this.clipLow = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().low(), -1));
+    this.devices =
+        new Lazy<>(
+            () -> new DeviceReadout(assembled()).read(rest.get().state(), rest.get().kelvins()));
+  }
+
+  Design design() {
+    return design;
+  }
+
+  Hookup hookup() {
+    return hookup;
+  }
+
+  HookupGains gains() {
+    return gains;
+  }
+
+  Outcome<RestSolution> restOutcome() {
+    return rest.outcome();
+  }
+
+  RestSolution rest() {
+    return rest.get();
+  }
+
+  AssembledHookup assembled() {
+    return rest.get().hookup();
+  }
+
+  /** Devices at rest by role. */
+  Map<String, DeviceState> devices() {
+    return devices.get();
+  }
+
+  Levels levels() {
+    return levels.get();
+  }
+
+  MidbandNetwork midbandHigh() {
+    return midbandHigh.get();
+  }
+
+  MidbandNetwork midbandLow() {
+    return midbandLow.get();
+  }
+
+  MidbandNetwork midbandRest() {
+    return midbandRest.get();
+  }
+
+  StaticWaveform waveform() {
+    return waveform.get();
+  }
+
+  Outcome<StaticWaveform> waveformOutcome() {
+    return waveform.outcome();
+  }
+
+  /** The small-signal circuit at rest. */
+  LinearNetwork network() {
+    return network.get();
+  }
+
+  Outcome<LinearNetwork> networkOutcome() {
+    return network.outcome();
+  }
+
+  /** Natural frequencies at rest. */
+  List<Pole> poles() {
+    return poles.get();
+  }
+
+  Outcome<List<Pole>> polesOutcome() {
+    return poles.outcome();
+  }
+
+  LoopMargins margins() {
+    return margins.get();
+  }
+
+  ClosedLoop closedLoop() {
+    return closedLoop.get();
+  }
+
+  SwingStability swing() {
+    return swing.get();
+  }
+
+  Outcome<SwingStability> swingOutcome() {
+    return swing.outcome();
+  }
+
+  ClipLevel clipHigh() {
+    return clipHigh.get();
+  }
+
+  ClipLevel clipLow() {
+    return clipLow.get();
+  }
+
+  /** Throws the reason where there is no loop. */
+  void needLoop() {
+    if (assembled().isOpen()) {
+      throw new UnsolvedException("the hookup is open: there is no loop");
+    }
+  }
+
+  private MidbandNetwork midband(CircuitState state) {
+    return new MidbandNetwork(assembled(), state);
+  }
+
+  /**
+   * At rest with blocking capacitors held; it needs no level, so it holds even where those fail.
+   */
+  private CircuitState heldRest() {
+    CircuitState held = rest.get().state().copy();
+    held.holdBlockingCapacitors();
+    return held;
+  }
+
+  private LinearNetwork networkAtRest() {
+    LinearNetwork linear = new LinearNetwork(assembled());
+    linear.linearise(assembled().isOpen() ? levels().linearRest() : rest.get().state());
+    return linear;
+  }
+
+  private LoopMargins marginsAtRest() {
+    needLoop();
+    return LoopMargins.of(network(), poles());
+  }
+
+  private ClosedLoop closedLoopAtRest() {
+    needLoop();
+    if (poles().stream().anyMatch(Pole::grows)) {
+      throw new UnsolvedException("something grows at rest");
+    }
+    return ClosedLoop.of(network(), midbandRest().gain(), hookup.source().frequency().value());
+  }
+}

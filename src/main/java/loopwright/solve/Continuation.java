@@ -1,0 +1,172 @@
+package loopwright.solve;
+
+import java.util.Arrays;
+import loopwright.circuit.CircuitState;
+
+/**
+ * Follows the solution of a circuit continuously as a drive moves one way: tangent predictor,
+ * Newton corrector, step length by the predictor's error.
+ *
+ * <p>A corrector that lands on another branch would give plausible wrong figures. Two things tell:
+ * the predictor's error does not shrink with the step, and the determinant's sign, which changes at
+ * a fold and nowhere else. Either ends the walk at the last point of the branch.
+ */
+public final class Continuation {
+  private static final int CORRECTOR_STEPS = 12;
+
+  /** Shortest step, as a share of the drive's scale. */
+  private static final double SHORTEST = 1e-11;
+
+  private final StaticSolver solver;
+  private final CircuitState state;
+  private final Drive drive;
+  private final double scale;
+  private final double largestError;
+  private final CircuitState backup;
+  private final double[] tangent;
+  private final double[] predicted;
+  private int sign;
+  private double stride;
+  private boolean ready;
+
+  /**
+   * A walk that starts at a solved state.
+   *
+   * @param state solved; it moves with the walk
+   * @param drive what moves
+   * @param scale typical size of the drive's values, in its unit
+   * @param largestError largest accepted distance between prediction and solution at any node, V
+   */
+  Continuation(
+      StaticSolver solver, CircuitState state, Drive drive, double scale, double largestError) {
+    this.solver = solver;
+    this.state = state;
+    this.drive = drive;
+    this.scale = scale;
+    this.largestError = largestError;
+    this.backup = state.copy();
+    this.tangent = new double[state.circuit().unknowns()];
+    this.predicted = new double[tangent.length];
+    this.stride = scale / 16;
+  }
+
+  /** The state, at the last solution of the branch. */
+  public CircuitState state() {
+    return state;
+  }
+
+  /** Value of the drive at the state. */
+  public double drive() {
+    return drive.get(state);
+  }
+
+  /**
+   * ∂x/∂(drive) at the state, by unknown. Valid until the next step; not to be changed.
+   *
+   * @throws IllegalStateException when the circuit's matrix is singular here
+   */
+  public double[] tangent() {
+    prepare();
+    return tangent;
+  }
+
+  /**
+   * Walks to a value of the drive.
+   *
+   * @return true when it got there; false when the branch ends before (a fold), with the state at
+   *     its last point
+   */
+  public boolean advance(double target) {
+    while (drive() != target) {
+      if (!step(target)) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  /**
+   * Takes one step toward a value of the drive, as long as the branch's bend allows.
+   *
+   * @return false when the branch ends here
+   */
+  public boolean step(double target) {
+    prepare();
+    double from = drive();
+    double remaining = target - from;
+    double shortest = SHORTEST * Math.max(scale, Math.abs(from));
+    backup.copyFrom(state);
+    while (true) {
+      boolean last = Math.abs(remaining) <= stride;
+      double length = last ? remaining : Math.copySign(stride, remaining);
+      double error = correct(last ? target : from + length, length);
+      if (error <= largestError) {
+        adapt(error, Math.abs(length), last);
+        return true;
+      }
+      state.copyFrom(backup);
+      if (ready) {
+        // The factors and the tangent are those of the point that was refused.
+        ready = false;
+        prepare();
+      }
+      if (Math.abs(length) <= shortest) {
+        return false;
+      }
+      stride = Math.abs(length) * (error < Double.POSITIVE_INFINITY ? 0.4 : 0.25);
+    }
+  }
+
+  /** Predicts and corrects; the largest distance between the two, or infinite where that failed. */
+  private double correct(double value, double length) {
+    double[] unknowns = state.unknowns();
+    for (int i = 0; i < unknowns.length; i++) {
+      unknowns[i] += tangent[i] * length;
+    }
+    System.arraycopy(unknowns, 0, predicted, 0, unknowns.length);
+    drive.set(state, value);
+    if (!solver.solve(state, CORRECTOR_STEPS)) {
+      return Double.POSITIVE_INFINITY;
+    }
+    double error = 0;
+    for (int node = 0; node < state.circuit().nodes(); node++) {
+      error = Math.max(error, Math.abs(unknowns[node] - predicted[node]));
+    }
+    if (error > largestError) {
+      return error;
+    }
+    int before = sign;
+    ready = false;
+    boolean regular = tryPrepare();
+    ready = true;
+    return regular && sign == before ? error : Double.POSITIVE_INFINITY;
+  }
+
+  private void adapt(double error, double length, boolean last) {
+    double wish =
+        error < largestError / 8 ? 3 * length : error < largestError / 3 ? 1.5 * length : length;
+    stride = last ? Math.max(stride, wish) : wish;
+    stride = Math.min(stride, scale);
+  }
+
+  private void prepare() {
+    if (!ready && !tryPrepare()) {
+      throw new IllegalStateException("the circuit's matrix is singular at this point");
+    }
+  }
+
+  private boolean tryPrepare() {
+    if (!ready) {
+      state.evaluate();
+      if (!solver.factor(state)) {
+        return false;
+      }
+      sign = solver.determinantSign();
+      Arrays.fill(tangent, 0);
+      drive.excite(state, tangent);
+      solver.backSolve(tangent);
+      ready = true;
+    }
+    return true;
+  }
+}

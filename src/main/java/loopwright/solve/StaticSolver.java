@@ -1,0 +1,147 @@
+package loopwright.solve;
+
+import java.util.Arrays;
+import loopwright.circuit.Circuit;
+import loopwright.circuit.CircuitState;
+import loopwright.circuit.Stamps;
+import loopwright.numeric.DenseRealSystem;
+import loopwright.numeric.RealSystem;
+
+/**
+ * Newton's method on the static equations f(x) = 0 of a circuit, with junction voltages limited.
+ *
+ * <p>Converged: the last step below 1e-9 V at every node, and the current balance of every node
+ * within 1e-9 of the sum of the magnitudes of the currents that meet there, or within 1e-15 A plus
+ * 1e-15 of the sum of conductance × |voltage|, whichever is larger.
+ *
+ * <p>It owns its work arrays and serves one thread.
+ */
+public final class StaticSolver {
+  private static final double STEP = 1e-9;
+  private static final double BALANCE = 1e-9;
+  private static final double LEAST_CURRENT = 1e-15;
+  private static final double CONDUCTED = 1e-15;
+
+  /** A step longer than this is shortened: it comes from a matrix that is all but singular, V. */
+  private static final double LONGEST_STEP = 1e4;
+
+  private final Circuit circuit;
+  private final RealSystem system;
+  private final double[] step;
+  private long iterations;
+
+  /** A solver for one circuit. */
+  public StaticSolver(Circuit circuit) {
+    this.circuit = circuit;
+    this.system = new DenseRealSystem(circuit.pattern());
+    this.step = new double[circuit.unknowns()];
+  }
+
+  /** The circuit. */
+  public Circuit circuit() {
+    return circuit;
+  }
+
+  /** How many Newton steps were taken so far. */
+  public long iterations() {
+    return iterations;
+  }
+
+  /**
+   * Solves from the state's unknowns.
+   *
+   * @param state start on entry, solution and stamps there on return
+   * @param most iterations at the most
+   * @return whether it converged; if not, the unknowns are where it stopped
+   */
+  public boolean solve(CircuitState state, int most) {
+    double lastStep = Double.POSITIVE_INFINITY;
+    for (int i = 0; i < most; i++) {
+      state.evaluate();
+      if (lastStep < STEP && !state.limited() && isBalanced(state)) {
+        return true;
+      }
+      if (!factor(state)) {
+        return false;
+      }
+      iterations++;
+      double[] f = state.stamps().f;
+      for (int row = 0; row < step.length; row++) {
+        step[row] = -f[row];
+      }
+      system.solve(step);
+      lastStep = move(state.unknowns());
+      if (!Double.isFinite(lastStep)) {
+        return false;
+      }
+    }
+    state.evaluate();
+    return lastStep < STEP && !state.limited() && isBalanced(state);
+  }
+
+  /** Factors G of the state's last evaluation; false when it is singular. */
+  public boolean factor(CircuitState state) {
+    return system.factor(state.stamps().g);
+  }
+
+  /** Solves with the last factors. */
+  public void backSolve(double[] rightHandSide) {
+    system.solve(rightHandSide);
+  }
+
+  /** Solves with the last factors, transposed. */
+  public void backSolveTransposed(double[] rightHandSide) {
+    system.solveTransposed(rightHandSide);
+  }
+
+  /** Sign of the determinant of the last factors. */
+  public int determinantSign() {
+    return system.determinantSign();
+  }
+
+  /** Name of the node whose balance is worst, for a failure's reason. */
+  public String worstNode(CircuitState state) {
+    Stamps stamps = state.stamps();
+    int worst = 0;
+    double most = -1;
+    for (int node = 0; node < circuit.nodes(); node++) {
+      double relative = Math.abs(stamps.f[node]) / allowed(stamps, node);
+      if (relative > most || Double.isNaN(relative)) {
+        most = relative;
+        worst = node;
+      }
+    }
+    return circuit.nodeName(worst);
+  }
+
+  private double move(double[] unknowns) {
+    double largest = 0;
+    for (int node = 0; node < circuit.nodes(); node++) {
+      largest = Math.max(largest, Math.abs(step[node]));
+    }
+    if (Double.isNaN(largest) || Arrays.stream(step).anyMatch(Double::isNaN)) {
+      return Double.NaN;
+    }
+    double scale = largest > LONGEST_STEP ? LONGEST_STEP / largest : 1;
+    for (int i = 0; i < unknowns.length; i++) {
+      unknowns[i] += scale * step[i];
+    }
+    return largest;
+  }
+
+  private boolean isBalanced(CircuitState state) {
+    Stamps stamps = state.stamps();
+    for (int row = 0; row < stamps.f.length; row++) {
+      if (!(Math.abs(stamps.f[row]) <= allowed(stamps, row))) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private static double allowed(Stamps stamps, int row) {
+    return Math.max(
+        BALANCE * stamps.currentScale[row],
+        LEAST_CURRENT + CONDUCTED * stamps.conductanceScale[row]);
+  }
+}
