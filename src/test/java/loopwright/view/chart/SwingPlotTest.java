@@ -47,10 +47,10 @@ class SwingPlotTest {
   void whatGrowsIsShadedAndItsDotsAreFull() {
     HookupPrediction prediction = SamplePredictions.growing(SampleDesigns.divider(0.5));
     List<XYPlot> strips = Drawn.strips(picture(prediction));
-    assertThat(strips.get(1).getDomainMarkers(Layer.BACKGROUND)).hasSize(2);
+    assertThat(Drawn.marks(strips.get(1).getDomainMarkers(Layer.BACKGROUND))).hasSize(2);
     IntervalMarker shade =
         (IntervalMarker)
-            strips.get(0).getRangeMarkers(Layer.BACKGROUND).stream()
+            Drawn.marks(strips.get(0).getRangeMarkers(Layer.BACKGROUND)).stream()
                 .filter(IntervalMarker.class::isInstance)
                 .findFirst()
                 .orElseThrow();
