@@ -1,5 +1,6 @@
 package loopwright.view.path;
 
+import java.util.Locale;
 import java.util.Optional;
 import loopwright.design.Design;
 import loopwright.design.PartValue;
@@ -34,12 +35,12 @@ final class PartWords {
     return EngineeringFormat.format(ratio, Unit.ONE);
   }
 
-  /**
-   * Polarity and type of a transistor; the type alone where the design does not carry its record.
-   */
+  /** Polarity and type of a transistor; the type alone where that says it, or nothing else does. */
   String transistor(String name) {
     return polarity(name)
-        .map(polarity -> (polarity == Polarity.NPN ? "npn " : "pnp ") + name)
+        .map(polarity -> polarity == Polarity.NPN ? "npn" : "pnp")
+        .filter(word -> !name.toLowerCase(Locale.ROOT).contains(word))
+        .map(word -> word + " " + name)
         .orElse(name);
   }
 

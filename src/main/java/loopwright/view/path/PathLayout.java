@@ -17,7 +17,7 @@ final class PathLayout {
   private static final double GREATEST_SCALE = 1.7;
 
   private static final double MARGIN = 8;
-  private static final double GAP = 78;
+  private static final double GAP = 80;
   private static final double BLOCK_HEIGHT = 92;
   private static final double HANGING_HEIGHT = 48;
   private static final double LANE_HEIGHT = 26;
@@ -25,8 +25,11 @@ final class PathLayout {
   /** The amplifier of kind figures is wider than a stage by this factor. */
   private static final double WHOLE_AMPLIFIER = 1.7;
 
-  /** From the pair's edge to the line by which the feedback comes up, and from out to its tap. */
-  private static final double TAP = 14;
+  /** From the line by which the feedback comes up to the edge of the pair. */
+  private static final double RETURN = 14;
+
+  /** From the edge of the last stage to the point at which the feedback leaves. */
+  private static final double TAP = 9;
 
   /** Height of the wires behind the input, as a share of a block's height. */
   static final double SIGNAL = 0.43;
@@ -143,7 +146,7 @@ final class PathLayout {
 
   /** Where the feedback comes up to the inverting input. */
   int returnX() {
-    return amplifierInput().x - pixels(TAP);
+    return amplifierInput().x - pixels(RETURN);
   }
 
   /** Where the feedback leaves the output. */

@@ -14,7 +14,9 @@ import loopwright.quantity.Unit;
 /** Voltages and currents at rest, in words; all empty where nothing is solved. */
 final class RestWords {
   private static final int DIGITS = 4;
-  private static final int CURRENT_DIGITS = 3;
+
+  /** Of voltages below 1 V, and of currents. */
+  private static final int SMALL_DIGITS = 3;
 
   private final Optional<HookupPrediction> prediction;
   private final Optional<RestState> rest;
@@ -33,9 +35,12 @@ final class RestWords {
   /** Voltage of a node in words. */
   String voltsSay(String node) {
     OptionalDouble volts = volts(node);
-    return volts.isPresent()
-        ? EngineeringFormat.format(settled(volts.getAsDouble()), Unit.VOLT, DIGITS)
-        : "";
+    if (volts.isEmpty()) {
+      return "";
+    }
+    double settled = settled(volts.getAsDouble());
+    return EngineeringFormat.format(
+        settled, Unit.VOLT, Math.abs(settled) < 1 ? SMALL_DIGITS : DIGITS);
   }
 
   /** Rounding noise of a node at ground is no voltage. */
@@ -71,7 +76,7 @@ final class RestWords {
   /** A current in words, empty for none. */
   static String says(OptionalDouble amperes) {
     return amperes.isPresent()
-        ? EngineeringFormat.format(amperes.getAsDouble(), Unit.AMPERE, CURRENT_DIGITS)
+        ? EngineeringFormat.format(amperes.getAsDouble(), Unit.AMPERE, SMALL_DIGITS)
         : "";
   }
 }

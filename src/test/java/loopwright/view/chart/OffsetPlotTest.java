@@ -66,6 +66,22 @@ class OffsetPlotTest {
   }
 
   @Test
+  void aCauseThatTheDesignLacksHasNoBar() {
+    HookupPrediction whole = SamplePredictions.stable(SampleDesigns.divider(0.2));
+    List<OffsetShare> shares = new ArrayList<>(whole.offsetContributions());
+    shares.add(2, new OffsetShare("base-emitter mismatch", 0));
+    CategoryDataset bars = bars(picture(with(whole, shares)));
+    assertThat(bars.getColumnCount()).isEqualTo(whole.offsetContributions().size() + 1);
+  }
+
+  @Test
+  void anOpenHookupTeaches() {
+    Picture picture = picture(SamplePredictions.stable(SampleDesigns.open(1)));
+    assertThat(picture.chart()).isEmpty();
+    assertThat(picture.sentence()).contains("Choose a hookup with feedback");
+  }
+
+  @Test
   void twoCausesOfOneNameStayTwoBars() {
     HookupPrediction whole = SamplePredictions.stable(SampleDesigns.divider(0.2));
     List<OffsetShare> twice = new ArrayList<>();
