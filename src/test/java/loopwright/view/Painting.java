@@ -10,8 +10,6 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.HashMap;
-import java.util.Map;
 import javax.imageio.ImageIO;
 import javax.swing.JComponent;
 
@@ -73,19 +71,14 @@ public final class Painting {
     return count;
   }
 
+  /** How many pixels of a region have another colour than this. */
+  public int countOther(Color ground, Rectangle region) {
+    Rectangle inside = region.intersection(new Rectangle(image.getWidth(), image.getHeight()));
+    return inside.width * inside.height - count(ground, inside);
+  }
+
   /** How many pixels of the whole have exactly this colour. */
   public int count(Color colour) {
     return count(colour, new Rectangle(image.getWidth(), image.getHeight()));
-  }
-
-  /** How many different colours there are. */
-  public int colours() {
-    Map<Integer, Integer> seen = new HashMap<>();
-    for (int y = 0; y < image.getHeight(); y++) {
-      for (int x = 0; x < image.getWidth(); x++) {
-        seen.merge(image.getRGB(x, y), 1, Integer::sum);
-      }
-    }
-    return seen.size();
   }
 }

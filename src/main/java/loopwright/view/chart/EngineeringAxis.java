@@ -57,9 +57,7 @@ final class EngineeringAxis extends NumberAxis {
     double step = step(length, isHorizontal, g2.getFontRenderContext());
     TextAnchor anchor = isHorizontal ? TextAnchor.TOP_CENTER : sideAnchor(edge);
     List<Tick> ticks = new ArrayList<>();
-    long first = (long) Math.ceil(getLowerBound() / step - 1e-9);
-    long last = (long) Math.floor(getUpperBound() / step + 1e-9);
-    for (long i = first; i <= last; i++) {
+    for (long i = first(step); i <= last(step); i++) {
       double value = i * step;
       ticks.add(new NumberTick(value, scale.say(value, step), anchor, TextAnchor.CENTER, 0));
     }
@@ -74,17 +72,32 @@ final class EngineeringAxis extends NumberAxis {
     double span = getUpperBound() - getLowerBound();
     double height = getTickLabelFont().getLineMetrics("0", context).getHeight();
     double step = span;
+    double finer = span;
     for (double candidate : candidates(span)) {
       double pixels = candidate / span * length;
       double room =
           isHorizontal ? widest(candidate, context) + HORIZONTAL_GAP : VERTICAL_ROOM * height;
       room = Math.max(room, length / MOST_STEPS);
+      finer = step;
       step = candidate;
       if (pixels >= room) {
         break;
       }
     }
-    return step;
+    // A single number on an axis gives no scale.
+    return ticks(step) < 2 ? finer : step;
+  }
+
+  private long ticks(double step) {
+    return last(step) - first(step) + 1;
+  }
+
+  private long first(double step) {
+    return (long) Math.ceil(getLowerBound() / step - 1e-9);
+  }
+
+  private long last(double step) {
+    return (long) Math.floor(getUpperBound() / step + 1e-9);
   }
 
   /** Steps from a fiftieth of the span to the whole of it, finest first. */

@@ -11,6 +11,8 @@ import org.jfree.chart.plot.XYPlot;
 
 /** Growth of the fastest oscillation against output level, with frequencies at a few levels. */
 final class GrowthStrip {
+  private static final double OVERDAMPED = 20;
+
   private final List<SwingLevel> levels;
   private final SwingRegions grows;
   private final PlotTheme theme;
@@ -54,12 +56,17 @@ final class GrowthStrip {
     return growing;
   }
 
+  /** A pair that is damped out within a small part of its period has no frequency to be seen. */
+  private static boolean rings(SwingLevel level) {
+    return level.growth().isPresent()
+        && level.frequency().isPresent()
+        && Math.abs(level.growth().getAsDouble())
+            < OVERDAMPED * 2 * Math.PI * level.frequency().getAsDouble();
+  }
+
   /** Both ends, the fastest, the slowest, and where growing begins or ends. */
   private Set<SwingLevel> labelled() {
-    List<SwingLevel> candidates =
-        levels.stream()
-            .filter(level -> level.growth().isPresent() && level.frequency().isPresent())
-            .toList();
+    List<SwingLevel> candidates = levels.stream().filter(GrowthStrip::rings).toList();
     Set<SwingLevel> chosen = new LinkedHashSet<>();
     if (candidates.isEmpty()) {
       return chosen;

@@ -1,13 +1,16 @@
 package loopwright.view.chart;
 
 import java.awt.Color;
+import java.awt.Graphics2D;
 import java.awt.Paint;
+import java.awt.geom.Rectangle2D;
 import java.util.List;
 import java.util.stream.DoubleStream;
 import loopwright.predict.OffsetShare;
 import loopwright.quantity.Unit;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.AxisLocation;
+import org.jfree.chart.axis.AxisState;
 import org.jfree.chart.axis.CategoryAxis;
 import org.jfree.chart.labels.CategoryItemLabelGenerator;
 import org.jfree.chart.labels.CategoryToolTipGenerator;
@@ -17,6 +20,7 @@ import org.jfree.chart.plot.CategoryPlot;
 import org.jfree.chart.plot.PlotOrientation;
 import org.jfree.chart.renderer.category.BarRenderer;
 import org.jfree.chart.renderer.category.StandardBarPainter;
+import org.jfree.chart.ui.RectangleEdge;
 import org.jfree.chart.ui.RectangleInsets;
 import org.jfree.chart.ui.TextAnchor;
 import org.jfree.data.category.CategoryDataset;
@@ -28,7 +32,7 @@ final class OffsetBars {
   static final String TOTAL = "output offset, solved";
 
   /** Share of the axis that is kept for the value at the end of a bar. */
-  private static final double ROOM_FOR_VALUE = 0.4;
+  private static final double ROOM_FOR_VALUE = 0.48;
 
   private OffsetBars() {}
 
@@ -69,11 +73,9 @@ final class OffsetBars {
   }
 
   private static CategoryAxis causes(PlotTheme theme) {
-    CategoryAxis causes = new CategoryAxis();
+    CategoryAxis causes = new CauseAxis();
     ChartStyle.axis(causes, theme);
     causes.setTickLabelPaint(theme.text());
-    causes.setMaximumCategoryLabelWidthRatio(0.36f);
-    causes.setMaximumCategoryLabelLines(3);
     causes.setLowerMargin(0.02);
     causes.setUpperMargin(0.02);
     causes.setCategoryMargin(0.35);
@@ -109,6 +111,24 @@ final class OffsetBars {
     @Override
     public String toString() {
       return cause;
+    }
+  }
+
+  /** Gives each cause as many lines as there is height for: one long one, or up to three short. */
+  private static final class CauseAxis extends CategoryAxis {
+    private static final int MOST_LINES = 3;
+    private static final float LONG = 0.5f;
+    private static final float SHORT = 0.36f;
+
+    @Override
+    public List<?> refreshTicks(
+        Graphics2D g2, AxisState state, Rectangle2D dataArea, RectangleEdge edge) {
+      int bars = ((CategoryPlot) getPlot()).getDataset().getColumnCount();
+      double line = g2.getFontMetrics(getTickLabelFont()).getHeight();
+      int lines = (int) Math.max(1, Math.min(MOST_LINES, dataArea.getHeight() / bars / line));
+      setMaximumCategoryLabelLines(lines);
+      setMaximumCategoryLabelWidthRatio(lines == 1 ? LONG : SHORT);
+      return super.refreshTicks(g2, state, dataArea, edge);
     }
   }
 

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
+import loopwright.design.Feedback;
 import loopwright.predict.HookupPrediction;
 import loopwright.predict.OffsetShare;
 
@@ -12,6 +13,7 @@ final class OffsetPlot implements PlotSubject {
   /** The bar of what no cause explains. */
   static final String REMAINDER = "remainder";
 
+  /** A share so much smaller than the whole is rounding, or a cause that this design lacks. */
   private static final double ROUNDING = 1e-9;
 
   @Override
@@ -21,32 +23,34 @@ final class OffsetPlot implements PlotSubject {
 
   @Override
   public Picture picture(HookupPrediction prediction, PlotTheme theme) {
+    if (prediction.hookup().feedback() instanceof Feedback.Open) {
+      return Picture.none(
+          "No loop",
+          "Without feedback nothing holds the output to its reference. Choose a hookup with feedback"
+              + " to see which cause moves it by how much.");
+    }
     Figures figures = new Figures(prediction);
     OptionalDouble solved = figures.solved("outputOffset");
     if (solved.isEmpty() || prediction.offsetContributions().isEmpty()) {
-      return Picture.none(
-          "No output offset to split",
-          Words.sentences(
-              figures.says("outputOffset").isBlank()
-                  ? "This hookup has no causes of offset to show"
-                  : figures.says("outputOffset")));
+      return Picture.none("No output offset", Words.sentences(figures.says("outputOffset")));
     }
-    List<OffsetShare> shares = withRemainder(prediction.offsetContributions(), solved);
+    List<OffsetShare> shares = toShow(prediction.offsetContributions(), solved);
+    if (shares.isEmpty()) {
+      return Picture.none("Output rests at its reference", "No cause moves it.");
+    }
     return Picture.of(
         "Output rests " + Words.volts(solved.getAsDouble()) + " from its reference",
         sentence(shares),
         OffsetBars.of(shares, solved.getAsDouble(), theme));
   }
 
-  private static List<OffsetShare> withRemainder(
-      List<OffsetShare> contributions, OptionalDouble solved) {
+  private static List<OffsetShare> toShow(List<OffsetShare> contributions, OptionalDouble solved) {
     double sum = contributions.stream().mapToDouble(OffsetShare::output).sum();
     double size = contributions.stream().mapToDouble(share -> Math.abs(share.output())).sum();
-    double rest = solved.getAsDouble() - sum;
+    double least = ROUNDING * Math.max(size, Math.abs(solved.getAsDouble()));
     List<OffsetShare> shares = new ArrayList<>(contributions);
-    if (Math.abs(rest) > ROUNDING * Math.max(size, Math.abs(solved.getAsDouble()))) {
-      shares.add(new OffsetShare(REMAINDER, rest));
-    }
+    shares.add(new OffsetShare(REMAINDER, solved.getAsDouble() - sum));
+    shares.removeIf(share -> Math.abs(share.output()) <= least);
     return shares;
   }
 

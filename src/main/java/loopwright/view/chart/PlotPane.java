@@ -62,14 +62,14 @@ final class PlotPane extends JPanel {
   private void dress(PlotTheme theme, Picture picture, String says, boolean outOfDate) {
     setBackground(theme.background());
     canvas.setBackground(theme.background());
-    note.setText(says);
+    note.says(says);
     note.setVisible(!says.isEmpty());
     note.setFont(theme.font().deriveFont(Font.BOLD));
     note.setForeground(outOfDate ? theme.risky() : theme.quiet());
-    title.setText(picture.title());
+    title.says(picture.title());
     title.setFont(theme.title());
     title.setForeground(theme.text());
-    sentence.setText(picture.sentence());
+    sentence.says(picture.sentence());
     sentence.setFont(theme.font());
     sentence.setForeground(theme.quiet());
     canvas.show(picture.chart(), outOfDate);

@@ -39,6 +39,12 @@ record Span(double lower, double upper) {
     return new Span(Math.min(lower, value), Math.max(upper, value));
   }
 
+  /** No shorter than this, about the same middle. */
+  Span atLeast(double least) {
+    double missing = Math.max(0, least - length()) / 2;
+    return new Span(lower - missing, upper + missing);
+  }
+
   /** With room at both ends, each a share of the whole. */
   Span padded(double share) {
     return padded(share, share);

@@ -14,6 +14,9 @@ import org.jfree.chart.plot.XYPlot;
 
 /** Stability against output level: growth, phase margin, and the gain beside them. */
 final class SwingPlot implements PlotSubject {
+  /** A gain that changes less, as a share of itself, is drawn as what it is: flat. */
+  private static final double LEAST_CHANGE = 1e-3;
+
   @Override
   public String tab() {
     return "Over swing";
@@ -87,6 +90,8 @@ final class SwingPlot implements PlotSubject {
   private static XYPlot gain(List<SwingLevel> levels, SwingRegions grows, PlotTheme theme) {
     Curve curve = curve("gain", levels, level -> OptionalDouble.of(level.gain()));
     Span span = Span.of(DoubleStream.of(curve.y()));
+    double size = Math.max(Math.abs(span.lower()), Math.abs(span.upper()));
+    span = span.atLeast(LEAST_CHANGE * size);
     Strip strip = new Strip(Unit.ONE, span.padded(0.1, 0.25), Unit.VOLT, theme);
     shade(strip, grows, theme);
     return strip.curve(curve, 2, 0.25).plot();

@@ -16,6 +16,9 @@ final class WaveformPlot implements PlotSubject {
    */
   private static final double STEP = 0.05;
 
+  /** Less is no more than rounding of the solution. */
+  private static final double LEAST_DISTORTION = 1e-6;
+
   @Override
   public String tab() {
     return "Waveform";
@@ -108,13 +111,17 @@ final class WaveformPlot implements PlotSubject {
             + Words.volts(prediction.hookup().source().amplitude().value())
             + " peak at the generator",
         "The error is out less its mean and its fundamental",
-        thd.isPresent()
-            ? "Harmonic distortion " + EngineeringFormat.percent(round(thd.getAsDouble()))
-            : "");
+        thd.isPresent() ? "Harmonic distortion " + percent(thd.getAsDouble()) : "");
+  }
+
+  private static String percent(double share) {
+    return share < LEAST_DISTORTION
+        ? "under " + EngineeringFormat.percent(LEAST_DISTORTION)
+        : EngineeringFormat.percent(round(share));
   }
 
   private static double round(double share) {
-    double unit = Math.pow(10, Math.floor(Math.log10(Math.max(share, 1e-12))) - 2);
+    double unit = Math.pow(10, Math.floor(Math.log10(share)) - 2);
     return Math.rint(share / unit) * unit;
   }
 }

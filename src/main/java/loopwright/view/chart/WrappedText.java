@@ -13,4 +13,9 @@ final class WrappedText extends JTextArea {
     setBorder(null);
     setHighlighter(null);
   }
+
+  /** Shows the words; a line never ends between a number and its unit. */
+  void says(String words) {
+    setText(words.replaceAll("(\\d) (?=\\S)", "$1\u00A0"));
+  }
 }

@@ -5,6 +5,7 @@ import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.List;
 import java.util.Objects;
 import org.jfree.chart.JFreeChart;
@@ -12,6 +13,7 @@ import org.jfree.chart.axis.AxisState;
 import org.jfree.chart.axis.Tick;
 import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.CombinedDomainXYPlot;
+import org.jfree.chart.plot.Marker;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.ui.RectangleEdge;
 import org.jfree.data.xy.XYDataset;
@@ -83,6 +85,11 @@ final class Drawn {
         .findFirst()
         .orElseThrow()
         .colour();
+  }
+
+  /** Marked places, or marked values: lines and shades. */
+  static List<Marker> marks(Collection<?> markers) {
+    return markers.stream().map(Marker.class::cast).toList();
   }
 
   private static List<PlotLabel> layer(XYPlot strip) {

@@ -68,6 +68,11 @@ class EngineeringAxisTest {
   }
 
   @Test
+  void aLowStripHasTwoNumbersAtLeast() {
+    assertThat(upright(Unit.ONE, 0.9945, 0.9975, 60)).containsExactly("0.995", "0.996", "0.997");
+  }
+
+  @Test
   void aLargePlotIsNotCrowded() {
     assertThat(upright(Unit.DECIBEL, -80, 25, 900)).hasSizeBetween(4, 10);
   }

@@ -35,7 +35,7 @@ class LoopGainPlotTest {
     HookupPrediction prediction = SamplePredictions.stable(SampleDesigns.divider(0.2));
     XYPlot phase = Drawn.strips(picture(prediction)).get(1);
     double unity = solved(prediction, "unityFrequency");
-    assertThat(phase.getDomainMarkers(Layer.BACKGROUND))
+    assertThat(Drawn.marks(phase.getDomainMarkers(Layer.BACKGROUND)))
         .extracting(marker -> ((ValueMarker) marker).getValue())
         .contains(unity);
     XYLineAnnotation margin = lines(phase).get(0);

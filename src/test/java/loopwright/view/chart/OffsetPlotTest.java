@@ -29,6 +29,10 @@ class OffsetPlotTest {
     return ((CategoryPlot) picture.chart().orElseThrow().getPlot()).getDataset();
   }
 
+  private static String cause(CategoryDataset bars, int bar) {
+    return bars.getColumnKey(bar).toString();
+  }
+
   private static double sumBeforeTotal(CategoryDataset bars) {
     double sum = 0;
     for (int i = 0; i < bars.getColumnCount() - 1; i++) {
@@ -44,10 +48,10 @@ class OffsetPlotTest {
     List<OffsetShare> shares = prediction.offsetContributions();
     assertThat(bars.getColumnCount()).isEqualTo(shares.size() + 1);
     for (int i = 0; i < shares.size(); i++) {
-      assertThat(bars.getColumnKey(i)).hasToString(shares.get(i).cause());
+      assertThat(cause(bars, i)).isEqualTo(shares.get(i).cause());
       assertThat(bars.getValue(0, i)).isEqualTo(shares.get(i).output());
     }
-    assertThat(bars.getColumnKey(shares.size())).hasToString("output offset, solved");
+    assertThat(cause(bars, shares.size())).isEqualTo("output offset, solved");
     assertThat(bars.getValue(0, shares.size())).isEqualTo(-0.0598);
     assertThat(sumBeforeTotal(bars)).isCloseTo(-0.0598, within(1e-12));
   }
@@ -56,9 +60,25 @@ class OffsetPlotTest {
   void whatNoCauseExplainsIsABarOfItsOwn() {
     HookupPrediction whole = SamplePredictions.stable(SampleDesigns.divider(0.2));
     CategoryDataset bars = bars(picture(with(whole, whole.offsetContributions().subList(0, 3))));
-    assertThat(bars.getColumnKey(3)).hasToString("remainder");
+    assertThat(cause(bars, 3)).isEqualTo("remainder");
     assertThat(bars.getValue(0, 3).doubleValue()).isCloseTo(0.0042, within(1e-12));
     assertThat(sumBeforeTotal(bars)).isCloseTo(-0.0598, within(1e-12));
+  }
+
+  @Test
+  void aCauseThatTheDesignLacksHasNoBar() {
+    HookupPrediction whole = SamplePredictions.stable(SampleDesigns.divider(0.2));
+    List<OffsetShare> shares = new ArrayList<>(whole.offsetContributions());
+    shares.add(2, new OffsetShare("base-emitter mismatch", 0));
+    CategoryDataset bars = bars(picture(with(whole, shares)));
+    assertThat(bars.getColumnCount()).isEqualTo(whole.offsetContributions().size() + 1);
+  }
+
+  @Test
+  void anOpenHookupTeaches() {
+    Picture picture = picture(SamplePredictions.stable(SampleDesigns.open(1)));
+    assertThat(picture.chart()).isEmpty();
+    assertThat(picture.sentence()).contains("Choose a hookup with feedback");
   }
 
   @Test

@@ -75,6 +75,14 @@ class PlotDeckTest {
   }
 
   @Test
+  void aLineNeverEndsBetweenANumberAndItsUnit() {
+    Theme.LIGHT.apply();
+    PlotDeck deck = new PlotDeck();
+    deck.show(Optional.of(growing), true, "");
+    assertThat(((JTextComponent) named(deck, "title")).getText()).endsWith("11\u00A0MHz");
+  }
+
+  @Test
   void withoutAPredictionItSaysTheMessage() {
     Theme.LIGHT.apply();
     PlotDeck deck = new PlotDeck();
@@ -128,7 +136,7 @@ class PlotDeckTest {
   }
 
   private static String text(PlotDeck deck, String name) {
-    return ((JTextComponent) named(deck, name)).getText();
+    return ((JTextComponent) named(deck, name)).getText().replace('\u00A0', ' ');
   }
 
   private static Component named(PlotDeck deck, String name) {

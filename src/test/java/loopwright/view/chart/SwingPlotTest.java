@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import loopwright.predict.HookupPrediction;
 import loopwright.predict.SwingLevel;
@@ -47,10 +48,10 @@ class SwingPlotTest {
   void whatGrowsIsShadedAndItsDotsAreFull() {
     HookupPrediction prediction = SamplePredictions.growing(SampleDesigns.divider(0.5));
     List<XYPlot> strips = Drawn.strips(picture(prediction));
-    assertThat(strips.get(1).getDomainMarkers(Layer.BACKGROUND)).hasSize(2);
+    assertThat(Drawn.marks(strips.get(1).getDomainMarkers(Layer.BACKGROUND))).hasSize(2);
     IntervalMarker shade =
         (IntervalMarker)
-            strips.get(0).getRangeMarkers(Layer.BACKGROUND).stream()
+            Drawn.marks(strips.get(0).getRangeMarkers(Layer.BACKGROUND)).stream()
                 .filter(IntervalMarker.class::isInstance)
                 .findFirst()
                 .orElseThrow();
@@ -108,6 +109,55 @@ class SwingPlotTest {
   }
 
   @Test
+  void aGainThatHardlyChangesIsDrawnFlat() {
+    HookupPrediction prediction = SamplePredictions.stable(SampleDesigns.divider(0.2));
+    HookupPrediction flat =
+        new HookupPrediction(
+            prediction.hookup(),
+            prediction.rest(),
+            "",
+            prediction.figures(),
+            List.of(),
+            List.of(),
+            List.of(),
+            List.of(level(-1, 10), level(0, 10.000001), level(1, 10.000002)),
+            "jumps at 1 V",
+            List.of(),
+            List.of(),
+            Optional.empty(),
+            List.of());
+    Picture picture = picture(flat);
+    List<XYPlot> strips = Drawn.strips(picture);
+    assertThat(strips.get(strips.size() - 1).getRangeAxis().getRange().getLength())
+        .isGreaterThan(0.01);
+    assertThat(picture.sentence()).endsWith("Jumps at 1 V.");
+  }
+
+  @Test
+  void whatIsDampedOutAtOnceHasNoFrequencyToName() {
+    List<SwingLevel> levels =
+        List.of(
+            new SwingLevel(
+                -1,
+                -1,
+                true,
+                OptionalDouble.of(0.3),
+                OptionalDouble.of(-2e5),
+                OptionalDouble.empty(),
+                1),
+            new SwingLevel(
+                1,
+                1,
+                true,
+                OptionalDouble.of(240e3),
+                OptionalDouble.of(-1.8e6),
+                OptionalDouble.empty(),
+                1));
+    XYPlot strip = new GrowthStrip(levels, SwingRegions.of(levels), PlotTheme.current()).plot();
+    assertThat(Drawn.words(strip)).contains("240 kHz").doesNotContain("300 mHz");
+  }
+
+  @Test
   void regionsReachHalfWayToWhatDoesNotGrow() {
     SwingRegions regions =
         SwingRegions.of(List.of(level(0, true), level(1, false), level(2, false), level(4, true)));
@@ -122,6 +172,17 @@ class SwingPlotTest {
         SwingRegions.of(List.of(level(2, false), level(1, false), level(0, true)));
     assertThat(regions.says()).isEqualTo("from 1 V to 2 V");
     assertThat(SwingRegions.of(List.of(level(3, false))).says()).isEqualTo("at 3 V");
+  }
+
+  private static SwingLevel level(double output, double gain) {
+    return new SwingLevel(
+        output,
+        output,
+        true,
+        OptionalDouble.empty(),
+        OptionalDouble.empty(),
+        OptionalDouble.of(60),
+        gain);
   }
 
   private static SwingLevel level(double output, boolean stable) {
