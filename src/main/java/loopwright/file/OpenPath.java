@@ -2,25 +2,27 @@ package loopwright.file;
 
 import java.util.ArrayDeque;
 import java.util.Deque;
-import java.util.Iterator;
+import java.util.stream.Collectors;
 
 /** The path, as people address it, of the value that a reader is inside of. */
 final class OpenPath {
-  private final Deque<String> steps = new ArrayDeque<>();
+  private final Deque<Step> steps = new ArrayDeque<>();
+
+  private record Step(String says, boolean item) {}
 
   void enter(String name) {
-    steps.addLast(name);
+    steps.addLast(new Step(Spot.step(name), false));
   }
 
   void enterItem(int index) {
-    steps.addLast("[" + index + "]");
+    steps.addLast(new Step(Integer.toString(index), true));
   }
 
   /** The entry of a list that the reader is in turns out to have a name. */
   void call(String name) {
-    if (!steps.isEmpty() && steps.getLast().startsWith("[")) {
+    if (!steps.isEmpty() && steps.getLast().item() && Spot.isAddress(name)) {
       steps.removeLast();
-      steps.addLast(name);
+      steps.addLast(new Step(Spot.step(name), true));
     }
   }
 
@@ -44,15 +46,6 @@ final class OpenPath {
 
   @Override
   public String toString() {
-    StringBuilder path = new StringBuilder();
-    Iterator<String> each = steps.iterator();
-    while (each.hasNext()) {
-      String step = each.next();
-      if (path.length() > 0 && !step.startsWith("[")) {
-        path.append('.');
-      }
-      path.append(step);
-    }
-    return path.toString();
+    return steps.stream().map(Step::says).collect(Collectors.joining("."));
   }
 }

@@ -155,7 +155,8 @@ class PredictionJsonTest {
             "the walk ends: out jumps at 2 V",
             List.of(),
             List.of(),
-            Optional.empty());
+            Optional.empty(),
+            List.of());
 
     JsonNode root =
         read(new Prediction(SampleDesigns.figures(), List.of(hookup)), List.of()).at("/hookups/0");
