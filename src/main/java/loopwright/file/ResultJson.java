@@ -23,9 +23,11 @@ final class ResultJson {
 
   /** A number with all the digits that it takes to read the very same value back. */
   static Json number(double value) {
-    return Double.isFinite(value)
-        ? Json.number(Double.toString(value).toLowerCase(Locale.ROOT))
-        : nothing();
+    if (!Double.isFinite(value)) {
+      return nothing();
+    }
+    double unsignedZero = value + 0.0;
+    return Json.number(Double.toString(unsignedZero).toLowerCase(Locale.ROOT));
   }
 
   static Json number(OptionalDouble value) {

@@ -9,7 +9,6 @@ import loopwright.design.Design;
 import loopwright.design.Hookup;
 import loopwright.predict.DeviceState.DiodeState;
 import loopwright.predict.DeviceState.TransistorState;
-import loopwright.quantity.Unit;
 
 /** Made-up predictions that have every kind of entry, for tests of what prints and writes them. */
 public final class SamplePredictions {
@@ -45,8 +44,7 @@ public final class SamplePredictions {
         "",
         List.of(new OffsetShare("input offset", -0.0067), new OffsetShare("base current", 0.0007)),
         List.of(0.001, 2.0, 0.0, 3e-4),
-        Optional.empty(),
-        List.of());
+        Optional.empty());
   }
 
   private static HookupPrediction failed(Hookup hookup) {
@@ -71,8 +69,7 @@ public final class SamplePredictions {
         "",
         List.of(),
         List.of(),
-        Optional.empty(),
-        List.of());
+        Optional.empty());
   }
 
   private static RestState rest() {
@@ -89,63 +86,25 @@ public final class SamplePredictions {
 
   private static Map<String, FigureResult> figures() {
     Map<String, FigureResult> figures = new LinkedHashMap<>();
-    put(
-        figures,
-        "openLoopGain",
-        "Open-loop gain",
-        Unit.ONE,
-        FigureValue.of(1104),
-        FigureValue.of(1064.25));
+    put(figures, "openLoopGain", FigureValue.of(1104), FigureValue.of(1064.25));
     put(
         figures,
         "outputOffset",
-        "Output offset",
-        Unit.VOLT,
         FigureValue.of(0.0075, "with A and the input offset as solved"),
         FigureValue.of(0.0057));
-    put(
-        figures,
-        "worstPhaseMargin",
-        "Phase margin, worst",
-        Unit.DEGREE,
-        FigureValue.none("no hand formula"),
-        FigureValue.of(-20));
+    put(figures, "worstPhaseMargin", FigureValue.none("no hand formula"), FigureValue.of(-20));
     put(
         figures,
         "bandwidth",
-        "Bandwidth",
-        Unit.HERTZ,
         FigureValue.none("no unity frequency"),
         FigureValue.none("something grows"));
-    put(
-        figures,
-        "noiseGain",
-        "Noise gain",
-        Unit.ONE,
-        FigureValue.of(10),
-        FigureValue.none("has no solved value"));
+    put(figures, "noiseGain", FigureValue.of(10), FigureValue.none("has no solved value"));
     return figures;
   }
 
   private static void put(
-      Map<String, FigureResult> figures,
-      String key,
-      String label,
-      Unit unit,
-      FigureValue formula,
-      FigureValue solved) {
-    Figure figure =
-        new Figure(
-            key,
-            label,
-            unit,
-            label,
-            "at rest",
-            "",
-            CostClass.LINEAR,
-            NoFormula.ROAD,
-            NoFormula.ROAD);
-    figures.put(key, new FigureResult(figure, formula, solved));
+      Map<String, FigureResult> figures, String key, FigureValue formula, FigureValue solved) {
+    figures.put(key, new FigureResult(Catalogue.find(key).orElseThrow(), formula, solved));
   }
 
   private static SwingLevel level(double output, boolean stable, double growth, double margin) {
