@@ -55,7 +55,7 @@ public final class NaturalFrequencies {
   }
 
   /** For networks of one pattern; the capacitive unknowns are those that C reaches at the state. */
-  public NaturalFrequencies(LinearNetwork network) {
+  public NaturalFrequencies(SmallSignalCircuit network) {
     this.pattern = network.pattern();
     this.shifted = new DenseRealSystem(pattern);
     this.complex = new DenseComplexSystem(pattern);
@@ -82,7 +82,7 @@ public final class NaturalFrequencies {
    * @throws ArithmeticException when the network is singular at the shift or the eigenvalue
    *     iteration does not converge
    */
-  public List<Pole> of(LinearNetwork network) {
+  public List<Pole> of(SmallSignalCircuit network) {
     double[] eigenvalues = Eigenvalues.of(reduced(network), columns.length);
     List<Pole> poles = new ArrayList<>();
     for (int i = 0; i < columns.length; i++) {
@@ -104,7 +104,7 @@ public final class NaturalFrequencies {
    * Adds a root; one that seems to grow, or all but does, is refined first and dropped if it is
    * none.
    */
-  private void keep(LinearNetwork network, Pole pole, List<Pole> poles) {
+  private void keep(SmallSignalCircuit network, Pole pole, List<Pole> poles) {
     if (pole.re() < -1e-6 * pole.magnitude()) {
       poles.add(pole);
       return;
@@ -117,7 +117,7 @@ public final class NaturalFrequencies {
     }
   }
 
-  private double[] reduced(LinearNetwork network) {
+  private double[] reduced(SmallSignalCircuit network) {
     double[] g = network.g();
     double[] c = network.c();
     for (int slot = 0; slot < values.length; slot++) {
@@ -149,7 +149,7 @@ public final class NaturalFrequencies {
    *
    * @return the root nearby, or null when there is none within a tenth of its magnitude
    */
-  private Pole refine(LinearNetwork network, Pole start) {
+  private Pole refine(SmallSignalCircuit network, Pole start) {
     int n = pattern.size();
     double re = start.re();
     double im = start.im();
