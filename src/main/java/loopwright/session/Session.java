@@ -1,6 +1,5 @@
 package loopwright.session;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
@@ -11,6 +10,8 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Consumer;
 import loopwright.design.Design;
+import loopwright.file.DesignDocument;
+import loopwright.file.DesignFile;
 import loopwright.predict.Figure;
 import loopwright.quantity.Quantity;
 import loopwright.task.Receiver;
@@ -21,14 +22,15 @@ import loopwright.task.TaskRunner;
  * the design. Used from one thread only, the one that the task runner delivers to.
  */
 public final class Session implements AutoCloseable {
-  private final DesignStore store;
+  private final DesignFile files;
   private final PredictionSource source;
   private final TaskRunner runner;
   private final List<Consumer<Snapshot>> listeners = new ArrayList<>();
   private final Map<String, Solved> solved = new LinkedHashMap<>();
 
   private Optional<Path> path = Optional.empty();
-  private Optional<DesignStore.Stored> stored = Optional.empty();
+  private Optional<DesignDocument> document = Optional.empty();
+  private Optional<Design> saved = Optional.empty();
   private History history;
   private String hookup;
   private Optional<Failure> failure = Optional.empty();
@@ -36,18 +38,37 @@ public final class Session implements AutoCloseable {
   private String doing = "";
 
   /**
-   * @param store reads and writes design files
+   * A session on a design that is in no file yet.
+   *
+   * @param files reads and writes design files
    * @param source solves designs
    * @param runner carries that out; delivers on the thread that uses this session
-   * @param design shown until another is opened; not stored yet
+   * @param design shown until another is opened
    */
-  public Session(DesignStore store, PredictionSource source, TaskRunner runner, Design design) {
-    this.store = store;
+  public Session(DesignFile files, PredictionSource source, TaskRunner runner, Design design) {
+    this(files, source, runner);
+    start(design);
+  }
+
+  /**
+   * A session on a design file.
+   *
+   * @param files reads and writes design files
+   * @param source solves designs
+   * @param runner carries that out; delivers on the thread that uses this session
+   * @param file opened at once
+   * @throws loopwright.file.FileException when it cannot be read
+   * @throws loopwright.design.DesignException when values in it do not fit
+   */
+  public Session(DesignFile files, PredictionSource source, TaskRunner runner, Path file) {
+    this(files, source, runner);
+    take(file, files.read(file));
+  }
+
+  private Session(DesignFile files, PredictionSource source, TaskRunner runner) {
+    this.files = files;
     this.source = source;
     this.runner = runner;
-    this.history = History.of(design);
-    this.hookup = firstHookup(design);
-    solveWhereNeeded();
   }
 
   /** What there is to show now. */
@@ -55,7 +76,7 @@ public final class Session implements AutoCloseable {
     return new Snapshot(
         path,
         history.design(),
-        !stored.map(DesignStore.Stored::design).equals(Optional.of(history.design())),
+        !saved.equals(Optional.of(history.design())),
         hookup,
         solved,
         failure,
@@ -73,31 +94,24 @@ public final class Session implements AutoCloseable {
   /**
    * Opens another design in place of this one, whose unsaved edits are lost.
    *
-   * @throws IOException when it cannot be read; the present design then stays
+   * @throws loopwright.file.FileException when it cannot be read; the present design then stays
+   * @throws loopwright.design.DesignException when values in it do not fit; likewise
    */
-  public void open(Path file) throws IOException {
-    DesignStore.Stored opened = store.open(file);
-    path = Optional.of(file);
-    stored = Optional.of(opened);
-    history = History.of(opened.design());
-    hookup = firstHookup(opened.design());
-    solved.clear();
-    failure = Optional.empty();
-    solveWhereNeeded();
+  public void open(Path file) {
+    take(file, files.read(file));
     tell();
   }
 
   /**
-   * Saves the present design.
+   * Saves the present design; what was not changed stays as its author wrote it.
    *
    * @param file where to; becomes the file of this session
-   * @throws IOException when it cannot be written; the design then stays unsaved
+   * @throws loopwright.file.FileException when it cannot be written; the old file is then whole
+   * @throws loopwright.design.DesignException when the design could not be read again
    */
-  public void save(Path file) throws IOException {
-    Design design = history.design();
-    stored =
-        Optional.of(
-            stored.isPresent() ? stored.get().save(file, design) : store.create(file, design));
+  public void save(Path file) {
+    files.save(file, history.design(), document);
+    saved = Optional.of(history.design());
     path = Optional.of(file);
     tell();
   }
@@ -159,6 +173,21 @@ public final class Session implements AutoCloseable {
   @Override
   public void close() {
     runner.close();
+  }
+
+  private void take(Path file, DesignDocument opened) {
+    path = Optional.of(file);
+    document = Optional.of(opened);
+    saved = Optional.of(opened.design());
+    start(opened.design());
+  }
+
+  private void start(Design design) {
+    history = History.of(design);
+    hookup = firstHookup(design);
+    solved.clear();
+    failure = Optional.empty();
+    solveWhereNeeded();
   }
 
   private void moveTo(History next) {

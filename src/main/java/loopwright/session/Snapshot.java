@@ -72,4 +72,19 @@ public record Snapshot(
     return newestFailure.filter(
         failure -> failure.hookup().equals(hookup) && failure.design().equals(design));
   }
+
+  /**
+   * Why the present edit has no figures in the chosen hookup: the design stands for no circuit, or
+   * its circuit found no rest. Empty while nobody knows, and when it has figures.
+   */
+  public Optional<String> unsolved() {
+    return failure()
+        .map(Failure::says)
+        .or(
+            () ->
+                prediction()
+                    .filter(prediction -> current() && prediction.rest().isEmpty())
+                    .map(HookupPrediction::failure)
+                    .filter(says -> !says.isEmpty()));
+  }
 }

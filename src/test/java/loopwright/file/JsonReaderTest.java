@@ -76,7 +76,7 @@ class JsonReaderTest {
     assertThatThrownBy(() -> JsonReader.read(text, "x.json"))
         .hasMessageContaining(": hookups.slow: the key \"a\" is given twice");
     assertThatThrownBy(() -> JsonReader.read("{\"poles\": [1, {\"a\": 1, \"a\": 2}]}", "x.json"))
-        .hasMessageContaining(": poles[1]: the key \"a\" is given twice");
+        .hasMessageContaining(": poles.1: the key \"a\" is given twice");
   }
 
   @Test

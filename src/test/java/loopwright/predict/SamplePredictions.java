@@ -44,7 +44,8 @@ public final class SamplePredictions {
         "",
         List.of(new OffsetShare("input offset", -0.0067), new OffsetShare("base current", 0.0007)),
         List.of(0.001, 2.0, 0.0, 3e-4),
-        Optional.empty());
+        Optional.empty(),
+        List.of());
   }
 
   private static HookupPrediction failed(Hookup hookup) {
@@ -69,7 +70,8 @@ public final class SamplePredictions {
         "",
         List.of(),
         List.of(),
-        Optional.empty());
+        Optional.empty(),
+        List.of());
   }
 
   private static RestState rest() {

@@ -4,14 +4,17 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import loopwright.design.Design;
 import loopwright.design.Reading;
+import loopwright.file.DesignFile;
+import loopwright.file.FileException;
+import loopwright.part.Shelf;
 import loopwright.quantity.Quantity;
 import loopwright.quantity.Unit;
 import loopwright.task.Receiver;
@@ -19,14 +22,16 @@ import loopwright.task.SameThreadRunner;
 import loopwright.task.TaskRunner;
 import loopwright.task.Work;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 
 /** The open design, without a window. */
 class SessionTest {
-  private static final Path FILE = Path.of("coil.json");
+  @TempDir private Path folder;
 
   private final Design opened = SampleDesigns.coilAmplifier();
   private final Design edited = SampleDesigns.withGainLoad(opened, "10k");
-  private final MemoryStore store = new MemoryStore();
+  private final DesignFile files =
+      new DesignFile(Shelf.empty(), Map.of("closedLoopGain", Unit.ONE));
   private final List<String> asked = new ArrayList<>();
 
   @Test
@@ -62,39 +67,44 @@ class SessionTest {
   }
 
   @Test
-  void unsavedIsWhatTheFileDoesNotHold() throws IOException {
-    store.files.put(FILE, opened);
+  void unsavedIsWhatTheFileDoesNotHold() {
+    Path file = stored(opened);
     Session session = session();
     assertThat(session.snapshot().unsaved()).isTrue();
-    session.open(FILE);
+    session.open(file);
     assertThat(session.snapshot().unsaved()).isFalse();
     session.edit(Edit.of("Load 10k", edited));
     assertThat(session.snapshot().unsaved()).isTrue();
     session.undo();
     assertThat(session.snapshot().unsaved()).isFalse();
     session.redo();
-    session.save(FILE);
+    session.save(file);
     assertThat(session.snapshot().unsaved()).isFalse();
-    assertThat(store.files).containsEntry(FILE, edited);
+    assertThat(files.read(file).design()).isEqualTo(session.snapshot().design());
     session.undo();
     assertThat(session.snapshot().unsaved()).isTrue();
   }
 
   @Test
-  void aFileThatCannotBeReadLeavesThePresentDesign() {
+  void aFileThatCannotBeReadLeavesThePresentDesign() throws IOException {
     Session session = session();
     session.edit(Edit.of("Load 10k", edited));
-    assertThatThrownBy(() -> session.open(FILE)).hasMessage("coil.json: not there");
+    Path missing = folder.resolve("missing.json");
+    assertThatThrownBy(() -> session.open(missing))
+        .isInstanceOf(FileException.class)
+        .hasMessageContaining("missing.json");
+    Path broken = Files.writeString(folder.resolve("broken.json"), "{\"loopwright\": 1");
+    assertThatThrownBy(() -> session.open(broken)).isInstanceOf(FileException.class);
     assertThat(session.snapshot().design()).isEqualTo(edited);
     assertThat(session.snapshot().path()).isEmpty();
   }
 
   @Test
-  void openingForgetsTheHistoryAndTheOldResults() throws IOException {
-    store.files.put(FILE, edited);
+  void openingForgetsTheHistoryAndTheOldResults() {
+    Path file = stored(edited);
     Session session = session();
     session.choose("follower");
-    session.open(FILE);
+    session.open(file);
     assertThat(session.snapshot().undoable()).isEmpty();
     assertThat(session.snapshot().hookup()).isEqualTo("divider");
     assertThat(session.snapshot().solved()).containsOnlyKeys("divider");
@@ -143,7 +153,7 @@ class SessionTest {
   void aFailureIsOfItsEditAlone() {
     Session session =
         new Session(
-            store,
+            files,
             (design, hookups, progress) -> {
               if (design.equals(edited)) {
                 throw new IllegalArgumentException("the gain stage has no path to its rail");
@@ -156,10 +166,12 @@ class SessionTest {
     Snapshot failed = session.snapshot();
     assertThat(failed.failure().map(Failure::says))
         .contains("the gain stage has no path to its rail");
+    assertThat(failed.unsolved()).contains("the gain stage has no path to its rail");
     assertThat(failed.current()).isFalse();
     assertThat(failed.solving()).isFalse();
     session.undo();
     assertThat(session.snapshot().failure()).isEmpty();
+    assertThat(session.snapshot().unsolved()).isEmpty();
     assertThat(session.snapshot().current()).isTrue();
   }
 
@@ -168,7 +180,7 @@ class SessionTest {
     WaitingRunner runner = new WaitingRunner();
     Session session =
         new Session(
-            store,
+            files,
             (design, hookups, progress) -> Predictions.assess(design, hookups),
             runner,
             opened);
@@ -195,9 +207,15 @@ class SessionTest {
     assertThat(heard.get(heard.size() - 1)).isTrue();
   }
 
+  private Path stored(Design design) {
+    Path file = folder.resolve("coil.json");
+    files.save(file, design, Optional.empty());
+    return file;
+  }
+
   private Session session() {
     return new Session(
-        store,
+        files,
         (design, hookups, progress) -> {
           asked.addAll(hookups);
           return Predictions.assess(design, hookups);
@@ -216,43 +234,6 @@ class SessionTest {
         .solved()
         .number()
         .orElseThrow();
-  }
-
-  /** Files in memory. */
-  private static final class MemoryStore implements DesignStore {
-    private final Map<Path, Design> files = new HashMap<>();
-
-    @Override
-    public Stored open(Path path) throws IOException {
-      if (!files.containsKey(path)) {
-        throw new IOException(path + ": not there");
-      }
-      return new MemoryDesign(files.get(path));
-    }
-
-    @Override
-    public Stored create(Path path, Design design) {
-      files.put(path, design);
-      return new MemoryDesign(design);
-    }
-
-    private final class MemoryDesign implements Stored {
-      private final Design design;
-
-      MemoryDesign(Design design) {
-        this.design = design;
-      }
-
-      @Override
-      public Design design() {
-        return design;
-      }
-
-      @Override
-      public Stored save(Path path, Design changed) {
-        return create(path, changed);
-      }
-    }
   }
 
   /** Keeps the newest request until the test wants it done. */

@@ -1,6 +1,8 @@
 package loopwright.view.form;
 
+import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Stream;
 import loopwright.design.Design;
 import loopwright.design.StagesAmplifier;
@@ -39,6 +41,21 @@ record Block(String id, String path, List<String> roles) {
 
   private static Block block(String path, String... roles) {
     return new Block(path, path, List.of(roles));
+  }
+
+  /**
+   * The block that a place belongs to, if any.
+   *
+   * @param where a path of the design, the role of a device, or the name of a block
+   */
+  static Optional<Block> holding(List<Block> blocks, String where) {
+    return blocks.stream()
+        .filter(
+            block ->
+                where.equals(block.id())
+                    || (where + ".").startsWith(block.path() + ".")
+                    || block.holds(where))
+        .max(Comparator.comparingInt(block -> block.path().length()));
   }
 
   /** Whether a device belongs to this block. */

@@ -88,6 +88,15 @@ public final class FormPanel extends JPanel {
     }
   }
 
+  /**
+   * The id of the block that has a form for a place, if there is one.
+   *
+   * @param where a path of the design, the role of a device, or the name of a block
+   */
+  public Optional<String> blockAt(String where) {
+    return shown.flatMap(snapshot -> Block.holding(blocks(snapshot), where).map(Block::id));
+  }
+
   /** Shows the present state of the chosen block. */
   public void show(Snapshot snapshot) {
     shown = Optional.of(snapshot);

@@ -26,7 +26,7 @@ public final class QuantityField extends CommitField {
   }
 
   private final Unit unit;
-  private final JLabel hint = Theme.style(new JLabel(), "small");
+  private final JLabel hint = new JLabel();
   private final transient BiFunction<String, Entry, Optional<String>> commit;
   private transient Optional<Quantity> quantity = Optional.empty();
 
@@ -39,6 +39,8 @@ public final class QuantityField extends CommitField {
     this.unit = unit;
     this.commit = commit;
     Theme.trailing(this, hint);
+    // The field gives what it takes in a style of its own.
+    Theme.style(hint, "hint");
     series()
         .ifPresent(
             series -> {

@@ -28,7 +28,7 @@ final class RowsPanel extends JPanel {
   private transient List<RowEditor> editors = List.of();
 
   RowsPanel(Supplier<Design> design, Shelf shelf, Labels labels, Consumer<Edit> listener) {
-    super(new MigLayout("insets 0, fillx, wrap 2, hidemode 3, gapy 5", "[120!,left][grow,fill]"));
+    super(new MigLayout("insets 0, fillx, wrap 2, hidemode 3, gapy 6", "[138!,left][grow,fill]"));
     Theme.style(this, "plain");
     this.labels = labels;
     this.edits = new RowEdits(design, shelf, labels, listener);
