@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.NoSuchElementException;
 import loopwright.numeric.SparsityPattern;
+import loopwright.numeric.SystemFamily;
 
 /**
  * A circuit of fixed topology and values. Its matrix pattern is analysed once; every evaluation
@@ -33,7 +34,7 @@ public final class Circuit {
   private final List<Element> elements;
   private final Map<String, Element> byName = new LinkedHashMap<>();
   private final List<DeviceTerminals> devices;
-  private final SparsityPattern pattern;
+  private final SystemFamily systems;
   private final int[] diagonal;
   private final double kelvin;
   private final double restGenerator;
@@ -49,7 +50,7 @@ public final class Circuit {
     this.layout = layout;
     this.elements = elements;
     this.devices = devices;
-    this.pattern = pattern;
+    this.systems = new SystemFamily(pattern);
     this.diagonal = diagonal;
     this.kelvin = kelvin;
     this.restGenerator = restGenerator;
@@ -122,7 +123,14 @@ public final class Circuit {
 
   /** The places of G and C that may differ from zero. */
   public SparsityPattern pattern() {
-    return pattern;
+    return systems.pattern();
+  }
+
+  /**
+   * Linear systems of that pattern; what one learns of a good elimination order serves the next.
+   */
+  public SystemFamily systems() {
+    return systems;
   }
 
   /** Ambient temperature, K. */

@@ -7,7 +7,7 @@ import loopwright.quantity.Range;
 import loopwright.quantity.Unit;
 
 /** What holds the bases of the push-pull follower apart. */
-public sealed interface Bias {
+public sealed interface Bias permits Bias.Joined, Bias.Diodes, Bias.VbeMultiplier {
   /** Nothing: both drive nodes are one. */
   @Kind("joined")
   record Joined() implements Bias {}

@@ -9,7 +9,12 @@ import loopwright.quantity.Range;
 import loopwright.quantity.Unit;
 
 /** What pulls a current from a node toward its rail: the pair's tail, or the gain stage's load. */
-public sealed interface CurrentSource {
+public sealed interface CurrentSource
+    permits CurrentSource.Resistor,
+        CurrentSource.Ideal,
+        CurrentSource.Mirror,
+        CurrentSource.DiodeBiased,
+        CurrentSource.TwoTransistor {
   /** A resistor to the rail. */
   @Kind("resistor")
   record Resistor(@Measure(unit = Unit.OHM, range = Range.POSITIVE) PartValue resistance)

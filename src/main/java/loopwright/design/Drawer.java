@@ -18,7 +18,7 @@ public record Drawer(
   }
 
   /** Values in stock: single ones, or a whole series of preferred values. */
-  public sealed interface Stock {
+  public sealed interface Stock permits Stock.Values, Stock.Series {
     /** Single values; written as a list. */
     record Values(List<Quantity> values) implements Stock {
       /** Keeps its own copy of the list. */

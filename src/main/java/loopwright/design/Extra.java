@@ -6,7 +6,7 @@ import loopwright.quantity.Range;
 import loopwright.quantity.Unit;
 
 /** A resistor or capacitor between any two named nodes: filters, bootstraps, trimmers, loads. */
-public sealed interface Extra {
+public sealed interface Extra permits Extra.ExtraResistor, Extra.ExtraCapacitor {
   /** What the author calls it; unique, without dots. */
   String name();
 

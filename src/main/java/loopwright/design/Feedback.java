@@ -8,7 +8,7 @@ import loopwright.quantity.Range;
 import loopwright.quantity.Unit;
 
 /** How the output comes back to the input. */
-public sealed interface Feedback {
+public sealed interface Feedback permits Feedback.NonInverting, Feedback.Inverting, Feedback.Open {
   /** A divider to the inverting input; {@code upper} 0 is a wire, that is a follower. */
   @Kind("nonInverting")
   record NonInverting(

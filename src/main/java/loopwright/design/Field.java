@@ -92,7 +92,7 @@ public record Field(
         : Optional.empty();
   }
 
-  /** The records of a family or of alternatives, in the order of their declaration. */
+  /** The records of a family or of alternatives, in the order of the permits clause. */
   public List<Class<?>> variants() {
     return Schema.variants(type);
   }

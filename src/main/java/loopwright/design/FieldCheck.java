@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Map;
 import loopwright.quantity.Quantity;
 import loopwright.quantity.QuantityException;
+import loopwright.quantity.Range;
 import loopwright.quantity.Unit;
 
 /** Holds a value against the field that it shall stand in. */
@@ -25,13 +26,20 @@ final class FieldCheck {
     } else if (value instanceof PartValue part) {
       requireRange(field, part.value(), at);
       part.measured().ifPresent(measured -> requireRange(field, measured, at + ".measured"));
+      part.tolerance()
+          .ifPresent(
+              tolerance -> requireRange(Range.FRACTION, Unit.ONE, tolerance, at + ".tolerance"));
     }
     return value;
   }
 
   private static void requireRange(Field field, Quantity quantity, String at) {
+    requireRange(field.range(), field.unit().orElse(Unit.ONE), quantity, at);
+  }
+
+  private static void requireRange(Range range, Unit unit, Quantity quantity, String at) {
     try {
-      quantity.requireWithin(field.range(), field.unit().orElse(Unit.ONE));
+      quantity.requireWithin(range, unit);
     } catch (QuantityException e) {
       throw new DesignException(at, e.getMessage());
     }

@@ -8,7 +8,7 @@ import loopwright.quantity.Range;
 import loopwright.quantity.Unit;
 
 /** What stands between the gain stage and the output. */
-public sealed interface OutputStage {
+public sealed interface OutputStage permits OutputStage.None, OutputStage.PushPull {
   /** Nothing: the output is the gain stage's collector. */
   @Kind("none")
   record None() implements OutputStage {}

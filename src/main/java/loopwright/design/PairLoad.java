@@ -7,7 +7,7 @@ import loopwright.quantity.Range;
 import loopwright.quantity.Unit;
 
 /** What stands in the collectors of the pair. */
-public sealed interface PairLoad {
+public sealed interface PairLoad permits PairLoad.Resistors, PairLoad.Mirror {
   /** A resistor from the rail to each collector; {@code other} may be a wire. */
   @Kind("resistors")
   record Resistors(

@@ -98,7 +98,10 @@ public final class Schema {
         : schema;
   }
 
-  /** The records of a sealed family in the order of their declaration; none for other types. */
+  /**
+   * The records of a sealed family in the order of its permits clause, which each family writes out
+   * because the compiler promises no order otherwise; none for other types.
+   */
   static List<Class<?>> variants(Class<?> type) {
     return VARIANTS.get(type);
   }

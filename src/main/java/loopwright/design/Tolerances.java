@@ -15,7 +15,7 @@ public record Tolerances(
     @Measure(unit = Unit.ONE, range = Range.FRACTION) Optional<Quantity> rails,
     Optional<AmbientRange> ambient) {
   /** How current gain spreads. */
-  public sealed interface BetaSpread {
+  public sealed interface BetaSpread permits BetaSpread.FromDatasheet, BetaSpread.ByFraction {
     /**
      * From the datasheet's minimum to its maximum at the nearest current; written {@code
      * "datasheet"}.

@@ -4,8 +4,6 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import loopwright.numeric.ComplexSystem;
-import loopwright.numeric.DenseComplexSystem;
-import loopwright.numeric.DenseRealSystem;
 import loopwright.numeric.Eigenvalues;
 import loopwright.numeric.RealSystem;
 import loopwright.numeric.SparsityPattern;
@@ -55,10 +53,10 @@ public final class NaturalFrequencies {
   }
 
   /** For networks of one pattern; the capacitive unknowns are those that C reaches at the state. */
-  public NaturalFrequencies(LinearNetwork network) {
+  public NaturalFrequencies(SmallSignalCircuit network) {
     this.pattern = network.pattern();
-    this.shifted = new DenseRealSystem(pattern);
-    this.complex = new DenseComplexSystem(pattern);
+    this.shifted = network.systems().real();
+    this.complex = network.systems().complex();
     this.values = new double[pattern.slots()];
     this.place = new int[pattern.size()];
     Arrays.fill(place, -1);
@@ -82,7 +80,7 @@ public final class NaturalFrequencies {
    * @throws ArithmeticException when the network is singular at the shift or the eigenvalue
    *     iteration does not converge
    */
-  public List<Pole> of(LinearNetwork network) {
+  public List<Pole> of(SmallSignalCircuit network) {
     double[] eigenvalues = Eigenvalues.of(reduced(network), columns.length);
     List<Pole> poles = new ArrayList<>();
     for (int i = 0; i < columns.length; i++) {
@@ -104,7 +102,7 @@ public final class NaturalFrequencies {
    * Adds a root; one that seems to grow, or all but does, is refined first and dropped if it is
    * none.
    */
-  private void keep(LinearNetwork network, Pole pole, List<Pole> poles) {
+  private void keep(SmallSignalCircuit network, Pole pole, List<Pole> poles) {
     if (pole.re() < -1e-6 * pole.magnitude()) {
       poles.add(pole);
       return;
@@ -117,7 +115,7 @@ public final class NaturalFrequencies {
     }
   }
 
-  private double[] reduced(LinearNetwork network) {
+  private double[] reduced(SmallSignalCircuit network) {
     double[] g = network.g();
     double[] c = network.c();
     for (int slot = 0; slot < values.length; slot++) {
@@ -149,7 +147,7 @@ public final class NaturalFrequencies {
    *
    * @return the root nearby, or null when there is none within a tenth of its magnitude
    */
-  Pole refine(LinearNetwork network, Pole start) {
+  Pole refine(SmallSignalCircuit network, Pole start) {
     int n = pattern.size();
     double re = start.re();
     double im = start.im();

@@ -28,7 +28,7 @@ public final class RootFollower {
   private int fullSolutions;
 
   /** For networks of the pattern of this one. */
-  public RootFollower(LinearNetwork network) {
+  public RootFollower(SmallSignalCircuit network) {
     this.solver = new NaturalFrequencies(network);
   }
 
@@ -38,7 +38,7 @@ public final class RootFollower {
   }
 
   /** Solves all roots of a network and follows the leading ones from here. */
-  public List<Pole> solveAll(LinearNetwork network) {
+  public List<Pole> solveAll(SmallSignalCircuit network) {
     fullSolutions++;
     steps = 0;
     model = solver.of(network);
@@ -50,7 +50,7 @@ public final class RootFollower {
    * The followed roots in the next network, not yet believed; empty when some could not be
    * followed.
    */
-  public List<Pole> follow(LinearNetwork network) {
+  public List<Pole> follow(SmallSignalCircuit network) {
     if (model.isEmpty() || ++steps > MOST_STEPS) {
       return List.of();
     }

@@ -4,7 +4,6 @@ import java.util.Arrays;
 import loopwright.circuit.Circuit;
 import loopwright.circuit.CircuitState;
 import loopwright.circuit.Stamps;
-import loopwright.numeric.DenseRealSystem;
 import loopwright.numeric.RealSystem;
 
 /**
@@ -33,7 +32,7 @@ public final class StaticSolver {
   /** A solver for one circuit. */
   public StaticSolver(Circuit circuit) {
     this.circuit = circuit;
-    this.system = new DenseRealSystem(circuit.pattern());
+    this.system = circuit.systems().real();
     this.step = new double[circuit.unknowns()];
   }
 

@@ -144,6 +144,30 @@ final class SampleDesigns {
         bench());
   }
 
+  /** The full design with the stage variants that it leaves out. */
+  static Design variant() {
+    Design design = full();
+    design =
+        set(
+            design,
+            "amplifier.inputPair.tail",
+            new CurrentSource.Mirror(
+                "N", part("10k"), part("100"), Optional.of(FeedFrom.OPPOSITE_RAIL)));
+    design = set(design, "amplifier.gainStage.load", new CurrentSource.Ideal(quantity("2 mA")));
+    design = set(design, "amplifier.outputStage.bias", new Bias.Diodes("D", 3));
+    design = set(design, "tolerances.beta", new Tolerances.BetaSpread.FromDatasheet());
+    return set(
+        design,
+        "limits.1",
+        new Limit(
+            "gain",
+            Optional.empty(),
+            Optional.of("out"),
+            Optional.of(quantity("-50m")),
+            Optional.empty(),
+            quantity("0")));
+  }
+
   private static StagesAmplifier fullAmplifier() {
     return new StagesAmplifier(
         new InputPair(

@@ -53,6 +53,7 @@ class LetterCodeTest {
         .isCloseTo(180e-9, Offset.offset(1e-20));
   }
 
+  /** D to N as public charts of the code print them, B and C from memory. */
   @ParameterizedTest
   @CsvSource({
     "B, 0.001",

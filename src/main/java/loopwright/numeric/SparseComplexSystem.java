@@ -1,0 +1,241 @@
+package loopwright.numeric;
+
+import java.util.Arrays;
+
+/**
+ * A complex system (G + sC) x = b of a fixed pattern, eliminated by a plan that was made once; see
+ * {@link SparseRealSystem}. Complex entries are interleaved.
+ */
+final class SparseComplexSystem implements ComplexSystem {
+  private static final double LARGEST_SQUARE =
+      SparseRealSystem.LARGEST_MULTIPLIER * SparseRealSystem.LARGEST_MULTIPLIER;
+
+  private final SystemFamily family;
+  private final double[] work;
+  private EliminationPlan plan;
+  private double[] entries;
+  private DenseComplexSystem dense;
+  private boolean isDense;
+
+  SparseComplexSystem(SystemFamily family) {
+    this.family = family;
+    this.work = new double[2 * family.pattern().size()];
+    adopt(family.complexPlan());
+  }
+
+  private void adopt(EliminationPlan next) {
+    if (next != null && next != plan) {
+      plan = next;
+      entries = new double[2 * next.entries];
+    }
+  }
+
+  @Override
+  public boolean factor(double[] g, double[] c, double re, double im) {
+    isDense = false;
+    double sum = Math.abs(re) + Math.abs(im);
+    for (int slot = 0; slot < g.length; slot++) {
+      sum += Math.abs(g[slot]) + Math.abs(c[slot]);
+    }
+    if (!(sum < Double.POSITIVE_INFINITY)) {
+      return false;
+    }
+    if (plan != null && eliminate(g, c, re, im)) {
+      return true;
+    }
+    double[] realParts = new double[g.length];
+    double[] imaginaryParts = new double[g.length];
+    for (int slot = 0; slot < g.length; slot++) {
+      realParts[slot] = g[slot] + re * c[slot];
+      imaginaryParts[slot] = im * c[slot];
+    }
+    EliminationPlan fresh = family.analyseComplex(realParts, imaginaryParts);
+    if (fresh != null) {
+      adopt(fresh);
+      if (eliminate(g, c, re, im)) {
+        return true;
+      }
+    }
+    family.countDenseFallback();
+    if (dense == null) {
+      dense = new DenseComplexSystem(family.pattern());
+    }
+    isDense = true;
+    return dense.factor(g, c, re, im);
+  }
+
+  private boolean eliminate(double[] g, double[] c, double re, double im) {
+    double[] a = entries;
+    int[] place = plan.place;
+    Arrays.fill(a, 0);
+    for (int slot = 0; slot < place.length; slot++) {
+      double capacitance = c[slot];
+      int at = 2 * place[slot];
+      a[at] = g[slot] + re * capacitance;
+      a[at + 1] = im * capacitance;
+    }
+    int[] start = plan.start;
+    int[] startBelow = plan.startBelow;
+    int[] target = plan.target;
+    int size = plan.size;
+    int update = 0;
+    for (int k = 0; k < size; k++) {
+      int pivot = 2 * start[k];
+      double pr = a[pivot];
+      double pi = a[pivot + 1];
+      double scale = 1 / (pr * pr + pi * pi);
+      if (!(scale < Double.MAX_VALUE && scale > 0)) {
+        return false;
+      }
+      pr *= scale;
+      pi *= -scale;
+      a[pivot] = pr;
+      a[pivot + 1] = pi;
+      int right = pivot + 2;
+      int below = 2 * startBelow[k];
+      int end = 2 * start[k + 1];
+      for (int l = below; l < end; l += 2) {
+        double ar = a[l];
+        double ai = a[l + 1];
+        double lr = ar * pr - ai * pi;
+        double li = ar * pi + ai * pr;
+        if (!(lr * lr + li * li <= LARGEST_SQUARE)) {
+          return false;
+        }
+        a[l] = lr;
+        a[l + 1] = li;
+        for (int u = right; u < below; u += 2) {
+          int to = 2 * target[update++];
+          double ur = a[u];
+          double ui = a[u + 1];
+          a[to] -= lr * ur - li * ui;
+          a[to + 1] -= lr * ui + li * ur;
+        }
+      }
+    }
+    return true;
+  }
+
+  @Override
+  public void solve(double[] b) {
+    if (isDense) {
+      dense.solve(b);
+      return;
+    }
+    double[] a = entries;
+    double[] w = work;
+    int[] line = plan.line;
+    System.arraycopy(b, 0, w, 0, 2 * plan.size);
+    for (int k = 0; k < plan.size; k++) {
+      int row = 2 * plan.rows[k];
+      double yr = w[row];
+      double yi = w[row + 1];
+      for (int l = plan.startBelow[k]; l < plan.start[k + 1]; l++) {
+        subtract(w, 2 * line[l], a[2 * l], a[2 * l + 1], yr, yi);
+      }
+    }
+    for (int k = plan.size - 1; k >= 0; k--) {
+      int row = 2 * plan.rows[k];
+      double sr = w[row];
+      double si = w[row + 1];
+      int pivot = plan.start[k];
+      for (int u = pivot + 1; u < plan.startBelow[k]; u++) {
+        double ur = a[2 * u];
+        double ui = a[2 * u + 1];
+        double xr = b[2 * line[u]];
+        double xi = b[2 * line[u] + 1];
+        sr -= ur * xr - ui * xi;
+        si -= ur * xi + ui * xr;
+      }
+      double pr = a[2 * pivot];
+      double pi = a[2 * pivot + 1];
+      int column = 2 * plan.columns[k];
+      b[column] = sr * pr - si * pi;
+      b[column + 1] = sr * pi + si * pr;
+    }
+  }
+
+  @Override
+  public void solveTransposed(double[] b) {
+    if (isDense) {
+      dense.solveTransposed(b);
+      return;
+    }
+    double[] a = entries;
+    double[] w = work;
+    int[] line = plan.line;
+    System.arraycopy(b, 0, w, 0, 2 * plan.size);
+    for (int k = 0; k < plan.size; k++) {
+      int pivot = plan.start[k];
+      int column = 2 * plan.columns[k];
+      double pr = a[2 * pivot];
+      double pi = a[2 * pivot + 1];
+      double yr = w[column] * pr - w[column + 1] * pi;
+      double yi = w[column] * pi + w[column + 1] * pr;
+      w[column] = yr;
+      w[column + 1] = yi;
+      for (int u = pivot + 1; u < plan.startBelow[k]; u++) {
+        subtract(w, 2 * line[u], a[2 * u], a[2 * u + 1], yr, yi);
+      }
+    }
+    for (int k = plan.size - 1; k >= 0; k--) {
+      int column = 2 * plan.columns[k];
+      double sr = w[column];
+      double si = w[column + 1];
+      for (int l = plan.startBelow[k]; l < plan.start[k + 1]; l++) {
+        double lr = a[2 * l];
+        double li = a[2 * l + 1];
+        double xr = b[2 * line[l]];
+        double xi = b[2 * line[l] + 1];
+        sr -= lr * xr - li * xi;
+        si -= lr * xi + li * xr;
+      }
+      b[2 * plan.rows[k]] = sr;
+      b[2 * plan.rows[k] + 1] = si;
+    }
+  }
+
+  private static void subtract(double[] w, int at, double lr, double li, double yr, double yi) {
+    w[at] -= lr * yr - li * yi;
+    w[at + 1] -= lr * yi + li * yr;
+  }
+
+  @Override
+  public double logDeterminant() {
+    if (isDense) {
+      return dense.logDeterminant();
+    }
+    double sum = 0;
+    for (int k = 0; k < plan.size; k++) {
+      int pivot = 2 * plan.start[k];
+      sum -= Math.log(Math.hypot(entries[pivot], entries[pivot + 1]));
+    }
+    return sum;
+  }
+
+  @Override
+  public double determinantArgument() {
+    if (isDense) {
+      return dense.determinantArgument();
+    }
+    double re = plan.permutationSign;
+    double im = 0;
+    for (int k = 0; k < plan.size; k++) {
+      int pivot = 2 * plan.start[k];
+      double pr = entries[pivot];
+      double pi = entries[pivot + 1];
+      double scale = 1 / (Math.abs(pr) + Math.abs(pi));
+      pr *= scale;
+      pi *= -scale;
+      double next = re * pr - im * pi;
+      im = re * pi + im * pr;
+      re = next;
+      if ((k & 63) == 63) {
+        double size = 1 / (Math.abs(re) + Math.abs(im));
+        re *= size;
+        im *= size;
+      }
+    }
+    return Math.atan2(im, re);
+  }
+}

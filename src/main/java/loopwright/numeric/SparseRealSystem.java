@@ -1,0 +1,167 @@
+package loopwright.numeric;
+
+import java.util.Arrays;
+
+/**
+ * A real system of a fixed pattern, eliminated by a plan that was made once: the numeric
+ * factorisation allocates nothing, hashes nothing and searches nothing.
+ *
+ * <p>The plan's pivots were safe for the matrix that it was made with. For another matrix a
+ * multiplier may become large; then the plan is made anew with the present values, and where no
+ * safe order is found a dense factorisation with partial pivoting steps in. Both are counted in the
+ * {@link SystemFamily}.
+ */
+final class SparseRealSystem implements RealSystem {
+  /** A multiplier above this costs more digits than a new analysis costs time. */
+  static final double LARGEST_MULTIPLIER = 1e4;
+
+  private final SystemFamily family;
+  private final double[] work;
+  private EliminationPlan plan;
+  private double[] entries;
+  private DenseRealSystem dense;
+  private boolean isDense;
+
+  SparseRealSystem(SystemFamily family) {
+    this.family = family;
+    this.work = new double[family.pattern().size()];
+    adopt(family.realPlan());
+  }
+
+  private void adopt(EliminationPlan next) {
+    if (next != null && next != plan) {
+      plan = next;
+      entries = new double[next.entries];
+    }
+  }
+
+  @Override
+  public boolean factor(double[] values) {
+    isDense = false;
+    double sum = 0;
+    for (double value : values) {
+      sum += Math.abs(value);
+    }
+    if (!(sum < Double.POSITIVE_INFINITY)) {
+      return false;
+    }
+    if (plan != null && eliminate(values)) {
+      return true;
+    }
+    EliminationPlan fresh = family.analyseReal(values);
+    if (fresh != null) {
+      adopt(fresh);
+      if (eliminate(values)) {
+        return true;
+      }
+    }
+    family.countDenseFallback();
+    if (dense == null) {
+      dense = new DenseRealSystem(family.pattern());
+    }
+    isDense = true;
+    return dense.factor(values);
+  }
+
+  private boolean eliminate(double[] values) {
+    double[] a = entries;
+    int[] place = plan.place;
+    Arrays.fill(a, 0);
+    for (int slot = 0; slot < place.length; slot++) {
+      a[place[slot]] = values[slot];
+    }
+    int[] start = plan.start;
+    int[] startBelow = plan.startBelow;
+    int[] target = plan.target;
+    int update = 0;
+    for (int k = 0; k < plan.size; k++) {
+      int pivot = start[k];
+      double inverse = 1 / a[pivot];
+      if (!(Math.abs(inverse) < Double.MAX_VALUE)) {
+        return false;
+      }
+      a[pivot] = inverse;
+      int right = pivot + 1;
+      int below = startBelow[k];
+      int end = start[k + 1];
+      for (int l = below; l < end; l++) {
+        double multiplier = a[l] * inverse;
+        if (!(Math.abs(multiplier) <= LARGEST_MULTIPLIER)) {
+          return false;
+        }
+        a[l] = multiplier;
+        for (int u = right; u < below; u++) {
+          a[target[update++]] -= multiplier * a[u];
+        }
+      }
+    }
+    return true;
+  }
+
+  @Override
+  public void solve(double[] rightHandSide) {
+    if (isDense) {
+      dense.solve(rightHandSide);
+      return;
+    }
+    double[] a = entries;
+    double[] w = work;
+    int[] line = plan.line;
+    System.arraycopy(rightHandSide, 0, w, 0, plan.size);
+    for (int k = 0; k < plan.size; k++) {
+      double value = w[plan.rows[k]];
+      for (int l = plan.startBelow[k]; l < plan.start[k + 1]; l++) {
+        w[line[l]] -= a[l] * value;
+      }
+    }
+    for (int k = plan.size - 1; k >= 0; k--) {
+      double sum = w[plan.rows[k]];
+      int pivot = plan.start[k];
+      for (int u = pivot + 1; u < plan.startBelow[k]; u++) {
+        sum -= a[u] * rightHandSide[line[u]];
+      }
+      rightHandSide[plan.columns[k]] = sum * a[pivot];
+    }
+  }
+
+  @Override
+  public void solveTransposed(double[] rightHandSide) {
+    if (isDense) {
+      dense.solveTransposed(rightHandSide);
+      return;
+    }
+    double[] a = entries;
+    double[] w = work;
+    int[] line = plan.line;
+    System.arraycopy(rightHandSide, 0, w, 0, plan.size);
+    for (int k = 0; k < plan.size; k++) {
+      int pivot = plan.start[k];
+      double value = w[plan.columns[k]] * a[pivot];
+      w[plan.columns[k]] = value;
+      for (int u = pivot + 1; u < plan.startBelow[k]; u++) {
+        w[line[u]] -= a[u] * value;
+      }
+    }
+    for (int k = plan.size - 1; k >= 0; k--) {
+      double sum = w[plan.columns[k]];
+      for (int l = plan.startBelow[k]; l < plan.start[k + 1]; l++) {
+        sum -= a[l] * rightHandSide[line[l]];
+      }
+      rightHandSide[plan.rows[k]] = sum;
+    }
+  }
+
+  @Override
+  public int determinantSign() {
+    if (isDense) {
+      return dense.determinantSign();
+    }
+    int sign = plan.permutationSign;
+    for (int k = 0; k < plan.size; k++) {
+      if (entries[plan.start[k]] < 0) {
+        sign = -sign;
+      }
+    }
+    return sign;
+  }
+}

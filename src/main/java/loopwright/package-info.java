@@ -1,0 +1,2 @@
+/** The composition root. Knows every package. */
+package loopwright;

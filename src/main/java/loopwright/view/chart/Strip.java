@@ -1,0 +1,163 @@
+package loopwright.view.chart;
+
+import java.awt.BasicStroke;
+import java.awt.Color;
+import java.awt.Shape;
+import java.awt.geom.Ellipse2D;
+import java.awt.geom.Point2D;
+import java.util.ArrayList;
+import java.util.List;
+import loopwright.quantity.EngineeringFormat;
+import loopwright.quantity.Unit;
+import org.jfree.chart.annotations.XYLineAnnotation;
+import org.jfree.chart.plot.IntervalMarker;
+import org.jfree.chart.plot.Marker;
+import org.jfree.chart.plot.ValueMarker;
+import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
+import org.jfree.chart.ui.Layer;
+import org.jfree.data.xy.XYSeriesCollection;
+
+/** One strip of a picture: curves of one unit over the shared axis, with their marks and labels. */
+final class Strip {
+  private static final double DOT = 5;
+
+  private final PlotTheme theme;
+  private final Unit unit;
+  private final Unit along;
+  private final XYSeriesCollection dataset = new XYSeriesCollection();
+  private final XYLineAndShapeRenderer renderer = new XYLineAndShapeRenderer(true, false);
+  private final List<PlotLabel> labels = new ArrayList<>();
+  private final XYPlot plot;
+
+  /**
+   * @param unit of its values
+   * @param span what its axis shows
+   * @param along unit of the shared axis
+   */
+  Strip(Unit unit, Span span, Unit along, PlotTheme theme) {
+    this.theme = theme;
+    this.unit = unit;
+    this.along = along;
+    EngineeringAxis axis = new EngineeringAxis(unit, span);
+    if (!axis.scale().onAxis().isEmpty()) {
+      axis.setLabel(axis.scale().onAxis());
+    }
+    ChartStyle.axis(axis, theme);
+    renderer.setDrawSeriesLineAsPath(true);
+    renderer.setDefaultToolTipGenerator((data, series, item) -> says(series, item));
+    plot = new XYPlot(dataset, null, axis, renderer);
+    ChartStyle.plot(plot, theme);
+  }
+
+  /**
+   * Draws a curve with its name beside it.
+   *
+   * @param style place in the theme's set of colours and strokes
+   * @param share where along the curve its name would best stand, 0 to 1
+   */
+  Strip curve(Curve curve, int style, double share) {
+    int series = dataset.getSeriesCount();
+    dataset.addSeries(curve.series());
+    Color colour = theme.curves().get(style);
+    renderer.setSeriesPaint(series, colour);
+    renderer.setSeriesStroke(series, PlotTheme.stroke(style));
+    labels.add(new PlotLabel(curve.name(), colour, curve.anchors(share), false));
+    return this;
+  }
+
+  /** Puts dots on the latest curve: full where said, hollow elsewhere. */
+  Strip dots(boolean[] full) {
+    int series = dataset.getSeriesCount() - 1;
+    Shape dot = new Ellipse2D.Double(-DOT / 2, -DOT / 2, DOT, DOT);
+    XYLineAndShapeRenderer dotted =
+        new XYLineAndShapeRenderer(true, true) {
+          @Override
+          public boolean getItemShapeFilled(int row, int column) {
+            return row != series || full[column];
+          }
+        };
+    dotted.setSeriesPaint(series, renderer.getSeriesPaint(series));
+    dotted.setSeriesStroke(series, new BasicStroke(1.2f));
+    dotted.setSeriesShape(series, dot);
+    dotted.setDefaultToolTipGenerator((data, row, item) -> says(row, item));
+    plot.setRenderer(dotted);
+    return this;
+  }
+
+  /** A line across at a value. */
+  Strip level(double value, Color colour) {
+    return mark(new ValueMarker(value), colour, false);
+  }
+
+  /** A line from bottom to top at a place. */
+  Strip place(double place, Color colour) {
+    return mark(new ValueMarker(place), colour, true);
+  }
+
+  private Strip mark(ValueMarker marker, Color colour, boolean isPlace) {
+    marker.setPaint(colour);
+    marker.setStroke(PlotTheme.dashed(1f, 4f, 3f));
+    return add(marker, isPlace);
+  }
+
+  /** A shade over all values between two. */
+  Strip shadeValues(Span values, Color colour) {
+    return shade(values, colour, false);
+  }
+
+  /** A shade over all places between two. */
+  Strip shadePlaces(Span places, Color colour) {
+    return shade(places, colour, true);
+  }
+
+  private Strip shade(Span span, Color colour, boolean isPlace) {
+    IntervalMarker marker = new IntervalMarker(span.lower(), span.upper());
+    marker.setPaint(colour);
+    marker.setAlpha(0.1f);
+    return add(marker, isPlace);
+  }
+
+  private Strip add(Marker marker, boolean isPlace) {
+    if (isPlace) {
+      plot.addDomainMarker(marker, Layer.BACKGROUND);
+    } else {
+      plot.addRangeMarker(marker, Layer.BACKGROUND);
+    }
+    return this;
+  }
+
+  /** A solid line from one value to another at a place: how much is left between them. */
+  Strip distance(double place, double from, double to, Color colour) {
+    plot.addAnnotation(new XYLineAnnotation(place, from, place, to, new BasicStroke(3f), colour));
+    return this;
+  }
+
+  /** Words, after those that are there already. */
+  Strip label(PlotLabel label) {
+    labels.add(label);
+    return this;
+  }
+
+  /** Words before all others, since they matter most. */
+  Strip labelFirst(PlotLabel label) {
+    labels.add(0, label);
+    return this;
+  }
+
+  /** The finished strip. */
+  XYPlot plot() {
+    plot.addAnnotation(new LabelLayer(labels, theme.small(), theme.background()));
+    return plot;
+  }
+
+  private String says(int series, int item) {
+    Point2D point =
+        new Point2D.Double(dataset.getXValue(series, item), dataset.getYValue(series, item));
+    return dataset.getSeriesKey(series)
+        + " "
+        + EngineeringFormat.format(point.getY(), unit)
+        + " at "
+        + EngineeringFormat.format(point.getX(), along);
+  }
+}

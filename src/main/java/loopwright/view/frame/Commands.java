@@ -1,0 +1,102 @@
+package loopwright.view.frame;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import loopwright.design.DesignException;
+import loopwright.design.Problem;
+import loopwright.file.FileException;
+import loopwright.session.Session;
+import loopwright.session.Snapshot;
+
+/** What a person can have the window do with the design as a whole. */
+final class Commands {
+  private final Session session;
+  private final Dialogs dialogs;
+  private final Runnable commitTyping;
+
+  /**
+   * @param session the open design
+   * @param dialogs asks in between
+   * @param commitTyping makes a value that is being typed count
+   */
+  Commands(Session session, Dialogs dialogs, Runnable commitTyping) {
+    this.session = session;
+    this.dialogs = dialogs;
+    this.commitTyping = commitTyping;
+  }
+
+  /** Asks for a design and opens it. */
+  void open() {
+    commitTyping.run();
+    if (mayLeave()) {
+      dialogs.fileToOpen(session.snapshot().path()).ifPresent(this::open);
+    }
+  }
+
+  private void open(Path file) {
+    attempt("Cannot open the design", () -> session.open(file));
+  }
+
+  /** Saves where the design came from, or asks where. Whether it was saved. */
+  boolean save() {
+    commitTyping.run();
+    Optional<Path> path = session.snapshot().path();
+    return path.isPresent() ? save(path.get()) : saveAs();
+  }
+
+  /** Asks where to save. Whether it was saved. */
+  boolean saveAs() {
+    commitTyping.run();
+    Snapshot now = session.snapshot();
+    return dialogs.fileToSave(now.path(), now.design().name()).filter(this::save).isPresent();
+  }
+
+  private boolean save(Path file) {
+    return attempt("Cannot save the design", () -> session.save(file));
+  }
+
+  /** Takes the last edit back. */
+  void undo() {
+    commitTyping.run();
+    session.undo();
+  }
+
+  /** Makes the edit again that was taken back last. */
+  void redo() {
+    commitTyping.run();
+    session.redo();
+  }
+
+  /** Whether the present design may be left: it is saved, or its edits are not wanted. */
+  boolean mayLeave() {
+    Snapshot now = session.snapshot();
+    boolean nothingDone = now.path().isEmpty() && now.undoable().isEmpty();
+    if (!now.unsaved() || nothingDone) {
+      return true;
+    }
+    return switch (dialogs.unsaved(now.design().name())) {
+      case SAVE -> save();
+      case DISCARD -> true;
+      case CANCEL -> false;
+    };
+  }
+
+  /** Says what the program is. */
+  void about() {
+    dialogs.about();
+  }
+
+  private boolean attempt(String what, Runnable work) {
+    try {
+      work.run();
+      return true;
+    } catch (DesignException e) {
+      dialogs.complain(
+          what, e.problems().stream().map(Problem::message).collect(Collectors.joining("\n")));
+    } catch (FileException e) {
+      dialogs.complain(what, e.getMessage());
+    }
+    return false;
+  }
+}

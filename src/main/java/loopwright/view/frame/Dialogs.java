@@ -1,0 +1,39 @@
+package loopwright.view.frame;
+
+import java.nio.file.Path;
+import java.util.Optional;
+
+/** What the window asks a person in between. */
+public interface Dialogs {
+  /** What to do with unsaved edits. */
+  enum Answer {
+    SAVE,
+    DISCARD,
+    CANCEL
+  }
+
+  /** Asks for a design file to open; empty when none is wanted. */
+  Optional<Path> fileToOpen(Optional<Path> present);
+
+  /**
+   * Asks where to save, and whether a file that is there may be replaced; empty when nowhere.
+   *
+   * @param present where the design was saved before
+   * @param name what the design is called
+   */
+  Optional<Path> fileToSave(Optional<Path> present, String name);
+
+  /** Asks what to do with the unsaved edits of a design. */
+  Answer unsaved(String name);
+
+  /**
+   * Says what went wrong.
+   *
+   * @param what what could not be done
+   * @param why a sentence
+   */
+  void complain(String what, String why);
+
+  /** Says what the program is, and what it is not. */
+  void about();
+}

@@ -1,0 +1,96 @@
+package loopwright.view.frame;
+
+import java.awt.Dimension;
+import java.awt.GraphicsEnvironment;
+import java.awt.Rectangle;
+import java.awt.event.WindowAdapter;
+import java.awt.event.WindowEvent;
+import javax.swing.JFrame;
+import javax.swing.WindowConstants;
+import loopwright.part.Shelf;
+import loopwright.session.Session;
+import loopwright.session.Snapshot;
+import loopwright.view.theme.Theme;
+
+/** The main window. All of it belongs to the event thread. */
+public final class MainWindow {
+  private static final Dimension USUAL = new Dimension(1440, 900);
+  private static final Dimension LEAST = new Dimension(1024, 700);
+
+  private final JFrame frame = new JFrame();
+  private final Session session;
+  private final Commands commands;
+  private final MainMenu menu;
+
+  /**
+   * A window on a session, with its usual dialogs.
+   *
+   * @param session the open design; closed when the window is
+   * @param shelf parts to choose from beside those of the design
+   * @param theme applied before anything is made
+   */
+  public MainWindow(Session session, Shelf shelf, Theme theme) {
+    this(session, shelf, theme, null);
+  }
+
+  /**
+   * A window on a session.
+   *
+   * @param dialogs asks in between; null for the usual ones
+   */
+  MainWindow(Session session, Shelf shelf, Theme theme, Dialogs dialogs) {
+    theme.apply();
+    this.session = session;
+    Workbench workbench = new Workbench(session, shelf);
+    commands =
+        new Commands(
+            session, dialogs == null ? new SwingDialogs(frame) : dialogs, workbench::commitTyping);
+    menu = new MainMenu(commands, theme, Theme::apply, session::choose, this::quit);
+    frame.setName("window");
+    frame.setJMenuBar(menu);
+    frame.setContentPane(workbench);
+    frame.setMinimumSize(LEAST);
+    frame.setSize(USUAL.width, USUAL.height);
+    frame.setDefaultCloseOperation(WindowConstants.DO_NOTHING_ON_CLOSE);
+    frame.addWindowListener(
+        new WindowAdapter() {
+          @Override
+          public void windowClosing(WindowEvent event) {
+            quit();
+          }
+        });
+    show(session.snapshot());
+    session.onChange(this::show);
+  }
+
+  /** Puts the window on the screen, as large as there is room. */
+  public void open() {
+    Rectangle room = GraphicsEnvironment.getLocalGraphicsEnvironment().getMaximumWindowBounds();
+    frame.setSize(Math.min(USUAL.width, room.width), Math.min(USUAL.height, room.height));
+    frame.setLocationRelativeTo(null);
+    frame.setVisible(true);
+  }
+
+  /** The window itself. */
+  JFrame frame() {
+    return frame;
+  }
+
+  private void show(Snapshot snapshot) {
+    frame.setTitle(title(snapshot));
+    menu.show(snapshot);
+  }
+
+  /** The design's name, an asterisk where it is not saved, and the file it is in. */
+  static String title(Snapshot snapshot) {
+    String file = snapshot.path().map(path -> " – " + path.getFileName()).orElse("");
+    return (snapshot.unsaved() ? "*" : "") + snapshot.design().name() + file + " – Loopwright";
+  }
+
+  private void quit() {
+    if (commands.mayLeave()) {
+      session.close();
+      frame.dispose();
+    }
+  }
+}

@@ -1,0 +1,69 @@
+package loopwright.view.path;
+
+import java.util.List;
+import loopwright.design.Feedback;
+import loopwright.design.ReturnNode;
+import loopwright.design.TakenFrom;
+import loopwright.view.path.SignalPath.Route;
+import loopwright.view.path.SignalPath.Way;
+
+/** The way back in words. */
+final class FeedbackWords {
+  private FeedbackWords() {}
+
+  static Block block(Feedback feedback) {
+    return new Block(
+        BlockIds.FEEDBACK, Block.Kind.FEEDBACK, "Feedback", List.of(says(feedback)), "");
+  }
+
+  static Route route(Feedback feedback) {
+    if (feedback instanceof Feedback.NonInverting divider) {
+      return new Route(Way.NON_INVERTING, divider.from() == TakenFrom.LOAD);
+    }
+    return feedback instanceof Feedback.Inverting inverting
+        ? new Route(Way.INVERTING, inverting.from() == TakenFrom.LOAD)
+        : new Route(Way.OPEN, false);
+  }
+
+  private static String says(Feedback feedback) {
+    if (feedback instanceof Feedback.NonInverting divider) {
+      return divider(divider);
+    }
+    if (feedback instanceof Feedback.Inverting inverting) {
+      double ratio = inverting.upper().effective() / inverting.inputResistor().effective();
+      return PartWords.ohms(inverting.upper())
+          + " against "
+          + PartWords.ohms(inverting.inputResistor())
+          + ": ideally \u00D7 "
+          + PartWords.ratio(-ratio)
+          + inverting.leadCapacitance().map(c -> ", " + PartWords.farads(c) + " across").orElse("")
+          + midRail(inverting.returnTo());
+    }
+    return "open: nothing comes back";
+  }
+
+  private static String divider(Feedback.NonInverting divider) {
+    double upper = divider.upper().effective();
+    String whole = "all of " + (divider.from() == TakenFrom.LOAD ? "load" : "out") + " comes back";
+    if (divider.lower().isEmpty()) {
+      return (upper == 0 ? "wire" : PartWords.ohms(divider.upper())) + ": " + whole;
+    }
+    double lower = divider.lower().get().effective();
+    String parts =
+        (upper == 0 ? "wire" : PartWords.ohms(divider.upper()))
+            + " over "
+            + PartWords.ohms(divider.lower().get())
+            + divider.lowerCapacitance().map(c -> " and " + PartWords.farads(c)).orElse("");
+    String share = upper == 0 ? whole : "1/" + PartWords.ratio(1 + upper / lower) + " comes back";
+    return parts
+        + ": "
+        + share
+        + (divider.lowerCapacitance().isPresent() && upper > 0 ? ", all at dc" : "")
+        + divider.leadCapacitance().map(c -> ", " + PartWords.farads(c) + " across").orElse("")
+        + midRail(divider.returnTo());
+  }
+
+  private static String midRail(ReturnNode node) {
+    return node == ReturnNode.MID_RAIL ? ", to mid-rail" : "";
+  }
+}

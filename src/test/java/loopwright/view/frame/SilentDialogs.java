@@ -1,0 +1,41 @@
+package loopwright.view.frame;
+
+import java.nio.file.Path;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.List;
+import java.util.Optional;
+
+/** Answers as the test has said, and keeps what it was told. */
+final class SilentDialogs implements Dialogs {
+  final Deque<Path> files = new ArrayDeque<>();
+  final Deque<Answer> answers = new ArrayDeque<>();
+  final List<String> said = new ArrayList<>();
+
+  @Override
+  public Optional<Path> fileToOpen(Optional<Path> present) {
+    return Optional.ofNullable(files.poll());
+  }
+
+  @Override
+  public Optional<Path> fileToSave(Optional<Path> present, String name) {
+    return Optional.ofNullable(files.poll());
+  }
+
+  @Override
+  public Answer unsaved(String name) {
+    said.add("unsaved " + name);
+    return answers.remove();
+  }
+
+  @Override
+  public void complain(String what, String why) {
+    said.add(what + ": " + why);
+  }
+
+  @Override
+  public void about() {
+    said.add(About.TEXT);
+  }
+}

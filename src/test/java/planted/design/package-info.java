@@ -1,0 +1,2 @@
+/** Planted for the architecture test. */
+package planted.design;

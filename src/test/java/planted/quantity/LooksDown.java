@@ -1,0 +1,6 @@
+package planted.quantity;
+
+import planted.solve.OtherHalf;
+
+/** Breaks the order: a quantity that knows a solution. */
+record LooksDown(OtherHalf solution) {}

@@ -1,0 +1,6 @@
+package planted.solve;
+
+import planted.circuit.HalfOfACycle;
+
+/** Needs what needs it. */
+public record OtherHalf(HalfOfACycle other) {}

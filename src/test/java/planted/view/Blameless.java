@@ -1,0 +1,7 @@
+package planted.view;
+
+import java.awt.Color;
+import javax.swing.JPanel;
+
+/** Breaks nothing: the view may use windows and colours. */
+record Blameless(JPanel panel, Color colour) {}
