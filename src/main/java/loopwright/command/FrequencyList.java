@@ -7,15 +7,21 @@ import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.TypeConversionException;
 
 /** Reads frequencies as people write them, with commas between: {@code 20,1k,1 MHz}. */
-final class FrequencyList implements ITypeConverter<double[]> {
+final class FrequencyList implements ITypeConverter<FrequencyList.Wanted> {
+  /**
+   * Frequencies in Hz. A type of its own, since the library takes an array for an option that is
+   * given many times.
+   */
+  record Wanted(double[] hertz) {}
+
   @Override
-  public double[] convert(String text) {
+  public Wanted convert(String text) {
     String[] words = text.split(",", -1);
     double[] frequencies = new double[words.length];
     for (int i = 0; i < words.length; i++) {
       frequencies[i] = frequency(words[i].trim());
     }
-    return frequencies;
+    return new Wanted(frequencies);
   }
 
   private static double frequency(String word) {

@@ -25,7 +25,7 @@ import picocli.CommandLine.Spec;
 final class PredictCommand implements Callable<Integer> {
   static final String NAME = "predict";
 
-  private static final double[] OWN_GRID = {};
+  private static final FrequencyList.Wanted OWN_GRID = new FrequencyList.Wanted(new double[0]);
 
   private final CommandServices services;
   private final Console console;
@@ -46,7 +46,7 @@ final class PredictCommand implements Callable<Integer> {
       description =
           "Response and loop gain at these frequencies, such as 20,1k,2.5MHz; otherwise on a grid"
               + " of the program's own.")
-  private double[] frequencies = OWN_GRID;
+  private FrequencyList.Wanted frequencies = OWN_GRID;
 
   @Option(names = "--json", description = "Print JSON in SI units, for a script.")
   private boolean json;
@@ -68,14 +68,16 @@ final class PredictCommand implements Callable<Integer> {
   public Integer call() {
     Design design = new DesignArgument(file).read(services.designs(), console.in());
     Prediction prediction =
-        services.predictions().predict(design, wantedHookups(design), frequencies, Progress.none());
+        services
+            .predictions()
+            .predict(design, wantedHookups(design), frequencies.hertz(), Progress.none());
     List<Finding> findings = services.findings().apply(prediction);
     console
         .out()
         .print(
             json
                 ? PredictionJson.write(prediction, findings)
-                : PredictionText.of(prediction, findings, frequencies.length > 0));
+                : PredictionText.of(prediction, findings, frequencies.hertz().length > 0));
     return ExitStatus.DONE;
   }
 
