@@ -2,6 +2,7 @@ package loopwright.view.frame;
 
 import java.awt.BorderLayout;
 import java.awt.KeyboardFocusManager;
+import java.util.List;
 import java.util.Optional;
 import javax.swing.BorderFactory;
 import javax.swing.JComponent;
@@ -82,6 +83,7 @@ final class Workbench extends JPanel {
         snapshot.design(),
         snapshot.chosen(),
         snapshot.current() ? snapshot.prediction() : Optional.empty());
+    path.mark(snapshot.current() ? snapshot.findings() : List.of());
     form.show(snapshot);
     Optional<HookupPrediction> prediction =
         snapshot.unsolved().isPresent() ? Optional.empty() : snapshot.prediction();

@@ -9,6 +9,7 @@ import java.util.stream.Collectors;
 import javax.imageio.ImageIO;
 import loopwright.check.Findings;
 import loopwright.file.DesignFile;
+import loopwright.file.ShelfFile;
 import loopwright.part.Shelf;
 import loopwright.predict.Catalogue;
 import loopwright.predict.Figure;
@@ -54,7 +55,7 @@ public final class Screenshots {
 
   private static BufferedImage picture(Theme theme, Path file, int width, int height) {
     theme.apply();
-    Shelf shelf = Shelf.empty();
+    Shelf shelf = new ShelfFile().shipped();
     DesignFile files =
         new DesignFile(
             shelf,
