@@ -82,6 +82,11 @@ final class Commands {
     };
   }
 
+  /** Shows the part records of the design. */
+  void parts() {
+    dialogs.parts(session.snapshot().design());
+  }
+
   /** Says what the program is. */
   void about() {
     dialogs.about();

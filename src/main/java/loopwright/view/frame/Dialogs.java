@@ -2,6 +2,7 @@ package loopwright.view.frame;
 
 import java.nio.file.Path;
 import java.util.Optional;
+import loopwright.design.Design;
 
 /** What the window asks a person in between. */
 public interface Dialogs {
@@ -36,4 +37,7 @@ public interface Dialogs {
 
   /** Says what the program is, and what it is not. */
   void about();
+
+  /** Shows the part records of a design, printed figures beside what the models return. */
+  void parts(Design design);
 }

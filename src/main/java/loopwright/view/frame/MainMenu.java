@@ -44,7 +44,7 @@ final class MainMenu extends JMenuBar {
     redo = item("Redo", "edit.redo", 'R', controlShift(KeyEvent.VK_Z), commands::redo);
     add(fileMenu(commands, quit));
     add(menu("Edit", 'E', undo, redo));
-    add(viewMenu(theme, chooseTheme));
+    add(viewMenu(commands, theme, chooseTheme));
     add(menu("Help", 'H', item("About Loopwright", "help.about", 'A', null, commands::about)));
   }
 
@@ -61,7 +61,7 @@ final class MainMenu extends JMenuBar {
     return file;
   }
 
-  private JMenu viewMenu(Theme present, Consumer<Theme> chooseTheme) {
+  private JMenu viewMenu(Commands commands, Theme present, Consumer<Theme> chooseTheme) {
     JMenu view = menu("View", 'V');
     ButtonGroup group = new ButtonGroup();
     for (Theme theme : Theme.values()) {
@@ -76,6 +76,7 @@ final class MainMenu extends JMenuBar {
     hookups.setMnemonic('H');
     hookups.setName("view.hookup");
     view.add(hookups);
+    view.add(item("Parts: printed and modelled…", "view.parts", 'P', null, commands::parts));
     return view;
   }
 

@@ -8,6 +8,7 @@ import javax.swing.JFileChooser;
 import javax.swing.JOptionPane;
 import javax.swing.JTextArea;
 import javax.swing.filechooser.FileNameExtensionFilter;
+import loopwright.design.Design;
 import loopwright.view.theme.Theme;
 
 /** Asks in dialogs before the window. */
@@ -103,6 +104,12 @@ final class SwingDialogs implements Dialogs {
   public void about() {
     JOptionPane.showMessageDialog(
         window, wrapped(About.TEXT), "About Loopwright", JOptionPane.PLAIN_MESSAGE);
+  }
+
+  @Override
+  public void parts(Design design) {
+    JOptionPane.showMessageDialog(
+        window, new PartsPanel(design), "Parts of " + design.name(), JOptionPane.PLAIN_MESSAGE);
   }
 
   private static JTextArea wrapped(String text) {

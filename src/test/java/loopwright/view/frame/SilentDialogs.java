@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
+import loopwright.design.Design;
 
 /** Answers as the test has said, and keeps what it was told. */
 final class SilentDialogs implements Dialogs {
@@ -37,5 +38,10 @@ final class SilentDialogs implements Dialogs {
   @Override
   public void about() {
     said.add(About.TEXT);
+  }
+
+  @Override
+  public void parts(Design design) {
+    said.add("parts of " + design.name());
   }
 }
