@@ -42,13 +42,16 @@ public final class Predictor {
             .filter(hookup -> hookups.isEmpty() || hookups.contains(hookup.name()))
             .toList();
     double[] grid = frequencies.length == 0 ? grid() : frequencies;
-    DeviceModels models = new DeviceModels(design);
-    List<HookupPrediction> predictions = new ArrayList<>();
-    for (Hookup hookup : chosen) {
-      progress.check();
-      progress.report((double) predictions.size() / chosen.size(), hookup.name());
-      predictions.add(predict(new HookupSolution(design, hookup, models), grid, progress));
-    }
+    // Hookups share nothing, so that each may have a core of its own.
+    List<HookupPrediction> predictions =
+        chosen.parallelStream()
+            .map(
+                hookup -> {
+                  progress.check();
+                  DeviceModels models = new DeviceModels(design);
+                  return predict(new HookupSolution(design, hookup, models), grid, progress);
+                })
+            .toList();
     return new Prediction(design, predictions);
   }
 

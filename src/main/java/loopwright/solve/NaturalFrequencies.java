@@ -27,6 +27,13 @@ public final class NaturalFrequencies {
   private static final double GROWS = 1e-9;
 
   private static final double SHIFT = 1.0e8;
+
+  /** The root of the rounding of an eigenvalue, as a share of the shift's size. */
+  private static final double SPLIT = 1e-7;
+
+  /** And such a pair is all but real. */
+  private static final double SPLIT_SHARE = 1e-3;
+
   private static final int REFINEMENTS = 14;
 
   /** First rounds keep the shift, until the vector has turned to the root's own. */
@@ -91,11 +98,24 @@ public final class NaturalFrequencies {
         continue;
       }
       Pole pole = new Pole(SHIFT - re / square, im / square);
-      if (pole.im() >= 0 && pole.magnitude() <= INFINITE) {
+      if (isSplitByRounding(pole)) {
+        keep(network, new Pole(pole.re(), 0), poles);
+      } else if (pole.im() >= 0 && pole.magnitude() <= INFINITE) {
         keep(network, pole, poles);
       }
     }
     return poles;
+  }
+
+  /**
+   * Whether a pair is a double real root that rounding has pushed off the axis: two rails with
+   * equal decoupling have one.
+   */
+  private static boolean isSplitByRounding(Pole pole) {
+    double off = Math.abs(pole.im());
+    return off > 0
+        && off < SPLIT * (pole.magnitude() + SHIFT)
+        && off < SPLIT_SHARE * Math.abs(pole.re());
   }
 
   /**

@@ -9,6 +9,8 @@ import javax.swing.JPanel;
 import javax.swing.JScrollPane;
 import javax.swing.JTable;
 import javax.swing.JTextArea;
+import javax.swing.SwingConstants;
+import javax.swing.table.DefaultTableCellRenderer;
 import javax.swing.table.DefaultTableModel;
 import loopwright.characterise.DiodeFit;
 import loopwright.characterise.FigureComparison;
@@ -56,6 +58,10 @@ final class PartsPanel extends JPanel {
     label.setLabelFor(parts);
     JTable table = new JTable(rows);
     table.setName("comparison");
+    DefaultTableCellRenderer right = new DefaultTableCellRenderer();
+    right.setHorizontalAlignment(SwingConstants.RIGHT);
+    table.getColumnModel().getColumn(2).setCellRenderer(right);
+    table.getColumnModel().getColumn(3).setCellRenderer(right);
     table.getAccessibleContext().setAccessibleName("Printed figures and what the model returns");
     notes.setName("notes");
     notes.setEditable(false);
@@ -65,7 +71,7 @@ final class PartsPanel extends JPanel {
     add(label);
     add(parts, "w 220!");
     add(new JScrollPane(table), "span 2, grow");
-    add(new JScrollPane(notes), "span 2, growx");
+    add(new JScrollPane(notes), "span 2, growx, h 120!");
     parts.addActionListener(event -> show((String) parts.getSelectedItem()));
     show((String) parts.getSelectedItem());
   }
