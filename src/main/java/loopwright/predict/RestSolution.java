@@ -23,8 +23,13 @@ import loopwright.solve.OperatingPointSolver;
  */
 record RestSolution(
     AssembledHookup hookup, CircuitState state, String remark, Map<String, Double> kelvins) {
-  private static final int MOST_ROUNDS = 200;
+  private static final int MOST_ROUNDS = 300;
   private static final double SETTLED = 1e-8;
+
+  /** A round that leaves more than this share of the change before it makes little progress. */
+  private static final double LITTLE_PROGRESS = 0.95;
+
+  private static final double LEAST_WEIGHT = 0.05;
   private static final double HOTTEST = 1000;
 
   /**
@@ -41,11 +46,20 @@ record RestSolution(
       return solver.at(Map.of(), near);
     }
     RestSolution solution = solver.at(near.map(RestSolution::kelvins).orElse(Map.of()), near);
+    double weight = 1;
+    double before = Double.POSITIVE_INFINITY;
     for (int round = 0; round < MOST_ROUNDS; round++) {
       Map<String, Double> next = solution.heated(heat);
-      if (change(solution.kelvins(), next) < SETTLED) {
+      double change = change(solution.kelvins(), next);
+      if (change < SETTLED) {
         return solution;
       }
+      if (change > LITTLE_PROGRESS * before) {
+        // Temperatures that swing to and fro settle when each round goes only part of the way.
+        weight = Math.max(LEAST_WEIGHT, weight / 2);
+      }
+      before = change;
+      next = between(solution.kelvins(), next, weight);
       next.forEach(
           (role, kelvin) -> {
             if (!(kelvin < HOTTEST)) {
@@ -79,6 +93,17 @@ record RestSolution(
     Map<String, Double> powers = new HashMap<>();
     readout.read(state, Map.of()).forEach((role, device) -> powers.put(role, device.power()));
     return heat.kelvins(powers, readout.thermalResistances());
+  }
+
+  private static Map<String, Double> between(
+      Map<String, Double> from, Map<String, Double> to, double weight) {
+    Map<String, Double> between = new HashMap<>();
+    to.forEach(
+        (role, kelvin) -> {
+          double start = from.getOrDefault(role, kelvin);
+          between.put(role, start + weight * (kelvin - start));
+        });
+    return between;
   }
 
   private static double change(Map<String, Double> before, Map<String, Double> after) {
