@@ -123,16 +123,19 @@ final class GainFigures {
         "",
         CostClass.LINEAR,
         solution -> {
-          String remark = solution.levels().remark();
-          if (where.equals("at rest") && solution.assembled().isOpen()) {
-            remark =
-                "taken with the generator at "
-                    + Text.volts(solution.levels().linearRest().generator())
-                    + ", where the output is at its reference";
-          }
+          String remark =
+              where.equals("at rest") ? restRemark(solution) : solution.levels().remark();
           return FigureValue.of(mean(network.apply(solution)), remark);
         },
         NoFormula.ROAD);
+  }
+
+  private static String restRemark(HookupSolution solution) {
+    return solution.assembled().isOpen()
+        ? "taken with the generator at "
+            + Text.volts(solution.linearRest().generator())
+            + ", where the output is at its reference"
+        : "";
   }
 
   private static FigureValue ideal(OptionalDouble gain) {

@@ -22,6 +22,7 @@ final class HookupSolution {
   private final Hookup hookup;
   private final HookupGains gains;
   private final Lazy<RestSolution> rest;
+  private final Lazy<CircuitState> linearRest;
   private final Lazy<Levels> levels;
   private final Lazy<MidbandNetwork> midbandHigh;
   private final Lazy<MidbandNetwork> midbandLow;
@@ -48,10 +49,11 @@ final class HookupSolution {
     this.hookup = hookup;
     this.gains = new HookupGains(hookup);
     this.rest = new Lazy<>(() -> RestSolution.of(design, hookup, models, near));
-    this.levels = new Lazy<>(() -> Levels.find(assembled(), gains, rest.get().state()));
+    this.linearRest = new Lazy<>(() -> Levels.linearRest(assembled(), gains, heldRest()));
+    this.levels = new Lazy<>(() -> Levels.find(assembled(), gains, heldRest()));
     this.midbandHigh = new Lazy<>(() -> midband(levels().high()));
     this.midbandLow = new Lazy<>(() -> midband(levels().low()));
-    this.midbandRest = new Lazy<>(() -> midband(levels().linearRest()));
+    this.midbandRest = new Lazy<>(() -> midband(linearRest()));
     this.waveform = new Lazy<>(() -> new StaticWaveform(assembled(), heldRest()));
     this.network = new Lazy<>(this::networkAtRest);
     this.poles = new Lazy<>(() -> new NaturalFrequencies(network.get()).of(network.get()));
@@ -92,6 +94,16 @@ final class HookupSolution {
   /** Devices at rest by role. */
   Map<String, DeviceState> devices() {
     return devices.get();
+  }
+
+  /** What an ideal amplifier would put at the output at rest, V. */
+  double reference() {
+    return Levels.reference(assembled(), gains, rest.get().state());
+  }
+
+  /** Where linear figures at rest are taken, blocking capacitors held. */
+  CircuitState linearRest() {
+    return linearRest.get();
   }
 
   Levels levels() {
@@ -182,7 +194,7 @@ final class HookupSolution {
 
   private LinearNetwork networkAtRest() {
     LinearNetwork linear = new LinearNetwork(assembled());
-    linear.linearise(assembled().isOpen() ? levels().linearRest() : rest.get().state());
+    linear.linearise(linearRest());
     return linear;
   }
 

@@ -18,8 +18,6 @@ import loopwright.solve.GeneratorWalk;
  * @param rest at rest, blocking capacitors held
  * @param high output at reference + P/2
  * @param low output at reference − P/2
- * @param linearRest where linear figures at rest are taken: at rest, or with an open hookup where
- *     the output is at the reference
  */
 record Levels(
     double reference,
@@ -27,8 +25,7 @@ record Levels(
     int halvings,
     CircuitState rest,
     CircuitState high,
-    CircuitState low,
-    CircuitState linearRest) {
+    CircuitState low) {
   private static final int MOST_HALVINGS = 40;
 
   /** P before any halving. */
@@ -38,25 +35,40 @@ record Levels(
     return ideal.isEmpty() || amplitude == 0 ? 1 : Math.abs(ideal.getAsDouble()) * amplitude;
   }
 
-  /** Finds the levels from the circuit at rest. */
-  static Levels find(AssembledHookup hookup, HookupGains gains, CircuitState rest) {
-    CircuitState held = rest.copy();
-    held.holdBlockingCapacitors();
-    double midRail = hookup.circuit().hasNode(Nodes.MID_RAIL) ? rest.voltage(Nodes.MID_RAIL) : 0;
-    double reference = gains.reference(midRail);
-    CircuitState linearRest = held;
-    if (hookup.isOpen()) {
-      linearRest = reach(hookup, gains, held, reference);
-      if (linearRest == null) {
-        throw new UnsolvedException("the generator cannot bring the output to its reference");
-      }
+  /** What an ideal amplifier would put at the output, V, for the circuit at rest. */
+  static double reference(AssembledHookup hookup, HookupGains gains, CircuitState rest) {
+    return gains.reference(
+        hookup.circuit().hasNode(Nodes.MID_RAIL) ? rest.voltage(Nodes.MID_RAIL) : 0);
+  }
+
+  /**
+   * Where linear figures at rest are taken: at rest, or with an open hookup where the output is at
+   * the reference.
+   *
+   * @param held at rest, blocking capacitors held
+   */
+  static CircuitState linearRest(AssembledHookup hookup, HookupGains gains, CircuitState held) {
+    CircuitState state =
+        hookup.isOpen() ? reach(hookup, gains, held, reference(hookup, gains, held)) : held;
+    if (state == null) {
+      throw new UnsolvedException("the generator cannot bring the output to its reference");
     }
+    return state;
+  }
+
+  /**
+   * Finds the levels from the circuit at rest.
+   *
+   * @param held at rest, blocking capacitors held
+   */
+  static Levels find(AssembledHookup hookup, HookupGains gains, CircuitState held) {
+    double reference = reference(hookup, gains, held);
     double peak = nominalPeak(hookup, gains);
     for (int halvings = 0; halvings <= MOST_HALVINGS; halvings++) {
       CircuitState high = reach(hookup, gains, held, reference + peak / 2);
       CircuitState low = high == null ? null : reach(hookup, gains, held, reference - peak / 2);
       if (low != null) {
-        return new Levels(reference, peak, halvings, held, high, low, linearRest);
+        return new Levels(reference, peak, halvings, held, high, low);
       }
       peak /= 2;
     }

@@ -77,8 +77,7 @@ final class OffsetFigures {
   }
 
   static double outputOffset(HookupSolution solution) {
-    return solution.rest().state().voltage(solution.assembled().out())
-        - solution.levels().reference();
+    return solution.rest().state().voltage(solution.assembled().out()) - solution.reference();
   }
 
   private static FigureValue drift(HookupSolution solution) {

@@ -49,7 +49,12 @@ final class WaveformFigures {
             "over the waveform",
             "deadZone/(1 + A/NG): the dead zone divided by 1 + loop gain",
             CostClass.WAVEFORM,
-            solution -> FigureValue.of(solution.waveform().residual(), lines(solution)),
+            solution -> {
+              Outcome<String> lines = Outcome.of(() -> lines(solution));
+              return FigureValue.of(
+                  solution.waveform().residual(),
+                  lines.isPresent() ? lines.value() : lines.reason());
+            },
             DeadZoneFormulas::crossoverError),
         new Figure(
             "thd",

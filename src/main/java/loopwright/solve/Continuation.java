@@ -7,6 +7,10 @@ import loopwright.circuit.CircuitState;
  * Follows the solution of a circuit continuously as a drive moves one way: tangent predictor,
  * Newton corrector, step length by the predictor's error.
  *
+ * <p>A stage that the loop leaves alone in its dead zone can have so much gain that no value of the
+ * drive is exact enough to hold its output anywhere: Newton's steps only waver. There the drive is
+ * let move with the unknowns, in the plane normal to the tangent, until the steep place is passed.
+ *
  * <p>A corrector that lands on another branch would give plausible wrong figures. Two things tell:
  * the predictor's error does not shrink with the step, and the determinant's sign, which changes at
  * a fold and nowhere else. Either ends the walk at the last point of the branch.
@@ -16,6 +20,15 @@ public final class Continuation {
 
   /** Shortest step, as a share of the drive's scale. */
   private static final double SHORTEST = 1e-11;
+
+  /** How far a node is predicted to move while the drive moves along, V: some thermal voltages. */
+  private static final double SLIDE = 0.06;
+
+  /** A slide that is refused is shortened so often. */
+  private static final int SHORTENINGS = 10;
+
+  /** A walk that slides further than this runs away. */
+  private static final int MOST_SLIDES = 2000;
 
   private final StaticSolver solver;
   private final CircuitState state;
@@ -28,6 +41,8 @@ public final class Continuation {
   private int sign;
   private double stride;
   private boolean ready;
+  private boolean wavered;
+  private int slides;
 
   /**
    * A walk that starts at a solved state.
@@ -104,11 +119,9 @@ public final class Continuation {
         adapt(error, Math.abs(length), last);
         return true;
       }
-      state.copyFrom(backup);
-      if (ready) {
-        // The factors and the tangent are those of the point that was refused.
-        ready = false;
-        prepare();
+      restore();
+      if (wavered && slides++ < MOST_SLIDES) {
+        return slide(target);
       }
       if (Math.abs(length) <= shortest) {
         return false;
@@ -117,20 +130,69 @@ public final class Continuation {
     }
   }
 
+  /** Goes back to the last point of the branch. */
+  private void restore() {
+    state.copyFrom(backup);
+    if (ready) {
+      // The factors and the tangent may be those of the point that was refused.
+      ready = false;
+      prepare();
+    }
+  }
+
+  /**
+   * Takes a step in which the drive moves with the unknowns.
+   *
+   * @return false when none is found, with the state where it was
+   */
+  private boolean slide(double target) {
+    double from = drive();
+    double length = Math.copySign(SLIDE / steepest(), target - from);
+    for (int i = 0; i < SHORTENINGS; i++) {
+      predict(from + length, length);
+      boolean solved = solver.solveInPlane(state, drive, tangent, CORRECTOR_STEPS);
+      boolean onward = (drive() - from) * length > 0 && (target - drive()) * length > 0;
+      if (solved && onward && judge() <= largestError) {
+        stride = Math.abs(length);
+        return true;
+      }
+      restore();
+      length /= 4;
+    }
+    return false;
+  }
+
+  /** Largest movement of a node per unit of the drive. */
+  private double steepest() {
+    double steepest = 0;
+    for (int node = 0; node < state.circuit().nodes(); node++) {
+      steepest = Math.max(steepest, Math.abs(tangent[node]));
+    }
+    return steepest;
+  }
+
   /** Predicts and corrects; the largest distance between the two, or infinite where that failed. */
   private double correct(double value, double length) {
+    predict(value, length);
+    boolean solved = solver.solve(state, CORRECTOR_STEPS);
+    wavered = !solved && solver.wavers();
+    return solved ? judge() : Double.POSITIVE_INFINITY;
+  }
+
+  private void predict(double value, double length) {
     double[] unknowns = state.unknowns();
     for (int i = 0; i < unknowns.length; i++) {
       unknowns[i] += tangent[i] * length;
     }
     System.arraycopy(unknowns, 0, predicted, 0, unknowns.length);
     drive.set(state, value);
-    if (!solver.solve(state, CORRECTOR_STEPS)) {
-      return Double.POSITIVE_INFINITY;
-    }
+  }
+
+  /** Distance of the solution from the prediction; infinite where it lies beyond a fold. */
+  private double judge() {
     double error = 0;
     for (int node = 0; node < state.circuit().nodes(); node++) {
-      error = Math.max(error, Math.abs(unknowns[node] - predicted[node]));
+      error = Math.max(error, Math.abs(state.unknowns()[node] - predicted[node]));
     }
     if (error > largestError) {
       return error;

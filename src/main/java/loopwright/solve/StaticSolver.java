@@ -21,12 +21,17 @@ public final class StaticSolver {
   private static final double LEAST_CURRENT = 1e-15;
   private static final double CONDUCTED = 1e-15;
 
+  /** Below this a step that does not converge is rounding, V. */
+  private static final double NEAR = 1e-6;
+
   /** A step longer than this is shortened: it comes from a matrix that is all but singular, V. */
   private static final double LONGEST_STEP = 1e4;
 
   private final Circuit circuit;
   private final RealSystem system;
   private final double[] step;
+  private final double[] byDrive;
+  private double lastStep;
   private long iterations;
 
   /** A solver for one circuit. */
@@ -34,6 +39,7 @@ public final class StaticSolver {
     this.circuit = circuit;
     this.system = circuit.systems().real();
     this.step = new double[circuit.unknowns()];
+    this.byDrive = new double[circuit.unknowns()];
   }
 
   /** The circuit. */
@@ -54,7 +60,7 @@ public final class StaticSolver {
    * @return whether it converged; if not, the unknowns are where it stopped
    */
   public boolean solve(CircuitState state, int most) {
-    double lastStep = Double.POSITIVE_INFINITY;
+    lastStep = Double.POSITIVE_INFINITY;
     for (int i = 0; i < most; i++) {
       state.evaluate();
       if (lastStep < STEP && !state.limited() && isBalanced(state)) {
@@ -76,6 +82,69 @@ public final class StaticSolver {
     }
     state.evaluate();
     return lastStep < STEP && !state.limited() && isBalanced(state);
+  }
+
+  /**
+   * Whether the last solve ended within rounding of a solution, though no step was short enough: a
+   * gain of many millions stands behind some node.
+   */
+  boolean wavers() {
+    return lastStep < NEAR;
+  }
+
+  /**
+   * Solves for unknowns and drive together, in the plane through the start that a direction is
+   * normal to (Keller 1977: pseudo-arclength continuation). Where a gain of many millions stands
+   * behind a node, its voltage is known better than the drive's, and only this is well posed.
+   *
+   * @param state start on entry, solution and stamps there on return
+   * @param drive what moves with the unknowns
+   * @param direction change of every unknown per unit of the drive; not modified
+   * @param most iterations at the most
+   * @return whether it converged; if not, the unknowns are where it stopped
+   */
+  boolean solveInPlane(CircuitState state, Drive drive, double[] direction, int most) {
+    double[] unknowns = state.unknowns();
+    double distance = 0;
+    lastStep = Double.POSITIVE_INFINITY;
+    for (int i = 0; i <= most; i++) {
+      state.evaluate();
+      if (lastStep < STEP && !state.limited() && isBalanced(state)) {
+        return true;
+      }
+      if (i == most || !factor(state)) {
+        return false;
+      }
+      iterations++;
+      double[] f = state.stamps().f;
+      Arrays.fill(byDrive, 0);
+      for (int row = 0; row < step.length; row++) {
+        step[row] = -f[row];
+      }
+      drive.excite(state, byDrive);
+      system.solve(step);
+      system.solve(byDrive);
+      double along = along(direction, byDrive);
+      double moved = -(distance + along(direction, step)) / (1 + along);
+      for (int k = 0; k < step.length; k++) {
+        step[k] += moved * byDrive[k];
+      }
+      lastStep = move(unknowns);
+      if (!(lastStep < LONGEST_STEP)) {
+        return false;
+      }
+      drive.set(state, drive.get(state) + moved);
+      distance += along(direction, step) + moved;
+    }
+    return false;
+  }
+
+  private double along(double[] direction, double[] vector) {
+    double sum = 0;
+    for (int node = 0; node < circuit.nodes(); node++) {
+      sum += direction[node] * vector[node];
+    }
+    return sum;
   }
 
   /** Factors G of the state's last evaluation; false when it is singular. */
