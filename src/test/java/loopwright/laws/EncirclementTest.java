@@ -20,7 +20,7 @@ import org.junit.jupiter.api.Test;
  * right half-plane (Nyquist, Bell System Technical Journal 11, 1932, 126–147, from memory).
  */
 class EncirclementTest {
-  private static final int DESIGNS = 50;
+  private static final int DESIGNS = 40;
 
   @Test
   void rootsAndEncirclementsAgree() {
