@@ -10,7 +10,7 @@ import java.util.function.UnaryOperator;
 final class BoundedLeastSquares {
   private static final int STEPS = 300;
   private static final double DIFFERENCE = 1e-6;
-  private static final double LEAST_STEP = 1e-14;
+  private static final double LEAST_STEP = 1e-13;
   private static final double LEAST_DAMPING = 1e-14;
   private static final double MOST_DAMPING = 1e12;
 
@@ -43,24 +43,21 @@ final class BoundedLeastSquares {
       double[] residual = residuals.apply(at);
       double[][] slopes = slopes(at);
       boolean moved = false;
-      while (!moved && damping < MOST_DAMPING) {
+      while (!moved) {
         double[] next = clamp(at, direction(at, residual, slopes, damping));
+        boolean settled = distance(at, next) < LEAST_STEP || damping > MOST_DAMPING;
         double nextCost = cost(next);
         if (nextCost < cost) {
-          boolean settled = distance(at, next) < LEAST_STEP;
           at = next;
           cost = nextCost;
           damping = Math.max(LEAST_DAMPING, damping * 0.1);
           moved = true;
-          if (settled) {
-            return at;
-          }
         } else {
           damping *= 10;
         }
-      }
-      if (!moved) {
-        return at;
+        if (settled) {
+          return at;
+        }
       }
     }
     return at;

@@ -21,6 +21,7 @@ final class TransistorBias {
   private static final double STRIDE = 0.05;
   private static final double TOLERANCE = 1e-15;
   private static final int ROUNDS = 500;
+  private static final int NEWTON_STEPS = 12;
 
   private final TransistorParameters parameters;
   private final TransistorEquations equations;
@@ -109,6 +110,35 @@ final class TransistorBias {
    * junctions, or at v_BC = 0 where that voltage is NaN; NaN where there is none.
    */
   private double rise(double collectorCurrent, double across) {
+    double near = followed(collectorCurrent, across);
+    return Double.isNaN(near) ? searched(collectorCurrent, across) : near;
+  }
+
+  /**
+   * By Newton steps on ln I_C, which is nearly straight, from where the ideal transistor would be;
+   * NaN where they do not settle.
+   */
+  private double followed(double collectorCurrent, double across) {
+    double voltage =
+        equations.thermalVoltage() * Math.log1p(collectorCurrent / equations.saturationCurrent());
+    for (int step = 0; step < NEWTON_STEPS; step++) {
+      double current = collector(voltage, across);
+      double slope =
+          equations.collectorByBaseEmitter()
+              + (Double.isNaN(across) ? 0 : equations.collectorByBaseCollector());
+      double change = Math.log(collectorCurrent / current) * current / slope;
+      if (!(slope > 0) || !(Math.abs(change) < STRIDE)) {
+        return Double.NaN;
+      }
+      voltage += change;
+      if (Math.abs(change) <= 2 * Math.ulp(voltage)) {
+        return voltage;
+      }
+    }
+    return Double.NaN;
+  }
+
+  private double searched(double collectorCurrent, double across) {
     double high = 0;
     double low;
     do {

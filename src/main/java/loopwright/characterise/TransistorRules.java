@@ -18,7 +18,7 @@ record TransistorRules(
     Optional<BetaFit> beta,
     Optional<PrintedFigure<TransistorParameters>> earlyVoltage,
     Optional<PrintedFigure<TransistorParameters>> transitTime) {
-  private static final double SETTLED = 1e-11;
+  private static final double SETTLED = 1e-10;
   private static final int ROUNDS = 200;
 
   /** Saturation currents of silicon transistors lie well inside these, A. */

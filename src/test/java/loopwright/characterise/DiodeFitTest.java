@@ -81,7 +81,7 @@ class DiodeFitTest {
     assertThat(fitted.saturationCurrent()).isCloseTo(saturation, within(1e-9 * saturation));
   }
 
-  /** t_rr = τ ln 2 where forward and reverse current are alike (Kingston 1954; from memory). */
+  /** t_rr = τ ln 2 by charge control with equal currents (common practice, no source). */
   @Test
   void theRecoveryTimeGivesTheTransitTime() {
     FittedDiode fitted =
