@@ -7,7 +7,12 @@ import loopwright.predict.Prediction;
 /** Everything that the checks find in a prediction. */
 public final class Findings {
   private static final List<Check> CHECKS =
-      List.of(new FailureCheck(), new StabilityCheck(), new RailsCheck(), new SolveNoteCheck());
+      List.of(
+          new FailureCheck(),
+          new StabilityCheck(),
+          new RailsCheck(),
+          new ReverseJunctionCheck(),
+          new SolveNoteCheck());
 
   private Findings() {}
 
