@@ -70,6 +70,14 @@ final class StageWiring {
               wiring.resistor("gainBase", p, buffer.emitterResistance().effective());
             });
     wiring.resistor("gainEmitter", p, gain.emitterResistance().effective());
+    gain.emitterBypass().ifPresent(bypass -> wiring.blocking("gainEmitter", p, bypass.effective()));
+    gain.compensation()
+        .ifPresent(
+            compensation -> {
+              String middle = "compensationMiddle";
+              wiring.capacitor("gainOut", middle, compensation.capacitance().effective());
+              wiring.resistor(middle, "pairOut", compensation.resistance().effective());
+            });
     wiring.transistor("gain.q1", "gainOut", base, "gainEmitter");
     source(gain.load(), "gainLoad", farDrive);
   }

@@ -13,6 +13,9 @@ final class Wiring {
   /** A resistor. */
   record Resistance(String from, String to, double ohms) {}
 
+  /** A capacitor; a blocking one counts as a short at signal frequency. */
+  record Capacitance(String from, String to, double farads, boolean blocking) {}
+
   /** A transistor by its role. */
   record TransistorAt(String role, String collector, String base, String emitter) {}
 
@@ -23,6 +26,7 @@ final class Wiring {
   record Current(String from, String to, double amperes) {}
 
   private final List<Resistance> resistances = new ArrayList<>();
+  private final List<Capacitance> capacitances = new ArrayList<>();
   private final List<TransistorAt> transistors = new ArrayList<>();
   private final List<DiodeAt> diodes = new ArrayList<>();
   private final List<Current> currents = new ArrayList<>();
@@ -30,6 +34,10 @@ final class Wiring {
 
   List<Resistance> resistances() {
     return resistances;
+  }
+
+  List<Capacitance> capacitances() {
+    return capacitances;
   }
 
   List<TransistorAt> transistors() {
@@ -51,6 +59,14 @@ final class Wiring {
     } else {
       resistances.add(new Resistance(from, to, ohms));
     }
+  }
+
+  void capacitor(String from, String to, double farads) {
+    capacitances.add(new Capacitance(from, to, farads, false));
+  }
+
+  void blocking(String from, String to, double farads) {
+    capacitances.add(new Capacitance(from, to, farads, true));
   }
 
   void transistor(String role, String collector, String base, String emitter) {
