@@ -1,8 +1,11 @@
 package loopwright.predict;
 
+import java.util.List;
 import java.util.OptionalDouble;
+import java.util.stream.DoubleStream;
 import loopwright.numeric.RootSearch;
 import loopwright.solve.LinearNetwork;
+import loopwright.solve.NaturalFrequencies.Pole;
 
 /**
  * The closed loop against frequency at rest.
@@ -21,18 +24,35 @@ record ClosedLoop(OptionalDouble bandwidth, OptionalDouble lowCorner, double pea
   /**
    * Searches a network.
    *
+   * @param poles natural frequencies, where a resonance could stand between points of a grid
    * @param midband gain at signal frequency that levels are related to
    * @param start a frequency within the band, Hz
    */
-  static ClosedLoop of(LinearNetwork network, double midband, double start) {
+  static ClosedLoop of(LinearNetwork network, List<Pole> poles, double midband, double start) {
     Level level =
         frequency -> {
           double[] value = network.response(frequency);
           return 20 * Math.log10(Math.hypot(value[0], value[1]) / Math.abs(midband));
         };
     double within = withinBand(level, start);
-    return new ClosedLoop(
-        fall(level, within, RATIO), fall(level, within, 1 / RATIO), peaking(level, within));
+    double[] up = grid(within, HIGHEST, poles).toArray();
+    double[] down = grid(LOWEST, within, poles).map(f -> -f).sorted().map(f -> -f).toArray();
+    return new ClosedLoop(fall(level, up), fall(level, down), peaking(level, up));
+  }
+
+  /** Frequencies from one to another, Hz, ascending, with every resonance and its flanks. */
+  private static DoubleStream grid(double from, double to, List<Pole> poles) {
+    DoubleStream regular = DoubleStream.iterate(from, f -> f < to, f -> f * RATIO);
+    DoubleStream resonances =
+        poles.stream()
+            .filter(pole -> pole.im() > Math.abs(pole.re()))
+            .flatMapToDouble(
+                pole -> DoubleStream.of(-1, 0, 1).map(k -> pole.im() + k * Math.abs(pole.re())))
+            .map(omega -> omega / (2 * Math.PI))
+            .filter(f -> f > from && f < to);
+    return DoubleStream.concat(DoubleStream.concat(regular, DoubleStream.of(to)), resonances)
+        .sorted()
+        .distinct();
   }
 
   /** Level against the midband gain in dB at a frequency in Hz. */
@@ -51,33 +71,32 @@ record ClosedLoop(OptionalDouble bandwidth, OptionalDouble lowCorner, double pea
     return frequency;
   }
 
-  private static OptionalDouble fall(Level level, double within, double ratio) {
-    double before = within;
-    double frequency = within * ratio;
-    while (frequency > LOWEST && frequency < HIGHEST) {
-      if (level.at(frequency) < FALL) {
+  private static OptionalDouble fall(Level level, double[] frequencies) {
+    for (int i = 1; i < frequencies.length; i++) {
+      if (level.at(frequencies[i]) < FALL) {
         double root =
             RootSearch.find(
-                x -> level.at(Math.exp(x)) - FALL, Math.log(before), Math.log(frequency), 1e-10);
+                x -> level.at(Math.exp(x)) - FALL,
+                Math.log(frequencies[i - 1]),
+                Math.log(frequencies[i]),
+                1e-10);
         return OptionalDouble.of(Math.exp(root));
       }
-      before = frequency;
-      frequency *= ratio;
     }
     return OptionalDouble.empty();
   }
 
-  private static double peaking(Level level, double within) {
+  private static double peaking(Level level, double[] frequencies) {
     double best = 0;
-    double at = Double.NaN;
-    for (double f = within; f < HIGHEST; f *= RATIO) {
-      double here = level.at(f);
+    int at = 0;
+    for (int i = 1; i < frequencies.length - 1; i++) {
+      double here = level.at(frequencies[i]);
       if (here > best) {
         best = here;
-        at = f;
+        at = i;
       }
     }
-    return Double.isNaN(at) ? 0 : Math.max(best, highest(level, at / RATIO, at * RATIO));
+    return at == 0 ? 0 : Math.max(best, highest(level, frequencies[at - 1], frequencies[at + 1]));
   }
 
   /** Golden-section search for the top between two frequencies. */

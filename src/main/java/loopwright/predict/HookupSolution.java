@@ -208,6 +208,7 @@ final class HookupSolution {
     if (poles().stream().anyMatch(Pole::grows)) {
       throw new UnsolvedException("something grows at rest");
     }
-    return ClosedLoop.of(network(), midbandRest().gain(), hookup.source().frequency().value());
+    return ClosedLoop.of(
+        network(), poles(), midbandRest().gain(), hookup.source().frequency().value());
   }
 }

@@ -3,6 +3,11 @@ package loopwright.predict;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.List;
+import org.hipparchus.complex.Complex;
+import org.hipparchus.transform.DftNormalization;
+import org.hipparchus.transform.FastFourierTransformer;
+import org.hipparchus.transform.TransformType;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -46,6 +51,20 @@ class DeadZoneTest {
     }
     for (int n = 0; n <= 50; n += 2) {
       assertThat(predicted.hookup().harmonics().get(n)).isCloseTo(0, within(1e-12));
+    }
+  }
+
+  /** The harmonics shown are those of a fast Fourier transform (Hipparchus) of the points shown. */
+  @Test
+  void harmonicsAreThoseOfAFastTransform() {
+    Predicted predicted = zone(0.2);
+    double[] out = predicted.hookup().waveform().orElseThrow().out();
+    Complex[] lines =
+        new FastFourierTransformer(DftNormalization.STANDARD).transform(out, TransformType.FORWARD);
+    List<Double> harmonics = predicted.hookup().harmonics();
+    assertThat(harmonics.get(0)).isCloseTo(lines[0].getReal() / out.length, within(1e-13));
+    for (int n = 1; n <= 50; n++) {
+      assertThat(harmonics.get(n)).isCloseTo(2 * lines[n].norm() / out.length, within(1e-13));
     }
   }
 
