@@ -27,6 +27,7 @@ import loopwright.part.TransistorRecord;
  */
 public final class DeviceModels {
   private final Design design;
+  private final Map<String, DeviceDeviation> deviations;
   private final Map<Choice, TransistorParameters> transistors = new HashMap<>();
   private final Map<String, DiodeParameters> diodes = new HashMap<>();
 
@@ -35,9 +36,31 @@ public final class DeviceModels {
 
   private record Choice(String part, Optional<TransistorMeasured> measured) {}
 
-  /** Models of the devices of one design. */
+  /** Models of the devices of one design, all as their records say. */
   public DeviceModels(Design design) {
+    this(design, Map.of());
+  }
+
+  private DeviceModels(Design design, Map<String, DeviceDeviation> deviations) {
     this.design = design;
+    this.deviations = deviations;
+  }
+
+  /**
+   * Models for a design that differs from this one's in values. Fits of records that it has in
+   * common with this one's are taken over.
+   *
+   * @param other the design
+   * @param differing by role, the transistors that differ from their records
+   */
+  public DeviceModels of(Design other, Map<String, DeviceDeviation> differing) {
+    DeviceModels models = new DeviceModels(other, Map.copyOf(differing));
+    if (other.parts().equals(design.parts())) {
+      models.transistors.putAll(transistors);
+      models.diodes.putAll(diodes);
+      models.notes.putAll(notes);
+    }
+    return models;
   }
 
   /**
@@ -66,7 +89,8 @@ public final class DeviceModels {
         transistors.computeIfAbsent(
             new Choice(partName(role, stagePart), measured),
             choice -> fitted(choice.part(), transistorRecord(choice.part()), measured));
-    return role.equals("pair.q1") ? mismatched(parameters) : parameters;
+    TransistorParameters own = deviating(parameters, deviations.get(role));
+    return role.equals("pair.q1") ? mismatched(own) : own;
   }
 
   /** Parameters of a diode at 25 °C. */
@@ -106,7 +130,22 @@ public final class DeviceModels {
         design.amplifier() instanceof StagesAmplifier stages
             ? stages.inputPair().baseEmitterMismatch().value()
             : 0;
-    double factor = Math.exp(-mismatch / Physics.thermalVoltage(Physics.NOMINAL_TEMPERATURE));
+    return higher(parameters, mismatch);
+  }
+
+  private static TransistorParameters deviating(
+      TransistorParameters parameters, DeviceDeviation deviation) {
+    // Both parts of the base current are divided, so that the ratio holds at every current.
+    return deviation == null
+        ? parameters
+        : higher(parameters, deviation.baseEmitterVoltage())
+            .withForwardBeta(parameters.forwardBeta() * deviation.betaRatio())
+            .withRecombinationCurrent(parameters.recombinationCurrent() / deviation.betaRatio());
+  }
+
+  /** Parameters of a transistor that needs more V_BE, V, for the same current at 25 °C. */
+  private static TransistorParameters higher(TransistorParameters parameters, double volts) {
+    double factor = Math.exp(-volts / Physics.thermalVoltage(Physics.NOMINAL_TEMPERATURE));
     return parameters.withSaturationCurrent(parameters.saturationCurrent() * factor);
   }
 

@@ -57,6 +57,16 @@ public final class Circuit {
     elements.forEach(element -> byName.put(element.name(), element));
   }
 
+  /**
+   * Whether another circuit has the same unknowns, so that a state of it can be a start for this.
+   */
+  public boolean isLike(Circuit other) {
+    return layout.unknowns() == other.layout.unknowns()
+        && layout.memory() == other.layout.memory()
+        && layout.blocking() == other.layout.blocking()
+        && layout.indices().equals(other.layout.indices());
+  }
+
   /** Number of node voltages, which come first among the unknowns. */
   public int nodes() {
     return layout.nodes();

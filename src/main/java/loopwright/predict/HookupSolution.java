@@ -87,6 +87,11 @@ final class HookupSolution {
     return rest.get();
   }
 
+  /** The circuit at rest where it was solved already and has one. */
+  Optional<RestSolution> restIfSolved() {
+    return rest.isSolved() ? Optional.of(rest.get()) : Optional.empty();
+  }
+
   AssembledHookup assembled() {
     return rest.get().hookup();
   }

@@ -11,6 +11,11 @@ final class Lazy<T> {
     this.computation = computation;
   }
 
+  /** Whether it was asked for and has a value. */
+  boolean isSolved() {
+    return outcome != null && outcome.isPresent();
+  }
+
   Outcome<T> outcome() {
     if (outcome == null) {
       outcome = Outcome.of(computation);

@@ -48,9 +48,12 @@ public final class OperatingPointSolver {
    * The operating point of a circuit that differs little from one already solved, such as the same
    * at another temperature: Newton from there, and from all sources at zero where that fails.
    *
-   * @param near solved state of a circuit of the same topology
+   * @param near solved state of a circuit; no help where that has other unknowns
    */
   public static OperatingPoint solveNear(Circuit circuit, CircuitState near) {
+    if (!circuit.isLike(near.circuit())) {
+      return solve(circuit);
+    }
     CircuitState state = circuit.newState();
     state.startFrom(near);
     return new StaticSolver(circuit).solve(state, NEAR_STEPS)

@@ -1,0 +1,20 @@
+package loopwright.assembly;
+
+/**
+ * How one transistor differs from its record.
+ *
+ * @param baseEmitterVoltage more V_BE at the same current, V
+ * @param betaRatio its forward current gain over the record's
+ */
+public record DeviceDeviation(double baseEmitterVoltage, double betaRatio) {
+  /** As its record says. */
+  public static final DeviceDeviation NONE = new DeviceDeviation(0, 1);
+
+  /** Checks that such a transistor can exist. */
+  public DeviceDeviation {
+    if (!Double.isFinite(baseEmitterVoltage) || !(betaRatio > 0)) {
+      throw new IllegalArgumentException(
+          "found " + baseEmitterVoltage + " V and a ratio of " + betaRatio);
+    }
+  }
+}

@@ -1,0 +1,130 @@
+package loopwright.predict;
+
+import java.util.Map;
+import java.util.Optional;
+import loopwright.assembly.DeviceModels;
+import loopwright.assembly.Nodes;
+import loopwright.design.Design;
+import loopwright.design.Hookup;
+
+/**
+ * The figures of one hookup, each solved when it is asked for and then kept, with all that they
+ * have in common. Serves one thread.
+ */
+public final class HookupFigures {
+  private final DeviceModels models;
+  private final HookupSolution solution;
+
+  private HookupFigures(DeviceModels models, HookupSolution solution) {
+    this.models = models;
+    this.solution = solution;
+  }
+
+  /**
+   * The figures of a hookup.
+   *
+   * @param design a valid design, every part it names among its own
+   * @param hookup name of the hookup
+   * @throws loopwright.assembly.AssemblyException when it is first solved, if the design names a
+   *     node that the hookup lacks, or a part record that no model can be made of
+   * @throws IllegalArgumentException when the design has no hookup of this name
+   */
+  public static HookupFigures of(Design design, String hookup) {
+    DeviceModels models = new DeviceModels(design);
+    return new HookupFigures(models, new HookupSolution(design, find(design, hookup), models));
+  }
+
+  /**
+   * The same hookup of another build. Where it has the same nodes it is solved from this one's
+   * solution, far quicker than from nothing.
+   */
+  public HookupFigures of(Build build) {
+    Design design = build.design();
+    DeviceModels others = models.of(design, build.devices());
+    Hookup hookup = find(design, solution.hookup().name());
+    return new HookupFigures(
+        others, new HookupSolution(design, hookup, others, solution.restIfSolved()));
+  }
+
+  /** The design. */
+  public Design design() {
+    return solution.design();
+  }
+
+  /** The hookup. */
+  public Hookup hookup() {
+    return solution.hookup();
+  }
+
+  /** What the resistors around the amplifier alone decide. */
+  public HookupGains gains() {
+    return solution.gains();
+  }
+
+  /** The solved value of a figure, or why there is none. */
+  public FigureValue solved(Figure figure) {
+    return figure.solve(solution);
+  }
+
+  /** The hand formula's value of a figure, or why there is none. */
+  public FigureValue formula(Figure figure) {
+    return figure.estimate(solution);
+  }
+
+  /** Why the circuit finds no rest; empty when it does. */
+  public Optional<String> failure() {
+    Outcome<RestSolution> rest = solution.restOutcome();
+    return rest.isPresent() ? Optional.empty() : Optional.of(rest.reason());
+  }
+
+  /** Voltage of a node at rest, V, or why there is none. */
+  public FigureValue node(String name) {
+    Outcome<FigureValue> voltage =
+        Outcome.of(
+            () ->
+                solution.assembled().circuit().hasNode(name) && !Nodes.isInternal(name)
+                    ? FigureValue.of(solution.rest().state().voltage(name))
+                    : FigureValue.none("the circuit has no node " + name));
+    return voltage.isPresent() ? voltage.value() : FigureValue.none(voltage.reason());
+  }
+
+  /** Devices at rest by role; empty where the circuit finds no rest. */
+  public Map<String, DeviceState> devices() {
+    return solution.restOutcome().isPresent() ? solution.devices() : Map.of();
+  }
+
+  /**
+   * What the positive or negative supply delivers at rest, A, positive in normal operation, or why
+   * there is none.
+   */
+  public FigureValue supplyCurrent(boolean positive) {
+    Outcome<FigureValue> current =
+        Outcome.of(
+            () ->
+                FigureValue.of(
+                    positive
+                        ? solution.assembled().positiveSupply().current(solution.rest().state())
+                        : -solution.assembled().negativeSupply().current(solution.rest().state())));
+    return current.isPresent() ? current.value() : FigureValue.none(current.reason());
+  }
+
+  /**
+   * Output over generator at a frequency, small signal at rest, every capacitor in place.
+   *
+   * @param frequency Hz
+   * @return real and imaginary part; empty where the circuit finds no rest
+   */
+  public Optional<ComplexPoint> response(double frequency) {
+    if (!solution.networkOutcome().isPresent()) {
+      return Optional.empty();
+    }
+    double[] value = solution.network().response(frequency);
+    return Optional.of(new ComplexPoint(frequency, value[0], value[1]));
+  }
+
+  private static Hookup find(Design design, String name) {
+    return design
+        .hookup(name)
+        .orElseThrow(() -> new IllegalArgumentException("no hookup is called " + name));
+  }
+}
