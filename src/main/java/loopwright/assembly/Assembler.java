@@ -1,5 +1,6 @@
 package loopwright.assembly;
 
+import java.util.Optional;
 import loopwright.circuit.CircuitBuilder;
 import loopwright.circuit.Physics;
 import loopwright.design.Design;
@@ -18,17 +19,23 @@ public final class Assembler {
    * @throws AssemblyException when the design names a node or part that is not there
    */
   public static AssembledHookup assemble(Design design, Hookup hookup) {
-    return assemble(design, hookup, new DeviceModels(design), Temperatures.ambient(design));
+    return assemble(
+        design, hookup, new DeviceModels(design), Temperatures.ambient(design), Optional.empty());
   }
 
   /**
    * Assembles with junction temperatures of one's own.
    *
    * @param models of the same design; kept from one assembly to the next they save the fits
+   * @param like a hookup that may differ in values only, to save what was learnt of its matrix
    * @throws AssemblyException when the design names a node or part that is not there
    */
   public static AssembledHookup assemble(
-      Design design, Hookup hookup, DeviceModels models, Temperatures temperatures) {
+      Design design,
+      Hookup hookup,
+      DeviceModels models,
+      Temperatures temperatures,
+      Optional<AssembledHookup> like) {
     double ambient = Physics.ZERO_CELSIUS + design.surroundings().ambient().value();
     CircuitBuilder circuit = new CircuitBuilder(ambient);
     Polarity polarity =
@@ -50,7 +57,8 @@ public final class Assembler {
     LoadAssembly.add(work, hookup);
     ExtrasAssembly.add(work, hookup);
     LoadAssembly.addProbes(work, hookup);
+    double stray = design.surroundings().strayCapacitance().value();
     return new AssembledHookup(
-        design, hookup, circuit.build(design.surroundings().strayCapacitance().value()), models);
+        design, hookup, circuit.build(stray, like.map(AssembledHookup::circuit)), models);
   }
 }

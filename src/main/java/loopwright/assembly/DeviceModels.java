@@ -46,6 +46,11 @@ public final class DeviceModels {
     this.deviations = deviations;
   }
 
+  /** By role, how transistors differ from their records. */
+  public Map<String, DeviceDeviation> deviations() {
+    return deviations;
+  }
+
   /**
    * Models for a design that differs from this one's in values. Fits of records that it has in
    * common with this one's are taken over.

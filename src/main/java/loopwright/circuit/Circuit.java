@@ -9,7 +9,8 @@ import loopwright.numeric.SystemFamily;
 
 /**
  * A circuit of fixed topology and values. Its matrix pattern is analysed once; every evaluation
- * only refills values. Devices keep scratch values, so a circuit serves one thread at a time.
+ * only refills values. Devices keep scratch values, so a circuit serves one thread at a time; so do
+ * all circuits together that were built like one another.
  */
 public final class Circuit {
   /**
@@ -43,14 +44,14 @@ public final class Circuit {
       Layout layout,
       List<Element> elements,
       List<DeviceTerminals> devices,
-      SparsityPattern pattern,
+      SystemFamily systems,
       int[] diagonal,
       double kelvin,
       double restGenerator) {
     this.layout = layout;
     this.elements = elements;
     this.devices = devices;
-    this.systems = new SystemFamily(pattern);
+    this.systems = systems;
     this.diagonal = diagonal;
     this.kelvin = kelvin;
     this.restGenerator = restGenerator;

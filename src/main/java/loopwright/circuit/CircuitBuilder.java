@@ -5,9 +5,11 @@ import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.function.Supplier;
 import loopwright.numeric.SparsityPattern;
+import loopwright.numeric.SystemFamily;
 import loopwright.part.DiodeParameters;
 import loopwright.part.Polarity;
 import loopwright.part.TransistorParameters;
@@ -233,6 +235,17 @@ public final class CircuitBuilder {
    * @param strayCapacitance from every node to ground, F, but for those that were excluded
    */
   public Circuit build(double strayCapacitance) {
+    return build(strayCapacitance, Optional.empty());
+  }
+
+  /**
+   * The finished circuit; where its matrix has the same places as another's, what was learnt of
+   * that one's elimination order serves it too.
+   *
+   * @param strayCapacitance from every node to ground, F, but for those that were excluded
+   * @param like a circuit that may differ in values only; of the same thread
+   */
+  public Circuit build(double strayCapacitance, Optional<Circuit> like) {
     addLeakage();
     if (strayCapacitance > 0) {
       addStrays(strayCapacitance);
@@ -254,10 +267,16 @@ public final class CircuitBuilder {
             blocking),
         elements,
         devices.stream().map(device -> device.at(this::index)).toList(),
-        pattern.build(nodes + branches),
+        systems(pattern.build(nodes + branches), like),
         diagonal,
         kelvin,
         restGenerator);
+  }
+
+  private static SystemFamily systems(SparsityPattern pattern, Optional<Circuit> like) {
+    return like.filter(circuit -> circuit.pattern().isSameAs(pattern))
+        .map(Circuit::systems)
+        .orElseGet(() -> new SystemFamily(pattern));
   }
 
   /** The slot of a place of the matrix, for the elements of this package. */

@@ -60,6 +60,18 @@ public final class DesignPath {
     return (Design) inBlock(Schema.of(Design.class), design, path, plain, "");
   }
 
+  /**
+   * A copy of the design with other values at many paths, far quicker than one after the other.
+   *
+   * @param values by path, of each field's own type; something stands at every path already
+   * @throws DesignException when a path has no such place, or a value does not fit it
+   */
+  public static Design setAll(Design design, Map<String, ?> values) {
+    return values.isEmpty()
+        ? design
+        : (Design) manyInBlock(Schema.of(Design.class), design, values, "");
+  }
+
   /** Every resistor and capacitor of the design in the order of the file; wires are left out. */
   public static List<NamedPart> parts(Design design) {
     List<NamedPart> parts = new ArrayList<>();
@@ -126,6 +138,63 @@ public final class DesignPath {
       }
     }
     return schema.build(Map.of(name, component));
+  }
+
+  private static Object manyInBlock(Schema schema, Object block, Map<String, ?> values, String at) {
+    Map<String, Map<String, Object>> byName = new LinkedHashMap<>();
+    values.forEach((path, value) -> put(byName, head(path), path, value));
+    Map<String, Object> components = new LinkedHashMap<>();
+    for (Field field : schema.fields()) {
+      components.put(field.name(), schema.value(block, field.name()));
+    }
+    byName.forEach(
+        (name, inside) -> {
+          Field field = field(schema, name, at);
+          Object current = unwrapped(components.get(name));
+          Object changed = manyChanged(field, current, inside, join(at, name));
+          components.put(name, field.optional() ? Optional.of(changed) : changed);
+        });
+    return schema.build(components);
+  }
+
+  private static Object manyChanged(
+      Field field, Object current, Map<String, Object> inside, String at) {
+    if (inside.containsKey("")) {
+      return FieldCheck.checked(field, inside.get(""), at);
+    }
+    if (current == null) {
+      throw new DesignException(at, "found nothing, expected " + field.expectation());
+    }
+    if (field.element().isEmpty()) {
+      return manyInBlock(inside(field, current, at), current, inside, at);
+    }
+    Map<String, Map<String, Object>> byKey = new LinkedHashMap<>();
+    inside.forEach((path, value) -> put(byKey, key(field, current, path, at), path, value));
+    Object copy =
+        current instanceof Map<?, ?> map
+            ? new LinkedHashMap<Object, Object>(map)
+            : new ArrayList<Object>((List<?>) current);
+    byKey.forEach(
+        (key, deeper) -> {
+          Object entry = entry(field, current, key);
+          Object changed = manyChanged(field.element().get(), entry, deeper, join(at, key));
+          replace(copy, key, keys(field, current).indexOf(key), changed);
+        });
+    return copy;
+  }
+
+  @SuppressWarnings("unchecked")
+  private static void replace(Object container, String key, int index, Object element) {
+    if (container instanceof Map<?, ?> map) {
+      ((Map<Object, Object>) map).put(key, element);
+    } else {
+      ((List<Object>) container).set(index, element);
+    }
+  }
+
+  private static void put(
+      Map<String, Map<String, Object>> groups, String head, String path, Object value) {
+    groups.computeIfAbsent(head, name -> new LinkedHashMap<>()).put(tail(path, head), value);
   }
 
   private static Object changed(Field field, Object current, String rest, Object value, String at) {

@@ -1,5 +1,6 @@
 package loopwright.numeric;
 
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.Map;
 
@@ -36,6 +37,14 @@ public final class SparsityPattern {
   /** Column of a slot. */
   public int column(int slot) {
     return columns[slot];
+  }
+
+  /** Whether another pattern has the same places in the same slots. */
+  public boolean isSameAs(SparsityPattern other) {
+    return this == other
+        || (size == other.size
+            && Arrays.equals(rows, other.rows)
+            && Arrays.equals(columns, other.columns));
   }
 
   /** Collects the places of a matrix and hands out their slots. */

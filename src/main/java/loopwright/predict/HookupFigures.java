@@ -43,7 +43,7 @@ public final class HookupFigures {
     DeviceModels others = models.of(design, build.devices());
     Hookup hookup = find(design, solution.hookup().name());
     return new HookupFigures(
-        others, new HookupSolution(design, hookup, others, solution.restIfSolved()));
+        others, new HookupSolution(design, hookup, others, Optional.of(solution)));
   }
 
   /** The design. */

@@ -31,6 +31,7 @@ final class HookupSolution {
   private final Lazy<LinearNetwork> network;
   private final Lazy<List<Pole>> poles;
   private final Lazy<LoopMargins> margins;
+  private final Lazy<UnityCrossing> crossing;
   private final Lazy<ClosedLoop> closedLoop;
   private final Lazy<SwingStability> swing;
   private final Lazy<ClipLevel> clipHigh;
@@ -42,15 +43,25 @@ final class HookupSolution {
   }
 
   /**
-   * @param near the same hookup at rest in surroundings that differ little
+   * @param near the same hookup with values that differ little; what was solved of it is started
+   *     from
    */
-  HookupSolution(Design design, Hookup hookup, DeviceModels models, Optional<RestSolution> near) {
+  HookupSolution(Design design, Hookup hookup, DeviceModels models, Optional<HookupSolution> near) {
     this.design = design;
     this.hookup = hookup;
     this.gains = new HookupGains(hookup);
-    this.rest = new Lazy<>(() -> RestSolution.of(design, hookup, models, near));
+    this.rest =
+        new Lazy<>(
+            () ->
+                RestSolution.of(
+                    design, hookup, models, near.flatMap(other -> other.rest.ifSolved())));
     this.linearRest = new Lazy<>(() -> Levels.linearRest(assembled(), gains, heldRest()));
-    this.levels = new Lazy<>(() -> Levels.find(assembled(), gains, heldRest()));
+    this.levels =
+        new Lazy<>(
+            () ->
+                near.flatMap(other -> other.levels.ifSolved())
+                    .flatMap(levels -> Levels.near(assembled(), gains, heldRest(), levels))
+                    .orElseGet(() -> Levels.find(assembled(), gains, heldRest())));
     this.midbandHigh = new Lazy<>(() -> midband(levels().high()));
     this.midbandLow = new Lazy<>(() -> midband(levels().low()));
     this.midbandRest = new Lazy<>(() -> midband(linearRest()));
@@ -58,6 +69,14 @@ final class HookupSolution {
     this.network = new Lazy<>(this::networkAtRest);
     this.poles = new Lazy<>(() -> new NaturalFrequencies(network.get()).of(network.get()));
     this.margins = new Lazy<>(this::marginsAtRest);
+    this.crossing =
+        new Lazy<>(
+            () -> {
+              needLoop();
+              return near.flatMap(other -> other.crossing.ifSolved())
+                  .flatMap(before -> UnityCrossing.near(network(), before))
+                  .orElseGet(() -> margins().crossing());
+            });
     this.closedLoop = new Lazy<>(this::closedLoopAtRest);
     this.swing = new Lazy<>(() -> new SwingStability(assembled(), heldRest()));
     this.clipHigh = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().high(), 1));
@@ -85,11 +104,6 @@ final class HookupSolution {
 
   RestSolution rest() {
     return rest.get();
-  }
-
-  /** The circuit at rest where it was solved already and has one. */
-  Optional<RestSolution> restIfSolved() {
-    return rest.isSolved() ? Optional.of(rest.get()) : Optional.empty();
   }
 
   AssembledHookup assembled() {
@@ -155,6 +169,11 @@ final class HookupSolution {
 
   LoopMargins margins() {
     return margins.get();
+  }
+
+  /** Where the loop gain passes 1 at rest. */
+  UnityCrossing crossing() {
+    return crossing.get();
   }
 
   ClosedLoop closedLoop() {

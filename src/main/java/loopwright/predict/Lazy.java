@@ -1,5 +1,6 @@
 package loopwright.predict;
 
+import java.util.Optional;
 import java.util.function.Supplier;
 
 /** A value that is solved when first asked for, and then kept; a failure is kept as well. */
@@ -11,9 +12,9 @@ final class Lazy<T> {
     this.computation = computation;
   }
 
-  /** Whether it was asked for and has a value. */
-  boolean isSolved() {
-    return outcome != null && outcome.isPresent();
+  /** The value where it was asked for already and has one. */
+  Optional<T> ifSolved() {
+    return outcome == null ? Optional.empty() : Optional.ofNullable(outcome.value());
   }
 
   Outcome<T> outcome() {

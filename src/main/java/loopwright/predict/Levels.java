@@ -1,5 +1,6 @@
 package loopwright.predict;
 
+import java.util.Optional;
 import java.util.OptionalDouble;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.Nodes;
@@ -7,6 +8,7 @@ import loopwright.circuit.CircuitState;
 import loopwright.design.Design;
 import loopwright.numeric.RootSearch;
 import loopwright.solve.GeneratorWalk;
+import loopwright.solve.LevelSearch;
 
 /**
  * The output levels at which the figures are taken: at rest, and where the output first reaches the
@@ -73,6 +75,30 @@ record Levels(
       peak /= 2;
     }
     throw new UnsolvedException("the output does not move to either side of its reference");
+  }
+
+  /**
+   * The levels of a circuit that differs little in its values from one whose levels are known;
+   * empty where they are not on the same branch, or where those were halved.
+   *
+   * @param held at rest, blocking capacitors held
+   * @param neighbour the levels of the other circuit
+   */
+  static Optional<Levels> near(
+      AssembledHookup hookup, HookupGains gains, CircuitState held, Levels neighbour) {
+    if (neighbour.halvings() > 0 || !hookup.circuit().isLike(neighbour.rest().circuit())) {
+      return Optional.empty();
+    }
+    double reference = reference(hookup, gains, held);
+    double peak = nominalPeak(hookup, gains);
+    LevelSearch search = new LevelSearch(hookup, held);
+    return search
+        .near(neighbour.high(), reference + peak / 2)
+        .flatMap(
+            high ->
+                search
+                    .near(neighbour.low(), reference - peak / 2)
+                    .map(low -> new Levels(reference, peak, 0, held, high, low)));
   }
 
   /** What is to be said about P, or empty. */

@@ -40,7 +40,7 @@ final class LoopFigures {
             "at rest",
             "G_m1/(2π (C_c + C_cb + strays) NG)",
             CostClass.LINEAR,
-            solution -> some(solution.margins().unityFrequency(), "the loop gain never passes 1"),
+            solution -> FigureValue.of(solution.crossing().frequency()),
             LoopFormulas::unityFrequency),
         new Figure(
             "phaseMargin",
@@ -51,7 +51,7 @@ final class LoopFigures {
             "at rest",
             "",
             CostClass.LINEAR,
-            solution -> some(solution.margins().phaseMargin(), "the loop gain never passes 1"),
+            solution -> FigureValue.of(solution.crossing().phaseMargin()),
             NoFormula.ROAD),
         new Figure(
             "gainMargin",

@@ -67,6 +67,18 @@ record LoopMargins(
     return new LoopMargins(unity, margin, List.copyOf(gains));
   }
 
+  /**
+   * Where the loop gain passes 1.
+   *
+   * @throws UnsolvedException when it never does
+   */
+  UnityCrossing crossing() {
+    if (unityFrequency.isEmpty()) {
+      throw new UnsolvedException("the loop gain never passes 1");
+    }
+    return new UnityCrossing(unityFrequency.getAsDouble(), phaseMargin.getAsDouble());
+  }
+
   /** Smallest gain margin above 1. */
   OptionalDouble gainMargin() {
     return gainMargins.stream().mapToDouble(Double::doubleValue).filter(m -> m > 1).min();

@@ -6,7 +6,6 @@ import static loopwright.quantity.Unit.VOLT_PER_KELVIN;
 import java.util.List;
 import java.util.Optional;
 import loopwright.assembly.AssembledHookup;
-import loopwright.assembly.DeviceModels;
 import loopwright.circuit.CircuitState;
 import loopwright.design.Design;
 import loopwright.design.Surroundings;
@@ -107,6 +106,9 @@ final class OffsetFigures {
                 here.selfHeating(),
                 here.biasCoupling()));
     return new HookupSolution(
-        moved, solution.hookup(), new DeviceModels(moved), Optional.of(solution.rest()));
+        moved,
+        solution.hookup(),
+        solution.assembled().models().of(moved, solution.assembled().models().deviations()),
+        Optional.of(solution));
   }
 }

@@ -76,7 +76,8 @@ record RestSolution(
   private record Solver(Design design, Hookup hookup, DeviceModels models, JunctionHeat heat) {
     RestSolution at(Map<String, Double> kelvins, Optional<RestSolution> near) {
       AssembledHookup assembled =
-          Assembler.assemble(design, hookup, models, heat.temperatures(kelvins));
+          Assembler.assemble(
+              design, hookup, models, heat.temperatures(kelvins), near.map(RestSolution::hookup));
       OperatingPoint point =
           near.map(start -> OperatingPointSolver.solveNear(assembled.circuit(), start.state()))
               .orElseGet(() -> OperatingPointSolver.solve(assembled.circuit()));

@@ -71,44 +71,39 @@ public final class TolerancedParts {
    * @param deviations by how much, in the same order
    */
   public static Build build(Design design, List<TolerancedPart> parts, double[] deviations) {
-    Design built = design;
+    Map<String, Object> values = new HashMap<>();
     Map<String, DeviceDeviation> devices = new HashMap<>();
     for (int i = 0; i < deviations.length; i++) {
       double by = deviations[i];
       TolerancedPart part = parts.get(i);
-      if (by == 0) {
-        continue;
-      }
+      String name = part.name();
       switch (part.kind()) {
-        case RESISTOR, CAPACITOR -> built = withPart(built, part.name(), by);
+        case RESISTOR, CAPACITOR -> values.put(name, fitted(design, name, by));
         case BASE_EMITTER_VOLTAGE ->
             devices.merge(
-                part.name(),
+                name,
                 new DeviceDeviation(by, 1),
                 (old, more) -> new DeviceDeviation(by, old.betaRatio()));
         case BETA ->
             devices.merge(
-                part.name(),
+                name,
                 new DeviceDeviation(0, Math.exp(by)),
                 (old, more) -> new DeviceDeviation(old.baseEmitterVoltage(), more.betaRatio()));
-        case RAIL -> built = withQuantity(built, part.name(), old -> old * (1 + by));
-        case AMBIENT -> built = withQuantity(built, part.name(), old -> old + by);
+        case RAIL -> values.put(name, Quantity.of(number(design, name) * (1 + by)));
+        case AMBIENT -> values.put(name, Quantity.of(number(design, name) + by));
       }
     }
-    return new Build(built, devices);
+    return new Build(DesignPath.setAll(design, values), devices);
   }
 
-  private static Design withPart(Design design, String path, double by) {
+  private static PartValue fitted(Design design, String path, double by) {
     PartValue old = (PartValue) DesignPath.get(design, path);
-    PartValue fitted =
-        new PartValue(Quantity.of(old.effective() * (1 + by)), old.tolerance(), Optional.empty());
-    return DesignPath.set(design, path, fitted);
+    double value = old.effective() * (1 + by);
+    return new PartValue(Quantity.of(value), old.tolerance(), Optional.empty());
   }
 
-  private static Design withQuantity(
-      Design design, String path, java.util.function.DoubleUnaryOperator change) {
-    Quantity old = (Quantity) DesignPath.get(design, path);
-    return DesignPath.set(design, path, Quantity.of(change.applyAsDouble(old.value())));
+  private static double number(Design design, String path) {
+    return ((Quantity) DesignPath.get(design, path)).value();
   }
 
   private void part(NamedPart named) {

@@ -139,6 +139,50 @@ public final class StaticSolver {
     return false;
   }
 
+  /**
+   * Solves for unknowns and drive together so that a node comes to a given voltage.
+   *
+   * @param state start on entry, solution and stamps there on return
+   * @param drive what moves with the unknowns
+   * @param node index of the node
+   * @param volts its voltage, V
+   * @param most iterations at the most
+   * @return whether it converged; if not, the unknowns are where it stopped
+   */
+  boolean solveToVoltage(CircuitState state, Drive drive, int node, double volts, int most) {
+    double[] unknowns = state.unknowns();
+    lastStep = Double.POSITIVE_INFINITY;
+    for (int i = 0; i <= most; i++) {
+      state.evaluate();
+      boolean there = Math.abs(unknowns[node] - volts) < STEP;
+      if (lastStep < STEP && there && !state.limited() && isBalanced(state)) {
+        return true;
+      }
+      if (i == most || !factor(state)) {
+        return false;
+      }
+      iterations++;
+      double[] f = state.stamps().f;
+      Arrays.fill(byDrive, 0);
+      for (int row = 0; row < step.length; row++) {
+        step[row] = -f[row];
+      }
+      drive.excite(state, byDrive);
+      system.solve(step);
+      system.solve(byDrive);
+      double moved = (volts - unknowns[node] - step[node]) / byDrive[node];
+      for (int k = 0; k < step.length; k++) {
+        step[k] += moved * byDrive[k];
+      }
+      lastStep = move(unknowns);
+      if (!(lastStep < LONGEST_STEP)) {
+        return false;
+      }
+      drive.set(state, drive.get(state) + moved);
+    }
+    return false;
+  }
+
   private double along(double[] direction, double[] vector) {
     double sum = 0;
     for (int node = 0; node < circuit.nodes(); node++) {

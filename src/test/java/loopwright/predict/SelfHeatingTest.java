@@ -76,7 +76,11 @@ class SelfHeatingTest {
       Temperatures temperatures = role -> rest.kelvins().get(role);
       AssembledHookup warm =
           Assembler.assemble(
-              design, design.hookups().get(0), new DeviceModels(design), temperatures);
+              design,
+              design.hookups().get(0),
+              new DeviceModels(design),
+              temperatures,
+              Optional.empty());
       OperatingPoint point = OperatingPointSolver.solve(warm.circuit());
       assertThat(point).isInstanceOf(OperatingPoint.Found.class);
       for (String node : List.of("out", "pairOut", "gainOut")) {
