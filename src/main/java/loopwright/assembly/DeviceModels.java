@@ -27,7 +27,7 @@ import loopwright.part.TransistorRecord;
  */
 public final class DeviceModels {
   private final Design design;
-  private final Map<String, DeviceDeviation> deviations;
+  private final Deviations deviations;
   private final Map<Choice, TransistorParameters> transistors = new HashMap<>();
   private final Map<String, DiodeParameters> diodes = new HashMap<>();
 
@@ -38,16 +38,16 @@ public final class DeviceModels {
 
   /** Models of the devices of one design, all as their records say. */
   public DeviceModels(Design design) {
-    this(design, Map.of());
+    this(design, Deviations.NONE);
   }
 
-  private DeviceModels(Design design, Map<String, DeviceDeviation> deviations) {
+  private DeviceModels(Design design, Deviations deviations) {
     this.design = design;
     this.deviations = deviations;
   }
 
-  /** By role, how transistors differ from their records. */
-  public Map<String, DeviceDeviation> deviations() {
+  /** How this build differs from the design. */
+  public Deviations deviations() {
     return deviations;
   }
 
@@ -56,10 +56,10 @@ public final class DeviceModels {
    * common with this one's are taken over.
    *
    * @param other the design
-   * @param differing by role, the transistors that differ from their records
+   * @param differing how the build differs from it
    */
-  public DeviceModels of(Design other, Map<String, DeviceDeviation> differing) {
-    DeviceModels models = new DeviceModels(other, Map.copyOf(differing));
+  public DeviceModels of(Design other, Deviations differing) {
+    DeviceModels models = new DeviceModels(other, differing);
     if (other.parts().equals(design.parts())) {
       models.transistors.putAll(transistors);
       models.diodes.putAll(diodes);
@@ -94,7 +94,7 @@ public final class DeviceModels {
         transistors.computeIfAbsent(
             new Choice(partName(role, stagePart), measured),
             choice -> fitted(choice.part(), transistorRecord(choice.part()), measured));
-    TransistorParameters own = deviating(parameters, deviations.get(role));
+    TransistorParameters own = deviating(parameters, deviations.devices().get(role));
     return role.equals("pair.q1") ? mismatched(own) : own;
   }
 

@@ -36,7 +36,7 @@ final class RailsAssembly {
         "rails.resistance@" + rail,
         ideal,
         rail,
-        rails.resistance().effective(),
+        work.value("rails.resistance@" + rail, rails.resistance()),
         rails.inductance().value());
     rails
         .decoupling()

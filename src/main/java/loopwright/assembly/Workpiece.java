@@ -88,15 +88,20 @@ final class Workpiece {
   }
 
   void resistor(String path, String from, String to, PartValue value) {
-    circuit.resistor(path, from, to, value.effective());
+    circuit.resistor(path, from, to, value(path, value));
   }
 
   void capacitor(String path, String from, String to, PartValue value) {
-    circuit.capacitor(path, from, to, value.effective());
+    circuit.capacitor(path, from, to, value(path, value));
   }
 
   void blockingCapacitor(String path, String from, String to, PartValue value) {
-    circuit.blockingCapacitor(path, from, to, value.effective());
+    circuit.blockingCapacitor(path, from, to, value(path, value));
+  }
+
+  /** The value of an element in this build. */
+  double value(String element, PartValue value) {
+    return value.effective() * models.deviations().ratio(element);
   }
 
   /** The node that the bias of a current source is fed from. */

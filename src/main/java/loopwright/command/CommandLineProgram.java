@@ -30,6 +30,7 @@ public final class CommandLineProgram {
   public int run(String[] arguments, Console console) {
     CommandLine line = new CommandLine(new TopCommand());
     line.addSubcommand(new PredictCommand(services, console));
+    line.addSubcommand(new SpreadCommand(services, console));
     line.setOut(writer(console.out()));
     line.setErr(writer(console.err()));
     line.setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF));
@@ -45,7 +46,7 @@ public final class CommandLineProgram {
 
   /** The words that a call may begin with. */
   public static Set<String> subCommands() {
-    return Set.of(PredictCommand.NAME);
+    return Set.of(PredictCommand.NAME, SpreadCommand.NAME);
   }
 
   private static PrintWriter writer(java.io.PrintStream stream) {

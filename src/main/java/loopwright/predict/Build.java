@@ -1,23 +1,17 @@
 package loopwright.predict;
 
-import java.util.Map;
-import loopwright.assembly.DeviceDeviation;
+import loopwright.assembly.Deviations;
 import loopwright.design.Design;
 
 /**
  * One build of a design: its own values, its own transistors.
  *
  * @param design the design with the values of this build
- * @param devices by role, the transistors that differ from their records
+ * @param deviations what the design has no place for
  */
-public record Build(Design design, Map<String, DeviceDeviation> devices) {
-  /** Keeps its own copy. */
-  public Build {
-    devices = Map.copyOf(devices);
-  }
-
+public record Build(Design design, Deviations deviations) {
   /** A build with every part as the design says. */
   public static Build nominal(Design design) {
-    return new Build(design, Map.of());
+    return new Build(design, Deviations.NONE);
   }
 }

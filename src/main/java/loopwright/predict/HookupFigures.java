@@ -1,9 +1,11 @@
 package loopwright.predict;
 
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import loopwright.assembly.DeviceModels;
 import loopwright.assembly.Nodes;
+import loopwright.circuit.Element;
 import loopwright.design.Design;
 import loopwright.design.Hookup;
 
@@ -40,10 +42,24 @@ public final class HookupFigures {
    */
   public HookupFigures of(Build build) {
     Design design = build.design();
-    DeviceModels others = models.of(design, build.devices());
+    DeviceModels others = models.of(design, build.deviations());
     Hookup hookup = find(design, solution.hookup().name());
     return new HookupFigures(
         others, new HookupSolution(design, hookup, others, Optional.of(solution)));
+  }
+
+  /**
+   * The resistors and capacitors of the circuit that a path of the design stands for: itself, or
+   * where it stands for several its twins, each with what tells it apart behind an {@code @}. Empty
+   * where this hookup has none, or the circuit finds no rest.
+   */
+  public List<String> elements(String path) {
+    return failure().isPresent()
+        ? List.of()
+        : solution.assembled().circuit().elements().stream()
+            .map(Element::name)
+            .filter(name -> name.equals(path) || name.startsWith(path + "@"))
+            .toList();
   }
 
   /** The design. */
@@ -86,6 +102,11 @@ public final class HookupFigures {
                     ? FigureValue.of(solution.rest().state().voltage(name))
                     : FigureValue.none("the circuit has no node " + name));
     return voltage.isPresent() ? voltage.value() : FigureValue.none(voltage.reason());
+  }
+
+  /** Voltages of all nodes with a name at rest, V; empty where the circuit finds no rest. */
+  public Map<String, Double> nodes() {
+    return solution.restOutcome().isPresent() ? solution.nodes() : Map.of();
   }
 
   /** Devices at rest by role; empty where the circuit finds no rest. */

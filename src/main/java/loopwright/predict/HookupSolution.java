@@ -1,10 +1,12 @@
 package loopwright.predict;
 
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.DeviceModels;
+import loopwright.assembly.Nodes;
 import loopwright.circuit.CircuitState;
 import loopwright.design.Design;
 import loopwright.design.Hookup;
@@ -108,6 +110,17 @@ final class HookupSolution {
 
   AssembledHookup assembled() {
     return rest.get().hookup();
+  }
+
+  /** Voltages at rest of the nodes that have a name outside a device, V. */
+  Map<String, Double> nodes() {
+    Map<String, Double> nodes = new LinkedHashMap<>();
+    for (String name : assembled().circuit().nodeNames()) {
+      if (!Nodes.isInternal(name)) {
+        nodes.put(name, rest.get().state().voltage(name));
+      }
+    }
+    return nodes;
   }
 
   /** Devices at rest by role. */

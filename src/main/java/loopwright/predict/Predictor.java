@@ -8,7 +8,6 @@ import java.util.Optional;
 import java.util.stream.IntStream;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.DeviceModels;
-import loopwright.assembly.Nodes;
 import loopwright.circuit.CircuitState;
 import loopwright.design.Design;
 import loopwright.design.Hookup;
@@ -96,14 +95,8 @@ public final class Predictor {
   private static RestState restState(HookupSolution solution) {
     CircuitState state = solution.rest().state();
     AssembledHookup hookup = solution.assembled();
-    Map<String, Double> nodes = new LinkedHashMap<>();
-    for (String name : hookup.circuit().nodeNames()) {
-      if (!Nodes.isInternal(name)) {
-        nodes.put(name, state.voltage(name));
-      }
-    }
     return new RestState(
-        nodes,
+        solution.nodes(),
         solution.devices(),
         hookup.positiveSupply().current(state),
         -hookup.negativeSupply().current(state));

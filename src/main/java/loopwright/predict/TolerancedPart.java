@@ -5,8 +5,8 @@ package loopwright.predict;
  * measure that makes it so.
  *
  * @param kind what spreads, and in which measure
- * @param name path of a resistor, a capacitor, a rail or the ambient temperature; role of a
- *     transistor
+ * @param name path of a resistor, a capacitor, a rail or the ambient temperature, with the name of
+ *     one of several parts behind an {@code @}; role of a transistor
  * @param low least deviation, not above 0 but for an ambient range beside the nominal one
  * @param high largest deviation
  */

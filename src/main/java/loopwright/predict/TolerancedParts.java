@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import loopwright.assembly.Deviations;
 import loopwright.assembly.DeviceDeviation;
 import loopwright.design.Design;
 import loopwright.design.DesignPath;
@@ -27,25 +28,30 @@ import loopwright.quantity.Unit;
 /**
  * Everything of a design that spreads, by its tolerances: resistors and capacitors by their own or
  * the general one, each transistor's V_BE and β, each rail, the ambient temperature. What was
- * measured does not spread.
+ * measured does not spread. Where one path stands for two parts, such as the emitter resistors of a
+ * pair, each spreads by itself.
  */
 public final class TolerancedParts {
+  private static final String TWIN = "@";
+
   private final Design design;
-  private final Map<String, DeviceState> rest;
+  private final HookupFigures nominal;
   private final List<TolerancedPart> parts = new ArrayList<>();
 
-  private TolerancedParts(Design design, Map<String, DeviceState> rest) {
-    this.design = design;
-    this.rest = rest;
+  private TolerancedParts(HookupFigures nominal) {
+    this.design = nominal.design();
+    this.nominal = nominal;
   }
 
   /**
-   * Lists them.
+   * Lists those of a design, the parts of all its hookups included.
    *
-   * @param rest devices at rest by role: the current decides which line of a datasheet holds
+   * @param nominal some hookup of it: the currents of its devices decide which line of a datasheet
+   *     holds
    */
-  public static List<TolerancedPart> of(Design design, Map<String, DeviceState> rest) {
-    TolerancedParts found = new TolerancedParts(design, rest);
+  public static List<TolerancedPart> of(HookupFigures nominal) {
+    Design design = nominal.design();
+    TolerancedParts found = new TolerancedParts(nominal);
     DesignPath.parts(design).forEach(found::part);
     DeviceRoles.of(design).stream().filter(role -> !role.diode()).forEach(found::device);
     Tolerances tolerances = design.tolerances();
@@ -73,12 +79,19 @@ public final class TolerancedParts {
   public static Build build(Design design, List<TolerancedPart> parts, double[] deviations) {
     Map<String, Object> values = new HashMap<>();
     Map<String, DeviceDeviation> devices = new HashMap<>();
+    Map<String, Double> twins = new HashMap<>();
     for (int i = 0; i < deviations.length; i++) {
       double by = deviations[i];
       TolerancedPart part = parts.get(i);
       String name = part.name();
       switch (part.kind()) {
-        case RESISTOR, CAPACITOR -> values.put(name, fitted(design, name, by));
+        case RESISTOR, CAPACITOR -> {
+          if (name.contains(TWIN)) {
+            twins.put(name, 1 + by);
+          } else {
+            values.put(name, fitted(design, name, by));
+          }
+        }
         case BASE_EMITTER_VOLTAGE ->
             devices.merge(
                 name,
@@ -93,7 +106,7 @@ public final class TolerancedParts {
         case AMBIENT -> values.put(name, Quantity.of(number(design, name) + by));
       }
     }
-    return new Build(DesignPath.setAll(design, values), devices);
+    return new Build(DesignPath.setAll(design, values), new Deviations(devices, twins));
   }
 
   private static PartValue fitted(Design design, String path, double by) {
@@ -120,7 +133,20 @@ public final class TolerancedParts {
         .filter(fraction -> fraction > 0)
         .ifPresent(
             fraction ->
-                add(resistor ? Kind.RESISTOR : Kind.CAPACITOR, named.path(), -fraction, fraction));
+                elements(named.path())
+                    .forEach(
+                        element ->
+                            add(
+                                resistor ? Kind.RESISTOR : Kind.CAPACITOR,
+                                element,
+                                -fraction,
+                                fraction)));
+  }
+
+  /** The path itself where this hookup has no part of it: another may. */
+  private List<String> elements(String path) {
+    List<String> elements = nominal.elements(path);
+    return elements.isEmpty() ? List.of(path) : elements;
   }
 
   private void device(DeviceRole role) {
@@ -196,7 +222,8 @@ public final class TolerancedParts {
   }
 
   private OptionalDouble current(DeviceRole role) {
-    return rest.get(role.role()) instanceof TransistorState state && state.collectorCurrent() > 0
+    return nominal.devices().get(role.role()) instanceof TransistorState state
+            && state.collectorCurrent() > 0
         ? OptionalDouble.of(state.collectorCurrent())
         : OptionalDouble.empty();
   }

@@ -26,7 +26,7 @@ class TolerancedPartsTest {
          "p": {"kind": "pnp", "measured": {"beta": {"current": "1m", "value": 220}},
                "model": {"saturationCurrent": 1e-14, "forwardBeta": 200}}},
        "amplifier": {"kind": "stages",
-         "inputPair": {"transistor": "n",
+         "inputPair": {"transistor": "n", "emitterResistance": 100,
            "tail": {"kind": "resistor", "resistance": "12k"},
            "load": {"kind": "resistors", "output": {"value": "1k5", "tolerance": "1%"}}},
          "gainStage": {"transistor": "p", "load": {"kind": "resistor",
@@ -43,7 +43,7 @@ class TolerancedPartsTest {
 
   private final Design design = DesignText.read(DESIGN);
   private final HookupFigures nominal = HookupFigures.of(design, "divider");
-  private final List<TolerancedPart> parts = TolerancedParts.of(design, nominal.devices());
+  private final List<TolerancedPart> parts = TolerancedParts.of(nominal);
 
   private TolerancedPart part(Kind kind, String name) {
     return parts.stream()
@@ -76,6 +76,22 @@ class TolerancedPartsTest {
   }
 
   @Test
+  void twoPartsOfOnePathSpreadEachByItself() {
+    String path = "amplifier.inputPair.emitterResistance@pair.q";
+    List<TolerancedPart> one = List.of(part(Kind.RESISTOR, path + "1"));
+    assertThat(part(Kind.RESISTOR, path + "2").low()).isEqualTo(-0.05);
+
+    HookupFigures built = nominal.of(TolerancedParts.build(design, one, new double[] {0.05}));
+    Figure offset = Catalogue.find("inputOffset").orElseThrow();
+    double shift =
+        built.solved(offset).number().orElseThrow() - nominal.solved(offset).number().orElseThrow();
+    // Δ(I_E R_E): Gray, Hurst, Lewis and Meyer, 3.5.6 (from memory); the load holds I_C1.
+    double current =
+        ((DeviceState.TransistorState) nominal.devices().get("pair.q1")).collectorCurrent();
+    assertThat(shift).isEqualTo(5 * current, within(0.05 * 5 * current));
+  }
+
+  @Test
   void railsAndAmbientSpread() {
     assertThat(part(Kind.RAIL, "rails.negative").low()).isEqualTo(-0.02);
     TolerancedPart ambient = part(Kind.AMBIENT, "surroundings.ambient");
@@ -98,7 +114,7 @@ class TolerancedPartsTest {
     Build build = TolerancedParts.build(design, two, new double[] {0.02, Math.log(2)});
     PartValue upper = (PartValue) DesignPath.get(build.design(), "hookups.divider.feedback.upper");
     assertThat(upper.effective()).isEqualTo(10200, within(1e-9));
-    assertThat(build.devices().get("pair.q1").betaRatio()).isEqualTo(2, within(1e-12));
+    assertThat(build.deviations().devices().get("pair.q1").betaRatio()).isEqualTo(2, within(1e-12));
 
     double before = baseCurrent(nominal);
     assertThat(baseCurrent(nominal.of(build))).isEqualTo(before / 2, within(0.01 * before));
