@@ -3,6 +3,7 @@ package loopwright.predict;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import loopwright.numeric.RootSearch;
@@ -14,12 +15,10 @@ import loopwright.solve.NaturalFrequencies.Pole;
  * between the points of a coarse grid. The grid is made finer where T turns quickly, and has a
  * point at every complex natural frequency, where a resonance could hide a crossing.
  *
- * @param unityFrequency highest frequency where |T| = 1, Hz; empty when there is none
- * @param phaseMargin 180° + arg T there, arg continuous from low frequency, degrees
+ * @param unity highest place where |T| = 1; empty when there is none
  * @param gainMargins 1/|T| at every crossing of the negative real axis, ascending
  */
-record LoopMargins(
-    OptionalDouble unityFrequency, OptionalDouble phaseMargin, List<Double> gainMargins) {
+record LoopMargins(Optional<UnityCrossing> unity, List<Double> gainMargins) {
   private static final double LOWEST = 1e-2;
   private static final double HIGHEST = 1e11;
   private static final int PER_DECADE = 4;
@@ -46,17 +45,10 @@ record LoopMargins(
 
   static LoopMargins of(DoubleFunction<double[]> loopGain, double[] frequencies) {
     List<Point> points = trace(loopGain, frequencies);
-    OptionalDouble unity = OptionalDouble.empty();
-    OptionalDouble margin = OptionalDouble.empty();
     List<Double> gains = new ArrayList<>();
     for (int i = points.size() - 1; i > 0; i--) {
       Point low = points.get(i - 1);
       Point high = points.get(i);
-      if (unity.isEmpty() && low.logMagnitude() * high.logMagnitude() < 0) {
-        Point crossing = refine(loopGain, low, high, Point::logMagnitude);
-        unity = OptionalDouble.of(crossing.frequency());
-        margin = OptionalDouble.of(180 + Math.toDegrees(crossing.argument()));
-      }
       if (oddTurns(low) != oddTurns(high) && low.logMagnitude() > LEAST) {
         Point crossing =
             refine(loopGain, low, high, point -> point.argument() - boundary(low, high));
@@ -64,7 +56,26 @@ record LoopMargins(
       }
     }
     gains.sort(null);
-    return new LoopMargins(unity, margin, List.copyOf(gains));
+    return new LoopMargins(crossing(loopGain, points), List.copyOf(gains));
+  }
+
+  /** Where the loop gain passes 1, without the gain margins; empty when it never does. */
+  static Optional<UnityCrossing> crossing(DoubleFunction<double[]> loopGain, double[] frequencies) {
+    return crossing(loopGain, trace(loopGain, frequencies));
+  }
+
+  private static Optional<UnityCrossing> crossing(
+      DoubleFunction<double[]> loopGain, List<Point> points) {
+    for (int i = points.size() - 1; i > 0; i--) {
+      Point low = points.get(i - 1);
+      Point high = points.get(i);
+      if (low.logMagnitude() * high.logMagnitude() < 0) {
+        Point crossing = refine(loopGain, low, high, Point::logMagnitude);
+        return Optional.of(
+            new UnityCrossing(crossing.frequency(), 180 + Math.toDegrees(crossing.argument())));
+      }
+    }
+    return Optional.empty();
   }
 
   /**
@@ -73,10 +84,7 @@ record LoopMargins(
    * @throws UnsolvedException when it never does
    */
   UnityCrossing crossing() {
-    if (unityFrequency.isEmpty()) {
-      throw new UnsolvedException("the loop gain never passes 1");
-    }
-    return new UnityCrossing(unityFrequency.getAsDouble(), phaseMargin.getAsDouble());
+    return unity.orElseThrow(() -> new UnsolvedException("the loop gain never passes 1"));
   }
 
   /** Smallest gain margin above 1. */

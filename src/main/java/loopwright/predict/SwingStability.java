@@ -187,6 +187,10 @@ final class SwingStability {
       }
       return new Traced(OptionalDouble.empty(), samples);
     }
-    return new Traced(LoopMargins.of(loopGain, grid).phaseMargin(), samples);
+    OptionalDouble margin =
+        LoopMargins.crossing(loopGain, grid)
+            .map(crossing -> OptionalDouble.of(crossing.phaseMargin()))
+            .orElse(OptionalDouble.empty());
+    return new Traced(margin, samples);
   }
 }

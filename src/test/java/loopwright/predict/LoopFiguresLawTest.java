@@ -33,14 +33,14 @@ class LoopFiguresLawTest {
       }
       LinearNetwork network = solution.network();
       LoopMargins margins = solution.margins();
-      double unity = margins.unityFrequency().orElse(1e-2);
-      if (margins.unityFrequency().isPresent()) {
+      double unity = margins.unity().map(UnityCrossing::frequency).orElse(1e-2);
+      if (margins.unity().isPresent()) {
         double[] loopGain = network.loopGain(unity);
         assertThat(Math.hypot(loopGain[0], loopGain[1]))
             .as(design.name())
             .isCloseTo(1, within(1e-6));
         double angle = 180 + Math.toDegrees(Math.atan2(loopGain[1], loopGain[0]));
-        assertThat(Math.IEEEremainder(margins.phaseMargin().orElseThrow() - angle, 360))
+        assertThat(Math.IEEEremainder(margins.crossing().phaseMargin() - angle, 360))
             .as(design.name())
             .isCloseTo(0, within(1e-4));
         crossing++;
