@@ -31,6 +31,7 @@ public final class CommandLineProgram {
     CommandLine line = new CommandLine(new TopCommand());
     line.addSubcommand(new PredictCommand(services, console));
     line.addSubcommand(new SpreadCommand(services, console));
+    line.addSubcommand(new CureCommand(services, console));
     line.setOut(writer(console.out()));
     line.setErr(writer(console.err()));
     line.setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF));
@@ -46,7 +47,7 @@ public final class CommandLineProgram {
 
   /** The words that a call may begin with. */
   public static Set<String> subCommands() {
-    return Set.of(PredictCommand.NAME, SpreadCommand.NAME);
+    return Set.of(PredictCommand.NAME, SpreadCommand.NAME, CureCommand.NAME);
   }
 
   private static PrintWriter writer(java.io.PrintStream stream) {

@@ -4,14 +4,12 @@ import java.util.List;
 import java.util.concurrent.Callable;
 import loopwright.check.Finding;
 import loopwright.design.Design;
-import loopwright.design.Hookup;
 import loopwright.file.PredictionJson;
 import loopwright.predict.Prediction;
 import loopwright.task.Progress;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
@@ -85,16 +83,7 @@ final class PredictCommand implements Callable<Integer> {
     if (hookup == null) {
       return List.of();
     }
-    if (design.hookup(hookup).isEmpty()) {
-      throw new ParameterException(
-          spec.commandLine(),
-          "Unknown hookup \""
-              + hookup
-              + "\": "
-              + design.name()
-              + " has "
-              + String.join(", ", design.hookups().stream().map(Hookup::name).toList()));
-    }
+    HookupOption.require(design, hookup, spec);
     return List.of(hookup);
   }
 }

@@ -1,5 +1,9 @@
 package loopwright.design;
 
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+
 /**
  * A change to a design as a value: what shall stand at a path.
  *
@@ -8,6 +12,19 @@ package loopwright.design;
  *     something optional away
  */
 public record Change(String path, String value) {
+  /**
+   * A copy of the design with all changes made together, so that they may make a block that none of
+   * them would complete alone.
+   *
+   * @param changes that set values
+   * @throws DesignException when the design has no such place or a text does not fit it
+   */
+  public static Design applyAll(Design design, List<Change> changes) {
+    Map<String, Object> values = new LinkedHashMap<>();
+    changes.forEach(change -> values.put(change.path(), change.parsed(design)));
+    return DesignPath.setAll(design, values);
+  }
+
   /**
    * A copy of the design with the change made. A part value keeps its own tolerance; what was
    * measured is dropped, since another part is fitted now.
@@ -19,7 +36,11 @@ public record Change(String path, String value) {
     if (value.isBlank() && !field.isNeeded()) {
       return DesignPath.set(design, path, null);
     }
-    Object parsed = FieldText.parse(field, value, path);
+    return DesignPath.set(design, path, parsed(design));
+  }
+
+  private Object parsed(Design design) {
+    Object parsed = FieldText.parse(DesignPath.field(design, path), value, path);
     if (parsed instanceof PartValue part) {
       parsed =
           DesignPath.find(design, path)
@@ -27,6 +48,6 @@ public record Change(String path, String value) {
               .map(old -> new PartValue(part.value(), old.tolerance(), part.measured()))
               .orElse(part);
     }
-    return DesignPath.set(design, path, parsed);
+    return parsed;
   }
 }

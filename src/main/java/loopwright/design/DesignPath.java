@@ -61,10 +61,12 @@ public final class DesignPath {
   }
 
   /**
-   * A copy of the design with other values at many paths, far quicker than one after the other.
+   * A copy of the design with other values at many paths, far quicker than one after the other. An
+   * absent block on the way is created where the values complete it.
    *
-   * @param values by path, of each field's own type; something stands at every path already
-   * @throws DesignException when a path has no such place, or a value does not fit it
+   * @param values by path, of each field's own type; list elements and map entries on the way exist
+   * @throws DesignException when a path has no such place, a value does not fit it, or a block
+   *     would be incomplete
    */
   public static Design setAll(Design design, Map<String, ?> values) {
     return values.isEmpty()
@@ -144,8 +146,10 @@ public final class DesignPath {
     Map<String, Map<String, Object>> byName = new LinkedHashMap<>();
     values.forEach((path, value) -> put(byName, head(path), path, value));
     Map<String, Object> components = new LinkedHashMap<>();
-    for (Field field : schema.fields()) {
-      components.put(field.name(), schema.value(block, field.name()));
+    if (block != null) {
+      for (Field field : schema.fields()) {
+        components.put(field.name(), schema.value(block, field.name()));
+      }
     }
     byName.forEach(
         (name, inside) -> {
@@ -154,6 +158,11 @@ public final class DesignPath {
           Object changed = manyChanged(field, current, inside, join(at, name));
           components.put(name, field.optional() ? Optional.of(changed) : changed);
         });
+    for (Field needed : schema.needed()) {
+      if (!components.containsKey(needed.name())) {
+        missing(join(at, needed.name()), needed);
+      }
+    }
     return schema.build(components);
   }
 
@@ -162,7 +171,7 @@ public final class DesignPath {
     if (inside.containsKey("")) {
       return FieldCheck.checked(field, inside.get(""), at);
     }
-    if (current == null) {
+    if (current == null && field.element().isPresent()) {
       throw new DesignException(at, "found nothing, expected " + field.expectation());
     }
     if (field.element().isEmpty()) {

@@ -3,6 +3,7 @@ package loopwright.predict;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Predicate;
 import loopwright.assembly.DeviceModels;
 import loopwright.assembly.Nodes;
 import loopwright.circuit.Element;
@@ -127,6 +128,28 @@ public final class HookupFigures {
                         ? solution.assembled().positiveSupply().current(solution.rest().state())
                         : -solution.assembled().negativeSupply().current(solution.rest().state())));
     return current.isPresent() ? current.value() : FigureValue.none(current.reason());
+  }
+
+  /** Phase margin at a level, degrees, or why there is none. */
+  public FigureValue phaseMargin(Level level) {
+    Outcome<FigureValue> margin =
+        Outcome.of(() -> FigureValue.of(solution.crossing(level).phaseMargin()));
+    return margin.isPresent() ? margin.value() : FigureValue.none(margin.reason());
+  }
+
+  /**
+   * The linear circuit at levels over the swing, see {@link SwingLevel}.
+   *
+   * @param count how many levels, odd; with amplitude 0 only the one at rest
+   * @param goOn asked at each level; the search ends where it says no
+   * @return in no particular order when the search ended early; empty where the circuit finds no
+   *     rest
+   */
+  public List<SwingLevel> overSwing(int count, Predicate<SwingLevel> goOn) {
+    Outcome<SwingStability> swing = Outcome.of(() -> solution.swing(count, goOn));
+    return swing.isPresent()
+        ? swing.value().levels().stream().map(SwingStability.Solved::level).toList()
+        : List.of();
   }
 
   /**

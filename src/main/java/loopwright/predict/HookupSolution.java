@@ -4,6 +4,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Predicate;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.DeviceModels;
 import loopwright.assembly.Nodes;
@@ -34,6 +35,8 @@ final class HookupSolution {
   private final Lazy<List<Pole>> poles;
   private final Lazy<LoopMargins> margins;
   private final Lazy<UnityCrossing> crossing;
+  private final Lazy<UnityCrossing> crossingHigh;
+  private final Lazy<UnityCrossing> crossingLow;
   private final Lazy<ClosedLoop> closedLoop;
   private final Lazy<SwingStability> swing;
   private final Lazy<ClipLevel> clipHigh;
@@ -79,6 +82,10 @@ final class HookupSolution {
                   .flatMap(before -> UnityCrossing.near(network(), before))
                   .orElseGet(() -> margins().crossing());
             });
+    this.crossingHigh =
+        new Lazy<>(() -> crossingAt(levels().high(), near.flatMap(o -> o.crossingHigh.ifSolved())));
+    this.crossingLow =
+        new Lazy<>(() -> crossingAt(levels().low(), near.flatMap(o -> o.crossingLow.ifSolved())));
     this.closedLoop = new Lazy<>(this::closedLoopAtRest);
     this.swing = new Lazy<>(() -> new SwingStability(assembled(), heldRest()));
     this.clipHigh = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().high(), 1));
@@ -189,6 +196,20 @@ final class HookupSolution {
     return crossing.get();
   }
 
+  /** Where the loop gain passes 1 at a level. */
+  UnityCrossing crossing(Level level) {
+    return switch (level) {
+      case REST -> crossing.get();
+      case HIGH -> crossingHigh.get();
+      case LOW -> crossingLow.get();
+    };
+  }
+
+  /** The linear circuit over the swing at so many levels, as long as each is one to go on from. */
+  SwingStability swing(int count, Predicate<SwingLevel> goOn) {
+    return new SwingStability(assembled(), heldRest(), count, goOn);
+  }
+
   ClosedLoop closedLoop() {
     return closedLoop.get();
   }
@@ -238,6 +259,16 @@ final class HookupSolution {
   private LoopMargins marginsAtRest() {
     needLoop();
     return LoopMargins.of(network(), poles());
+  }
+
+  private UnityCrossing crossingAt(CircuitState state, Optional<UnityCrossing> before) {
+    needLoop();
+    LinearNetwork linear = new LinearNetwork(assembled());
+    linear.linearise(state);
+    return before
+        .flatMap(known -> UnityCrossing.near(linear, known))
+        .orElseGet(
+            () -> LoopMargins.of(linear, new NaturalFrequencies(linear).of(linear)).crossing());
   }
 
   private ClosedLoop closedLoopAtRest() {

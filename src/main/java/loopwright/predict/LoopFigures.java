@@ -33,6 +33,21 @@ final class LoopFigures {
             },
             LoopFormulas::loopGain),
         new Figure(
+            "loopGainAtSignal",
+            "Loop gain at the signal",
+            ONE,
+            "Magnitude of the loop gain at rest at the signal's frequency, every capacitor in place.",
+            "at rest",
+            "",
+            CostClass.LINEAR,
+            solution -> {
+              solution.needLoop();
+              double frequency = solution.hookup().source().frequency().value();
+              double[] value = solution.network().loopGain(frequency);
+              return FigureValue.of(Math.hypot(value[0], value[1]), "at " + Text.hertz(frequency));
+            },
+            NoFormula.ROAD),
+        new Figure(
             "unityFrequency",
             "Unity-gain frequency of the loop",
             HERTZ,

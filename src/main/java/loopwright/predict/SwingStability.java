@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
+import java.util.function.Predicate;
 import loopwright.assembly.AssembledHookup;
 import loopwright.circuit.CircuitState;
 import loopwright.solve.GeneratorWalk;
@@ -34,6 +35,8 @@ final class SwingStability {
 
   private final AssembledHookup hookup;
   private final LinearNetwork network;
+  private final int half;
+  private final Predicate<SwingLevel> goOn;
   private final List<Solved> levels = new ArrayList<>();
   private RootFollower roots;
   private String remark = "";
@@ -44,14 +47,29 @@ final class SwingStability {
    * @param rest at rest, blocking capacitors held
    */
   SwingStability(AssembledHookup hookup, CircuitState rest) {
+    this(hookup, rest, LEVELS, level -> true);
+  }
+
+  /**
+   * Walks so many levels, as long as each is one to go on from.
+   *
+   * @param rest at rest, blocking capacitors held
+   * @param count odd
+   * @param goOn asked at each level
+   */
+  SwingStability(AssembledHookup hookup, CircuitState rest, int count, Predicate<SwingLevel> goOn) {
     this.hookup = hookup;
+    this.half = (count - 1) / 2;
+    this.goOn = goOn;
     this.network = new LinearNetwork(hookup);
     double amplitude = hookup.hookup().source().amplitude().value();
     GeneratorWalk start = new GeneratorWalk(hookup, rest, Math.max(amplitude / 8, 1e-6));
-    levels.add(solve(start));
-    if (amplitude > 0) {
-      walk(rest, amplitude, 1);
-      walk(rest, amplitude, -1);
+    Solved first = solve(start);
+    levels.add(first);
+    if (amplitude > 0
+        && goOn.test(first.level())
+        && walk(rest, amplitude, 1)
+        && walk(rest, amplitude, -1)) {
       levels.sort(Comparator.comparingDouble(solved -> solved.level().generator()));
       refine();
     }
@@ -105,16 +123,21 @@ final class SwingStability {
     return verb + " from " + Text.volts(low) + " to " + Text.volts(high) + at;
   }
 
-  private void walk(CircuitState rest, double amplitude, int direction) {
-    int half = (LEVELS - 1) / 2;
+  /** Walks one way; false when there is no need to go on. */
+  private boolean walk(CircuitState rest, double amplitude, int direction) {
     GeneratorWalk walk = new GeneratorWalk(hookup, rest, amplitude / half);
     for (int k = 1; k <= half; k++) {
       if (!walk.advance(rest.generator() + direction * amplitude * k / half)) {
         remark += (remark.isEmpty() ? "" : "; ") + "jumps at " + Text.volts(walk.output());
-        return;
+        return true;
       }
-      levels.add(solve(walk));
+      Solved solved = solve(walk);
+      levels.add(solved);
+      if (!goOn.test(solved.level())) {
+        return false;
+      }
     }
+    return true;
   }
 
   private void refine() {
