@@ -42,7 +42,7 @@ class CureSearchTest {
        "hookups": [
         {"name": "line", "source": {"resistance": 50, "amplitude": 0.5},
          "feedback": {"kind": "nonInverting", "upper": 0},
-         "load": {"resistance": "10k", "capacitance": "470p"}},
+         "load": {"resistance": "10k", "capacitance": "47p"}},
         {"name": "open", "feedback": {"kind": "open"}}]}
       """;
 
