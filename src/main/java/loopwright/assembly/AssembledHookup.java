@@ -46,6 +46,15 @@ public record AssembledHookup(Design design, Hookup hookup, Circuit circuit, Dev
     return circuit.element("generator", VoltageSource.class);
   }
 
+  /**
+   * The source that holds the output.
+   *
+   * @throws java.util.NoSuchElementException when the output is free
+   */
+  public VoltageSource holder() {
+    return circuit.element(HookupNodes.HOLDER, VoltageSource.class);
+  }
+
   /** The positive supply. */
   public VoltageSource positiveSupply() {
     return circuit.element("supply.positive", VoltageSource.class);

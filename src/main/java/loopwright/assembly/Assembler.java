@@ -36,6 +36,28 @@ public final class Assembler {
       DeviceModels models,
       Temperatures temperatures,
       Optional<AssembledHookup> like) {
+    CircuitBuilder circuit = collect(design, hookup, models, temperatures);
+    double stray = design.surroundings().strayCapacitance().value();
+    return new AssembledHookup(
+        design, hookup, circuit.build(stray, like.map(AssembledHookup::circuit)), models);
+  }
+
+  /**
+   * The same circuit with its output held by an ideal source, {@link AssembledHookup#holder()}.
+   *
+   * @param volts at which the output is held, V
+   */
+  public static AssembledHookup assembleHeld(
+      AssembledHookup free, Temperatures temperatures, double volts) {
+    Design design = free.design();
+    CircuitBuilder circuit = collect(design, free.hookup(), free.models(), temperatures);
+    circuit.supply(HookupNodes.HOLDER, Nodes.OUT, volts);
+    double stray = design.surroundings().strayCapacitance().value();
+    return new AssembledHookup(design, free.hookup(), circuit.build(stray), free.models());
+  }
+
+  private static CircuitBuilder collect(
+      Design design, Hookup hookup, DeviceModels models, Temperatures temperatures) {
     double ambient = Physics.ZERO_CELSIUS + design.surroundings().ambient().value();
     CircuitBuilder circuit = new CircuitBuilder(ambient);
     Polarity polarity =
@@ -57,8 +79,6 @@ public final class Assembler {
     LoadAssembly.add(work, hookup);
     ExtrasAssembly.add(work, hookup);
     LoadAssembly.addProbes(work, hookup);
-    double stray = design.surroundings().strayCapacitance().value();
-    return new AssembledHookup(
-        design, hookup, circuit.build(stray, like.map(AssembledHookup::circuit)), models);
+    return circuit;
   }
 }

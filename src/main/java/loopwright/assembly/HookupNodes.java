@@ -14,5 +14,8 @@ public final class HookupNodes {
   /** The end of the source network, ahead of its lead. */
   static final String SOURCE_END = Nodes.BEHIND_LEAD + "source";
 
+  /** The source that holds the output, where one does. */
+  static final String HOLDER = "holder.out";
+
   private HookupNodes() {}
 }

@@ -84,6 +84,13 @@ public final class CircuitState {
     openDespite = NONE;
   }
 
+  /** Holds every blocking capacitor at the voltage that its like is held at in another circuit. */
+  public void holdBlockingCapacitorsAs(CircuitState other) {
+    System.arraycopy(other.held, 0, held, 0, held.length);
+    blocking = Blocking.HELD;
+    openDespite = NONE;
+  }
+
   /** Opens one blocking capacitor while the others go on holding their voltage. */
   public void openOnly(BlockingCapacitor capacitor) {
     openDespite = capacitor.index();

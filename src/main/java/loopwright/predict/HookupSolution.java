@@ -230,6 +230,11 @@ final class HookupSolution {
     return clipLow.get();
   }
 
+  /** The output short-circuited. */
+  ShortCircuit shortCircuit() {
+    return ShortCircuit.of(design, assembled(), gains, rest.get(), heldRest());
+  }
+
   /** Throws the reason where there is no loop. */
   void needLoop() {
     if (assembled().isOpen()) {

@@ -101,6 +101,28 @@ record Levels(
                     .map(low -> new Levels(reference, peak, 0, held, high, low)));
   }
 
+  /**
+   * Generator voltage at which the output would stand at its reference plus P, V, for an amplifier
+   * that follows; with an open hookup the voltage that brings it there.
+   *
+   * @param held at rest, blocking capacitors held
+   * @param direction of the output: 1 upward, −1 downward
+   * @throws UnsolvedException when an open hookup does not get there
+   */
+  static double generatorForPeak(
+      AssembledHookup hookup, HookupGains gains, CircuitState held, int direction) {
+    double peak = nominalPeak(hookup, gains);
+    if (gains.idealGain().isPresent()) {
+      return held.generator() + direction * peak / gains.idealGain().getAsDouble();
+    }
+    double target = reference(hookup, gains, held) + direction * peak;
+    CircuitState there = reach(hookup, gains, held, target);
+    if (there == null) {
+      throw new UnsolvedException("the output does not reach " + Text.volts(target));
+    }
+    return there.generator();
+  }
+
   /** What is to be said about P, or empty. */
   String remark() {
     return halvings == 0

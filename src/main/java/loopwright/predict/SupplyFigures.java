@@ -50,7 +50,10 @@ final class SupplyFigures {
             "large signal",
             "",
             CostClass.WAVEFORM,
-            solution -> FigureValue.none("not solved by this version"),
+            solution -> {
+              ShortCircuit circuit = solution.shortCircuit();
+              return FigureValue.of(circuit.current(), circuit.says());
+            },
             NoFormula.ROAD),
         rejection(
             "supplyRejectionPositive",

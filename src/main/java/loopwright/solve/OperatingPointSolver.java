@@ -61,6 +61,23 @@ public final class OperatingPointSolver {
         : solve(circuit);
   }
 
+  /**
+   * Solves again from a state whose conditions have changed a little: Newton from there, and where
+   * that fails by letting the circuit settle.
+   *
+   * @param state start on entry, solution on return
+   * @return whether it was solved
+   */
+  public static boolean solveAgain(CircuitState state) {
+    StaticSolver solver = new StaticSolver(state.circuit());
+    CircuitState start = state.copy();
+    if (solver.solve(state, NEAR_STEPS)) {
+      return true;
+    }
+    state.copyFrom(start);
+    return Settling.settle(solver, state);
+  }
+
   private static boolean follow(Continuation path) {
     try {
       return path.advance(1);
