@@ -153,16 +153,24 @@ public final class HookupFigures {
   }
 
   /**
-   * Output over generator at a frequency, small signal at rest, every capacitor in place.
+   * Voltage of a node over that of the generator at a frequency, small signal at rest, every
+   * capacitor in place.
    *
+   * @param node name of the node
    * @param frequency Hz
-   * @return real and imaginary part; empty where the circuit finds no rest
+   * @return real and imaginary part; empty where the circuit finds no rest or has no such node
    */
-  public Optional<ComplexPoint> response(double frequency) {
-    if (!solution.networkOutcome().isPresent()) {
+  public Optional<ComplexPoint> response(String node, double frequency) {
+    if (!solution.networkOutcome().isPresent() || !solution.assembled().circuit().hasNode(node)) {
       return Optional.empty();
     }
-    double[] value = solution.network().response(frequency);
+    double[] value =
+        solution
+            .network()
+            .response(
+                frequency,
+                solution.assembled().generator().branch(),
+                solution.assembled().circuit().node(node));
     return Optional.of(new ComplexPoint(frequency, value[0], value[1]));
   }
 

@@ -1,0 +1,176 @@
+package loopwright.bench;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.stream.IntStream;
+import loopwright.design.Design;
+import loopwright.design.Reading;
+import loopwright.predict.Catalogue;
+import loopwright.predict.CostClass;
+import loopwright.predict.Figure;
+import loopwright.predict.FigureValue;
+import loopwright.predict.HookupFigures;
+import loopwright.predict.TolerancedPart;
+import loopwright.predict.TolerancedParts;
+import loopwright.task.Progress;
+
+/**
+ * What every reading should show, and how it moves with every part that spreads: the first-order
+ * propagation of the tolerances (JCGM 100:2008, 5.1), each part moved by its standard uncertainty
+ * up and down.
+ */
+final class PredictedReadings {
+  private final Design design;
+  private final List<Reading> readings;
+  private final List<TolerancedPart> parts;
+  private final FigureValue[] nominal;
+  private final double[][] moves;
+
+  private PredictedReadings(Design design, List<TolerancedPart> parts) {
+    this.design = design;
+    this.readings = design.bench().readings();
+    this.parts = parts;
+    this.nominal = new FigureValue[readings.size()];
+    this.moves = new double[readings.size()][parts.size()];
+  }
+
+  /** Predicts all readings of a design. */
+  static PredictedReadings of(Design design, Progress progress) {
+    HookupFigures first = HookupFigures.of(design, design.hookups().get(0).name());
+    PredictedReadings predicted = new PredictedReadings(design, TolerancedParts.of(first));
+    List<Task> tasks = predicted.tasks();
+    int[] done = {0};
+    for (Task task : tasks) {
+      predicted.solve(task, progress);
+      done[0]++;
+      progress.report((double) done[0] / tasks.size(), "predicting what " + task.hookup + " shows");
+    }
+    predicted.looseParts(first);
+    return predicted;
+  }
+
+  /** What a reading should show, or why nothing can be said. */
+  FigureValue nominal(int reading) {
+    return nominal[reading];
+  }
+
+  /** How a reading moves when each part moves by its standard uncertainty. */
+  double[] moves(int reading) {
+    return moves[reading];
+  }
+
+  /** What spreads. */
+  List<TolerancedPart> parts() {
+    return parts;
+  }
+
+  /** Standard uncertainty of a prediction; empty where it is not known. */
+  OptionalDouble standard(int reading) {
+    double sum = 0;
+    for (double move : moves[reading]) {
+      sum += move * move;
+    }
+    return nominal[reading].number().isPresent() && Double.isFinite(sum)
+        ? OptionalDouble.of(Math.sqrt(sum))
+        : OptionalDouble.empty();
+  }
+
+  /** Readings that were taken in one circuit. */
+  private static final class Task {
+    private final Design circuit;
+    private final String hookup;
+    private final List<Integer> readings = new ArrayList<>();
+
+    Task(Design circuit, String hookup) {
+      this.circuit = circuit;
+      this.hookup = hookup;
+    }
+  }
+
+  private List<Task> tasks() {
+    Map<List<Object>, Task> tasks = new LinkedHashMap<>();
+    for (int i = 0; i < readings.size(); i++) {
+      Reading reading = readings.get(i);
+      if (reading.hookup().isPresent()) {
+        Design circuit = new Expectation(reading).circuit(design);
+        String hookup = reading.hookup().get();
+        tasks
+            .computeIfAbsent(List.of(circuit, hookup), key -> new Task(circuit, hookup))
+            .readings
+            .add(i);
+      }
+    }
+    return List.copyOf(tasks.values());
+  }
+
+  private void solve(Task task, Progress progress) {
+    HookupFigures start = HookupFigures.of(task.circuit, task.hookup);
+    for (int reading : task.readings) {
+      nominal[reading] = expected(reading, start);
+    }
+    List<TolerancedPart> own = TolerancedParts.in(parts, task.hookup);
+    int lanes = Runtime.getRuntime().availableProcessors();
+    IntStream.range(0, lanes)
+        .parallel()
+        .forEach(
+            lane -> {
+              // What is solved of a hookup serves one thread, so each lane has its own nominal.
+              HookupFigures mine = HookupFigures.of(task.circuit, task.hookup);
+              task.readings.forEach(reading -> expected(reading, mine));
+              for (int part = lane; part < own.size(); part += lanes) {
+                progress.check();
+                move(task, mine, own, part);
+              }
+            });
+  }
+
+  private void move(Task task, HookupFigures start, List<TolerancedPart> own, int part) {
+    double by = own.get(part).standardUncertainty();
+    HookupFigures up = moved(task, start, own, part, by);
+    HookupFigures down = moved(task, start, own, part, -by);
+    int column = parts.indexOf(own.get(part));
+    for (int reading : task.readings) {
+      if (isSpread(reading)) {
+        double high = expected(reading, up).number().orElse(Double.NaN);
+        double low = expected(reading, down).number().orElse(Double.NaN);
+        moves[reading][column] = (high - low) / 2;
+      } else {
+        moves[reading][column] = Double.NaN;
+      }
+    }
+  }
+
+  private static HookupFigures moved(
+      Task task, HookupFigures start, List<TolerancedPart> own, int part, double by) {
+    double[] deviations = new double[own.size()];
+    deviations[part] = by;
+    return start.of(TolerancedParts.build(task.circuit, own, deviations));
+  }
+
+  private FigureValue expected(int reading, HookupFigures figures) {
+    return new Expectation(readings.get(reading)).of(figures);
+  }
+
+  /** A solution in time for every part would take too long. */
+  private boolean isSpread(int reading) {
+    return Catalogue.find(readings.get(reading).quantity())
+        .map(Figure::cost)
+        .filter(cost -> cost == CostClass.TIME)
+        .isEmpty();
+  }
+
+  private void looseParts(HookupFigures first) {
+    for (int i = 0; i < readings.size(); i++) {
+      if (readings.get(i).hookup().isEmpty()) {
+        LoosePart loose = LoosePart.of(design, first, readings.get(i));
+        nominal[i] = loose.nominal();
+        for (int part = 0; part < parts.size(); part++) {
+          moves[i][part] = loose.move(parts.get(part));
+        }
+      }
+    }
+  }
+}
