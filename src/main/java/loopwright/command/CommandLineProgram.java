@@ -30,6 +30,7 @@ public final class CommandLineProgram {
   public int run(String[] arguments, Console console) {
     CommandLine line = new CommandLine(new TopCommand());
     line.addSubcommand(new PredictCommand(services, console));
+    line.addSubcommand(new SizeCommand(services, console));
     line.addSubcommand(new CompareCommand(services, console));
     line.addSubcommand(new SpreadCommand(services, console));
     line.addSubcommand(new CureCommand(services, console));
@@ -48,7 +49,12 @@ public final class CommandLineProgram {
 
   /** The words that a call may begin with. */
   public static Set<String> subCommands() {
-    return Set.of(PredictCommand.NAME, CompareCommand.NAME, SpreadCommand.NAME, CureCommand.NAME);
+    return Set.of(
+        PredictCommand.NAME,
+        SizeCommand.NAME,
+        CompareCommand.NAME,
+        SpreadCommand.NAME,
+        CureCommand.NAME);
   }
 
   private static PrintWriter writer(java.io.PrintStream stream) {

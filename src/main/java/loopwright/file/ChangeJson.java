@@ -10,7 +10,10 @@ import loopwright.design.Change;
 import loopwright.quantity.Quantity;
 import loopwright.quantity.QuantityException;
 
-/** Changes to a design as JSON: values as SI numbers where they are numbers, else as text. */
+/**
+ * Changes to a design as JSON: values as SI numbers where they are numbers, else as text; null
+ * takes away what stands there.
+ */
 final class ChangeJson {
   private ChangeJson() {}
 
@@ -24,6 +27,9 @@ final class ChangeJson {
   }
 
   private static Json value(String written) {
+    if (written.isBlank()) {
+      return ResultJson.nothing();
+    }
     try {
       return number(Quantity.parseAny(written).quantity().value());
     } catch (QuantityException e) {

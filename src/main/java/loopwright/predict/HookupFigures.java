@@ -9,6 +9,7 @@ import loopwright.assembly.Nodes;
 import loopwright.circuit.Element;
 import loopwright.design.Design;
 import loopwright.design.Hookup;
+import loopwright.part.TransistorParameters;
 
 /**
  * The figures of one hookup, each solved when it is asked for and then kept, with all that they
@@ -113,6 +114,30 @@ public final class HookupFigures {
   /** Devices at rest by role; empty where the circuit finds no rest. */
   public Map<String, DeviceState> devices() {
     return solution.restOutcome().isPresent() ? solution.devices() : Map.of();
+  }
+
+  /**
+   * Parameters at 25 °C of a transistor, for hand estimates.
+   *
+   * @throws UnsolvedException with the reason when the circuit finds no rest
+   * @throws IllegalArgumentException when no device has this role
+   */
+  public TransistorParameters transistor(String role) {
+    return solution.assembled().models().transistor(role);
+  }
+
+  /** Gain from generator to output at a level, blocking capacitors held, or why there is none. */
+  public FigureValue midbandGain(Level level) {
+    Outcome<FigureValue> gain =
+        Outcome.of(
+            () ->
+                FigureValue.of(
+                    switch (level) {
+                      case REST -> solution.midbandRest().gain();
+                      case HIGH -> solution.midbandHigh().gain();
+                      case LOW -> solution.midbandLow().gain();
+                    }));
+    return gain.isPresent() ? gain.value() : FigureValue.none(gain.reason());
   }
 
   /**
