@@ -35,6 +35,7 @@ final class HookupSolution {
   private final Lazy<LoopMargins> margins;
   private final Lazy<UnityCrossing> crossing;
   private final Lazy<ClosedLoop> closedLoop;
+  private final Lazy<HookupNoise> noise;
   private final Lazy<SwingStability> swing;
   private final Lazy<ClipLevel> clipHigh;
   private final Lazy<ClipLevel> clipLow;
@@ -80,6 +81,7 @@ final class HookupSolution {
                   .orElseGet(() -> margins().crossing());
             });
     this.closedLoop = new Lazy<>(this::closedLoopAtRest);
+    this.noise = new Lazy<>(() -> new HookupNoise(this));
     this.swing = new Lazy<>(() -> new SwingStability(assembled(), heldRest()));
     this.clipHigh = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().high(), 1));
     this.clipLow = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().low(), -1));
@@ -191,6 +193,11 @@ final class HookupSolution {
 
   ClosedLoop closedLoop() {
     return closedLoop.get();
+  }
+
+  /** Noise at rest. */
+  HookupNoise noise() {
+    return noise.get();
   }
 
   SwingStability swing() {
