@@ -29,7 +29,7 @@ final class FiguresAssembly {
         Nodes.OUT);
     Quantity resistance = amplifier.inputResistance();
     if (Double.isFinite(resistance.value())) {
-      circuit.resistor(
+      circuit.noiselessResistor(
           "amplifier.inputResistance",
           Nodes.IN_PLUS,
           HookupNodes.IN_MINUS_AMPLIFIER,

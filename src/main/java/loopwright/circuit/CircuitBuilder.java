@@ -79,8 +79,22 @@ public final class CircuitBuilder {
     withoutStray.add(node(name));
   }
 
-  /** A resistor; 0 Ω joins its nodes. */
+  /** A resistor at ambient temperature; 0 Ω joins its nodes. */
   public void resistor(String name, String from, String to, double resistance) {
+    resistor(name, from, to, resistance, kelvin);
+  }
+
+  /**
+   * A resistance that stands for no part: it makes no noise.
+   *
+   * @param resistance Ω; 0 joins its nodes
+   */
+  public void noiselessResistor(String name, String from, String to, double resistance) {
+    resistor(name, from, to, resistance, 0);
+  }
+
+  private void resistor(
+      String name, String from, String to, double resistance, double temperature) {
     if (resistance == 0) {
       join(from, to);
       return;
@@ -88,7 +102,7 @@ public final class CircuitBuilder {
     node(from);
     node(to);
     conducts(from, to);
-    plans.add(() -> new Resistor(name, index(from), index(to), resistance, this));
+    plans.add(() -> new Resistor(name, index(from), index(to), resistance, temperature, this));
   }
 
   /** A capacitor that is open in every static state; 0 F is none. */
@@ -144,7 +158,14 @@ public final class CircuitBuilder {
     plans.add(
         () ->
             new Inductor(
-                name, index(from), index(to), branchIndex(branch), resistance, inductance, this));
+                name,
+                index(from),
+                index(to),
+                branchIndex(branch),
+                resistance,
+                inductance,
+                kelvin,
+                this));
   }
 
   /** The generator, from ground to a node, at its rest voltage. */
@@ -178,16 +199,26 @@ public final class CircuitBuilder {
       String emitter,
       TransistorParameters parameters,
       double kelvin) {
-    String c = behind(role, "collector", collector, parameters.collectorResistance());
-    String b = behind(role, "base", base, parameters.baseResistance());
-    String e = behind(role, "emitter", emitter, parameters.emitterResistance());
+    String c = behind(role, "collector", collector, parameters.collectorResistance(), kelvin);
+    String b = behind(role, "base", base, parameters.baseResistance(), kelvin);
+    String e = behind(role, "emitter", emitter, parameters.emitterResistance(), kelvin);
     conducts(c, b);
     conducts(b, e);
     int at = memory;
     memory += 2;
     TransistorEquations equations = new TransistorEquations(parameters, kelvin);
     plans.add(
-        () -> new Transistor(role, polarity, index(c), index(b), index(e), equations, at, this));
+        () ->
+            new Transistor(
+                role,
+                polarity,
+                index(c),
+                index(b),
+                index(e),
+                equations,
+                at,
+                parameters.flickerCorner(),
+                this));
     devices.add(DeviceTerminals.Named.transistor(role, polarity, collector, base, emitter));
   }
 
@@ -198,7 +229,7 @@ public final class CircuitBuilder {
    */
   public void diode(
       String role, String anode, String cathode, DiodeParameters parameters, double kelvin) {
-    String a = behind(role, "anode", anode, parameters.seriesResistance());
+    String a = behind(role, "anode", anode, parameters.seriesResistance(), kelvin);
     node(cathode);
     conducts(a, cathode);
     int at = memory++;
@@ -284,14 +315,15 @@ public final class CircuitBuilder {
     return pattern.slot(row, column);
   }
 
-  private String behind(String role, String terminal, String outer, double resistance) {
+  private String behind(
+      String role, String terminal, String outer, double resistance, double junction) {
     node(outer);
     if (resistance == 0) {
       return outer;
     }
     String inner = role + ".inner." + terminal;
     withoutStray(inner);
-    resistor(role + "." + terminal + "Resistance", outer, inner, resistance);
+    resistor(role + "." + terminal + "Resistance", outer, inner, resistance, junction);
     return inner;
   }
 
@@ -345,7 +377,7 @@ public final class CircuitBuilder {
       String shore = shore(island, name);
       String ground = shore(island, root(GROUND));
       if (!shore.equals(ground)) {
-        resistor(LEAKAGE_PREFIX + name, name, GROUND, 1 / LEAKAGE);
+        noiselessResistor(LEAKAGE_PREFIX + name, name, GROUND, 1 / LEAKAGE);
         island.put(shore, ground);
       }
     }

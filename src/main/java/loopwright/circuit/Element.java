@@ -1,5 +1,7 @@
 package loopwright.circuit;
 
+import java.util.List;
+
 /**
  * An element of a circuit: two-terminal parts, devices, sources and leads. It is immutable; what it
  * remembers between evaluations lives in the {@link CircuitState}.
@@ -28,5 +30,15 @@ public sealed interface Element
    */
   default void exciteSources(CircuitState state, double[] rightHandSide) {
     // Most elements are no sources.
+  }
+
+  /**
+   * Adds what noise this element makes at a state.
+   *
+   * @param state solved
+   * @param sources added to
+   */
+  default void addNoise(CircuitState state, List<NoiseSource> sources) {
+    // Sources, leads, capacitors and amplifiers known by their figures make none.
   }
 }

@@ -1,5 +1,7 @@
 package loopwright.circuit;
 
+import java.util.List;
+
 /** An inductor with its series resistance; its current i is an unknown: v − (R + sL) i = 0. */
 public final class Inductor implements Element {
   private final String name;
@@ -8,12 +10,18 @@ public final class Inductor implements Element {
   private final int branch;
   private final double resistance;
   private final double inductance;
+  private final double kelvin;
   private final int fromBranch;
   private final int toBranch;
   private final int branchFrom;
   private final int branchTo;
   private final int branchBranch;
 
+  /**
+   * @param resistance in series, Ω
+   * @param inductance H
+   * @param kelvin temperature, K
+   */
   Inductor(
       String name,
       int from,
@@ -21,6 +29,7 @@ public final class Inductor implements Element {
       int branch,
       double resistance,
       double inductance,
+      double kelvin,
       CircuitBuilder builder) {
     this.name = name;
     this.from = from;
@@ -28,6 +37,7 @@ public final class Inductor implements Element {
     this.branch = branch;
     this.resistance = resistance;
     this.inductance = inductance;
+    this.kelvin = kelvin;
     this.fromBranch = builder.slot(from, branch);
     this.toBranch = builder.slot(to, branch);
     this.branchFrom = builder.slot(branch, from);
@@ -38,6 +48,12 @@ public final class Inductor implements Element {
   @Override
   public String name() {
     return name;
+  }
+
+  /** The noise voltage of the resistance stands in series, in the equation of the branch. */
+  @Override
+  public void addNoise(CircuitState state, List<NoiseSource> sources) {
+    NoiseSource.addThermal(name, -1, branch, resistance, kelvin, sources);
   }
 
   @Override

@@ -1,5 +1,7 @@
 package loopwright.circuit;
 
+import java.util.List;
+
 /** A diode between its internal nodes; its series resistance is a resistor of its own. */
 public final class JunctionDiode implements Element {
   private final String role;
@@ -38,6 +40,12 @@ public final class JunctionDiode implements Element {
   public double current(CircuitState state) {
     equations.evaluate(voltage(state));
     return equations.current();
+  }
+
+  @Override
+  public void addNoise(CircuitState state, List<NoiseSource> sources) {
+    NoiseSource.addShot(
+        role, NoiseSource.Cause.DIODE_SHOT, anode, cathode, current(state), sources);
   }
 
   @Override

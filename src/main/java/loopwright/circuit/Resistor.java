@@ -1,18 +1,27 @@
 package loopwright.circuit;
 
+import java.util.List;
+
 /** A resistor. */
 public final class Resistor implements Element {
   private final String name;
   private final int from;
   private final int to;
   private final double conductance;
+  private final double kelvin;
   private final TwoTerminalSlots slots;
 
-  Resistor(String name, int from, int to, double resistance, CircuitBuilder builder) {
+  /**
+   * @param resistance Ω
+   * @param kelvin temperature, K; 0 for one that stands for no part and makes no noise
+   */
+  Resistor(
+      String name, int from, int to, double resistance, double kelvin, CircuitBuilder builder) {
     this.name = name;
     this.from = from;
     this.to = to;
     this.conductance = 1 / resistance;
+    this.kelvin = kelvin;
     this.slots = new TwoTerminalSlots(builder, from, to);
   }
 
@@ -34,6 +43,11 @@ public final class Resistor implements Element {
   /** Index of its second node. */
   public int to() {
     return to;
+  }
+
+  @Override
+  public void addNoise(CircuitState state, List<NoiseSource> sources) {
+    NoiseSource.addThermal(name, from, to, conductance, kelvin, sources);
   }
 
   @Override

@@ -1,5 +1,6 @@
 package loopwright.circuit;
 
+import java.util.List;
 import loopwright.part.Polarity;
 
 /**
@@ -14,6 +15,7 @@ public final class Transistor implements Element {
   private final int emitter;
   private final TransistorEquations equations;
   private final int memory;
+  private final double flickerCorner;
   private final int[] slots = new int[9];
 
   Transistor(
@@ -24,6 +26,7 @@ public final class Transistor implements Element {
       int emitter,
       TransistorEquations equations,
       int memory,
+      double flickerCorner,
       CircuitBuilder builder) {
     this.role = role;
     this.sign = polarity.sign();
@@ -32,6 +35,7 @@ public final class Transistor implements Element {
     this.emitter = emitter;
     this.equations = equations;
     this.memory = memory;
+    this.flickerCorner = flickerCorner;
     int[] nodes = {collector, base, emitter};
     for (int row = 0; row < 3; row++) {
       for (int column = 0; column < 3; column++) {
@@ -76,6 +80,27 @@ public final class Transistor implements Element {
   public double transconductance(CircuitState state) {
     equations.evaluate(baseEmitter(state), baseCollector(state));
     return equations.collectorByBaseEmitter();
+  }
+
+  /** Whether its flicker corner is known. */
+  public boolean knowsFlicker() {
+    return flickerCorner > 0;
+  }
+
+  /** Shot noise of both currents, and the base current's flicker where a corner is known. */
+  @Override
+  public void addNoise(CircuitState state, List<NoiseSource> sources) {
+    equations.evaluate(baseEmitter(state), baseCollector(state));
+    NoiseSource.addShot(
+        role,
+        NoiseSource.Cause.COLLECTOR_SHOT,
+        collector,
+        emitter,
+        equations.collectorCurrent(),
+        sources);
+    NoiseSource.addShot(
+        role, NoiseSource.Cause.BASE_SHOT, base, emitter, equations.baseCurrent(), sources);
+    NoiseSource.addFlicker(role, base, emitter, equations.baseCurrent(), flickerCorner, sources);
   }
 
   @Override

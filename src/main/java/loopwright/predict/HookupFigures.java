@@ -199,6 +199,25 @@ public final class HookupFigures {
     return Optional.of(new ComplexPoint(frequency, value[0], value[1]));
   }
 
+  /**
+   * Noise at a frequency, at rest, with who makes it.
+   *
+   * @param frequency Hz, above zero
+   * @return empty where the figure {@code inputNoise} has a reason
+   */
+  public Optional<NoiseDensity> noiseDensity(double frequency) {
+    return Optional.ofNullable(Outcome.of(() -> solution.noise().density(frequency)).value());
+  }
+
+  /**
+   * Noise from 10 Hz to 100 kHz, at rest, with who makes it.
+   *
+   * @return empty where the figure {@code outputNoise} has a reason
+   */
+  public Optional<NoiseBand> noiseBand() {
+    return Optional.ofNullable(Outcome.of(() -> solution.noise().band()).value());
+  }
+
   private static Hookup find(Design design, String name) {
     return design
         .hookup(name)

@@ -38,6 +38,7 @@ final class HookupSolution {
   private final Lazy<UnityCrossing> crossingHigh;
   private final Lazy<UnityCrossing> crossingLow;
   private final Lazy<ClosedLoop> closedLoop;
+  private final Lazy<HookupNoise> noise;
   private final Lazy<SwingStability> swing;
   private final Lazy<ClipLevel> clipHigh;
   private final Lazy<ClipLevel> clipLow;
@@ -87,6 +88,7 @@ final class HookupSolution {
     this.crossingLow =
         new Lazy<>(() -> crossingAt(levels().low(), near.flatMap(o -> o.crossingLow.ifSolved())));
     this.closedLoop = new Lazy<>(this::closedLoopAtRest);
+    this.noise = new Lazy<>(() -> new HookupNoise(this));
     this.swing = new Lazy<>(() -> new SwingStability(assembled(), heldRest()));
     this.clipHigh = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().high(), 1));
     this.clipLow = new Lazy<>(() -> ClipLevel.outward(assembled(), gains, levels().low(), -1));
@@ -212,6 +214,11 @@ final class HookupSolution {
 
   ClosedLoop closedLoop() {
     return closedLoop.get();
+  }
+
+  /** Noise at rest. */
+  HookupNoise noise() {
+    return noise.get();
   }
 
   SwingStability swing() {

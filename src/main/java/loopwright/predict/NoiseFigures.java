@@ -4,10 +4,13 @@ import static loopwright.quantity.Unit.VOLT;
 import static loopwright.quantity.Unit.VOLT_PER_ROOT_HERTZ;
 
 import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /** Noise at input and output. */
 final class NoiseFigures {
-  private static final String NOT_YET = "not solved by this version: the noise solver comes later";
+  /** A solved gain further from the ideal one than this, as a ratio, is worth a remark. */
+  private static final double WORTH_SAYING = 1.05;
 
   private NoiseFigures() {}
 
@@ -17,12 +20,13 @@ final class NoiseFigures {
             "inputNoise",
             "Input noise",
             VOLT_PER_ROOT_HERTZ,
-            "Noise density at signal frequency, referred to the generator through the ideal gain.",
+            "Noise density at signal frequency, referred to the generator through the ideal gain; with"
+                + " an open hookup through the gain solved at that frequency.",
             "at rest",
             "root of 2·4kT(r_B + R_E + 1/(2g_m)) + 4kT R₊ + 4kT(upper ∥ lower)"
                 + " + 2q I_B (R₊² + (upper ∥ lower)²)",
             CostClass.LINEAR,
-            solution -> FigureValue.none(NOT_YET),
+            NoiseFigures::inputNoise,
             SwingFormulas::inputNoise),
         new Figure(
             "outputNoise",
@@ -32,7 +36,66 @@ final class NoiseFigures {
             "at rest",
             "",
             CostClass.LINEAR,
-            solution -> FigureValue.none(NOT_YET),
+            NoiseFigures::outputNoise,
             NoFormula.ROAD));
+  }
+
+  private static FigureValue inputNoise(HookupSolution solution) {
+    HookupNoise noise = solution.noise();
+    NoiseDensity density = noise.density(solution.hookup().source().frequency().value());
+    return FigureValue.of(
+        density.input(),
+        sentence(loudest(density.shares()), referred(solution, density), noise.remark()));
+  }
+
+  private static FigureValue outputNoise(HookupSolution solution) {
+    NoiseBand band = solution.noise().band();
+    return FigureValue.of(
+        band.output(),
+        sentence(
+            "from " + Text.hertz(HookupNoise.LOW) + " to " + Text.hertz(HookupNoise.HIGH),
+            loudest(band.shares()),
+            openAt(solution),
+            solution.noise().remark()));
+  }
+
+  private static String loudest(List<NoiseShare> shares) {
+    if (shares.isEmpty()) {
+      return "nothing makes noise";
+    }
+    NoiseShare first = shares.get(0);
+    return Math.round(100 * first.share())
+        + " % of its power from "
+        + first.name()
+        + " ("
+        + first.cause()
+        + ")";
+  }
+
+  private static String referred(HookupSolution solution, NoiseDensity density) {
+    if (solution.assembled().isOpen()) {
+      return "referred through the solved gain of "
+          + Text.ratio(density.gain())
+          + ", "
+          + openAt(solution);
+    }
+    double solved = solution.noise().solvedGain(density.frequency());
+    double apart = Math.max(solved / density.gain(), density.gain() / solved);
+    return apart < WORTH_SAYING
+        ? ""
+        : "through the solved gain of "
+            + Text.ratio(solved)
+            + " it would be "
+            + Text.of(density.output() / solved, VOLT_PER_ROOT_HERTZ);
+  }
+
+  private static String openAt(HookupSolution solution) {
+    return solution.assembled().isOpen()
+        ? "generator at " + Text.volts(solution.linearRest().generator())
+        : "";
+  }
+
+  private static String sentence(String... parts) {
+    return Stream.of(parts).filter(part -> !part.isEmpty()).collect(Collectors.joining("; "));
   }
 }

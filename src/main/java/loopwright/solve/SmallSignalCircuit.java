@@ -102,6 +102,26 @@ public class SmallSignalCircuit {
   }
 
   /**
+   * What an excitation of 1 in each row gives in one unknown, for all rows at once: one solution of
+   * the transposed system, which is that of the adjoint network (Director and Rohrer, IEEE
+   * Transactions on Circuit Theory 16, 1969, 318–323).
+   *
+   * @param frequency Hz
+   * @param unknown the unknown read; not ground
+   * @return interleaved by row; valid until the next solution, not to be changed
+   * @throws ArithmeticException when the network is singular there
+   */
+  public final double[] transfersTo(double frequency, int unknown) {
+    if (!system.factor(g, c, 0, 2 * Math.PI * frequency)) {
+      throw new ArithmeticException("the small-signal circuit is singular at " + frequency + " Hz");
+    }
+    Arrays.fill(first, 0);
+    first[2 * unknown] = 1;
+    system.solveTransposed(first);
+    return first;
+  }
+
+  /**
    * Loop gain by double injection in a lead (Middlebrook, International Journal of Electronics 38,
    * 1975, 485–512): T_v = −v(network side)/v(amplifier side) with a series voltage; T_i = i into
    * the network/i into the amplifier with a current into the amplifier's side; T = (T_v T_i −

@@ -34,6 +34,32 @@ public final class IdealParts {
         here / Physics.saturationCurrentFactor(kelvin), beta / Physics.betaFactor(kelvin));
   }
 
+  /**
+   * These parameters with a base resistance and a flicker corner.
+   *
+   * @param resistance r_B, Ω
+   * @param corner Hz; 0 for none
+   */
+  public static TransistorParameters withNoise(
+      TransistorParameters p, double resistance, double corner) {
+    return new TransistorParameters(
+        p.saturationCurrent(),
+        p.forwardBeta(),
+        p.reverseBeta(),
+        p.earlyVoltage(),
+        p.kneeCurrent(),
+        p.recombinationCurrent(),
+        p.recombinationIdeality(),
+        resistance,
+        p.emitterResistance(),
+        p.collectorResistance(),
+        p.baseEmitterCapacitance(),
+        p.baseCollectorCapacitance(),
+        p.transitTime(),
+        p.reverseTransitTime(),
+        corner);
+  }
+
   /** Temperature at which kT/q is a given voltage, K. */
   public static double kelvinWhere(double thermalVoltage) {
     return thermalVoltage * Physics.ELEMENTARY_CHARGE / Physics.BOLTZMANN;
