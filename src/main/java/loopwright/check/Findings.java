@@ -10,8 +10,19 @@ public final class Findings {
       List.of(
           new FailureCheck(),
           new StabilityCheck(),
+          new OutputRestCheck(),
+          new GainStageCheck(),
+          new SaturationCheck(),
+          new SwingRoomCheck(),
+          new DcPathCheck(),
+          new RecordLimitsCheck(),
+          new HotJunctionCheck(),
           new RailsCheck(),
           new ReverseJunctionCheck(),
+          new BuildLimitsCheck(),
+          new PairBalanceCheck(),
+          new DividerLoadCheck(),
+          new LoopGainCheck(),
           new SolveNoteCheck());
 
   private Findings() {}

@@ -3,6 +3,7 @@ package loopwright.check;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import loopwright.design.Change;
 import loopwright.design.Design;
 import loopwright.predict.FigureResult;
 import loopwright.predict.HookupPrediction;
@@ -10,12 +11,18 @@ import loopwright.predict.Root;
 import loopwright.predict.SwingLevel;
 import loopwright.quantity.EngineeringFormat;
 import loopwright.quantity.Unit;
+import loopwright.sizing.Compensation;
 
 /** Something that grows: at rest, at some level of the swing, or latching. */
 final class StabilityCheck implements Check {
   @Override
   public List<Finding> check(Design design, HookupPrediction prediction) {
     List<Finding> findings = new ArrayList<>();
+    boolean everStable = prediction.overSwing().stream().allMatch(SwingLevel::stable);
+    Optional<Compensation> cure =
+        everStable && prediction.unstablePoles().isEmpty()
+            ? Optional.empty()
+            : Compensation.of(design, prediction.hookup().name());
     String where = "hookups." + prediction.hookup().name();
     for (Root root : prediction.unstablePoles()) {
       findings.add(
@@ -33,16 +40,35 @@ final class StabilityCheck implements Check {
                   "Oscillates at rest: it grows at "
                       + EngineeringFormat.format(root.im() / (2 * Math.PI), Unit.HERTZ)
                       + ".",
-                  ""));
+                  remedy(cure),
+                  changes(cure)));
     }
     boolean overSwing = prediction.overSwing().stream().anyMatch(level -> !level.stable());
     if (overSwing && prediction.unstablePoles().isEmpty()) {
-      findings.add(overSwing(prediction, where));
+      findings.add(overSwing(prediction, where, cure));
     }
     return findings;
   }
 
-  private static Finding overSwing(HookupPrediction prediction, String where) {
+  private static String remedy(Optional<Compensation> cure) {
+    return cure.map(
+            found ->
+                "A compensation capacitor of "
+                    + EngineeringFormat.format(found.capacitance(), Unit.FARAD, 3)
+                    + " keeps every level stable, with "
+                    + EngineeringFormat.format(Compensation.MARGIN, Unit.DEGREE, 2)
+                    + " of phase margin or more.")
+        .orElse(
+            "No compensation capacitor alone keeps every level stable; look for an isolation"
+                + " resistor, a snubber or a lead capacitor.");
+  }
+
+  private static List<Change> changes(Optional<Compensation> cure) {
+    return cure.map(found -> List.of(found.change())).orElse(List.of());
+  }
+
+  private static Finding overSwing(
+      HookupPrediction prediction, String where, Optional<Compensation> cure) {
     double least =
         prediction.overSwing().stream()
             .filter(level -> !level.stable())
@@ -63,6 +89,7 @@ final class StabilityCheck implements Check {
             + " on: "
             + how
             + ".",
-        "");
+        remedy(cure),
+        changes(cure));
   }
 }

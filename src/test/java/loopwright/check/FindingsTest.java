@@ -3,6 +3,7 @@ package loopwright.check;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
+import loopwright.design.Change;
 import loopwright.design.Design;
 import loopwright.file.DesignText;
 import loopwright.predict.Predictor;
@@ -107,5 +108,140 @@ class FindingsTest {
               assertThat(finding.where()).endsWith("source.couplingCapacitance");
               assertThat(finding.says()).contains("above a tenth of the signal frequency");
             });
+  }
+
+  private static Finding at(String json, String where, String says) {
+    return findings(json).stream()
+        .filter(finding -> finding.where().equals(where) && finding.says().contains(says))
+        .findFirst()
+        .orElseThrow(() -> new AssertionError("not found at " + where + ": " + findings(json)));
+  }
+
+  /** Making the changes of a remedy leaves no finding of that kind. */
+  private static void cures(String json, Finding finding) {
+    assertThat(finding.changes()).isNotEmpty();
+    Design cured = Change.applyAll(DesignText.read(json), finding.changes());
+    List<Finding> left =
+        Findings.of(Predictor.predict(cured, List.of(), new double[] {1e3}, Progress.none()));
+    String kind = finding.says().substring(0, Math.min(16, finding.says().length()));
+    assertThat(left)
+        .noneMatch(other -> other.where().equals(finding.where()) && other.says().startsWith(kind));
+  }
+
+  @Test
+  void theCompensationThatCuresAnOscillationIsProposed() {
+    String fast =
+        SOUND
+            .replace("\"capacitance\": \"150p\", \"resistance\": 100", "\"capacitance\": \"3p\"")
+            .replace("\"emitterResistance\": 100,", "")
+            .replace("\"upper\": \"10k\", \"lower\": \"1k\"", "\"upper\": 0")
+            .replace(
+                "\"resistance\": \"10k\"}", "\"resistance\": \"10k\", \"capacitance\": \"2n\"}");
+    Finding finding = at(fast, "hookups.divider", "Oscillates");
+    assertThat(finding.remedy()).contains("compensation capacitor");
+    cures(fast, finding);
+  }
+
+  @Test
+  void aPairOutOfBalanceIsFoundWithTheResistorThatCentresIt() {
+    String apart = SOUND.replace("\"output\": \"1k5\"", "\"output\": \"1k\"");
+    Finding finding = at(apart, "amplifier.inputPair", "out of balance");
+    assertThat(finding.severity()).isEqualTo(Finding.Severity.RISKY);
+    assertThat(finding.remedy()).contains("centres the output").contains("leaves");
+    cures(apart, finding);
+  }
+
+  @Test
+  void aGainStageThatIsCutOffIsFound() {
+    String cut = SOUND.replace("\"output\": \"1k5\"", "\"output\": \"150\"");
+    Finding finding = at(cut, "gain.q1", "cut off");
+    assertThat(finding.remedy()).contains("load resistor");
+    cures(cut, finding);
+  }
+
+  @Test
+  void aSaturatedGainStageAndAnOutputAtTheRailAreFound() {
+    String saturated =
+        SOUND
+            .replace("\"amplitude\": 0.1", "\"dc\": 2")
+            .replace("\"upper\": \"10k\"", "\"upper\": \"47k\"");
+    assertThat(at(saturated, "gain.q1", "saturated").severity()).isEqualTo(Finding.Severity.FAILS);
+    assertThat(at(saturated, "out", "rests at").says()).contains("positive rail");
+  }
+
+  @Test
+  void anOutputThatClipsBelowItsPeakIsFound() {
+    String large = SOUND.replace("\"amplitude\": 0.1", "\"amplitude\": 1.5");
+    Finding finding = at(large, "hookups.divider", "clips at");
+    assertThat(finding.remedy()).contains("An amplitude of");
+  }
+
+  @Test
+  void aDeviceBeyondItsRecordIsFound() {
+    String weak =
+        SOUND.replace(
+            "\"limits\": {\"emitterBaseVoltage\": 6}}",
+            "\"limits\": {\"emitterBaseVoltage\": 6, \"collectorEmitterVoltage\": 10,"
+                + " \"collectorCurrent\": \"1m\", \"power\": \"10m\"}}");
+    assertThat(at(weak, "gain.q1", "collector-emitter voltage").says()).contains("limit of 10 V");
+    assertThat(at(weak, "gain.q1", "collector current").says()).contains("limit of 1 mA");
+    assertThat(at(weak, "gain.q1", "dissipation").severity()).isEqualTo(Finding.Severity.FAILS);
+  }
+
+  @Test
+  void aHotJunctionIsFound() {
+    String hot =
+        SOUND.replace(
+            "\"limits\": {\"emitterBaseVoltage\": 6}}",
+            "\"limits\": {\"emitterBaseVoltage\": 6, \"thermalResistance\": 9000,"
+                + " \"junctionTemperature\": 150}}");
+    assertThat(at(hot, "gain.q1", "junction would reach").remedy()).contains("heat sink");
+    assertThat(at(hot, "gain.q1", "The junction of gain.q1").says()).contains("150 °C");
+  }
+
+  @Test
+  void aBaseWithoutDcPathIsFound() {
+    String blocked =
+        SOUND.replace("\"amplitude\": 0.1", "\"amplitude\": 0.1, \"couplingCapacitance\": \"10u\"");
+    Finding finding = at(blocked, "hookups.divider.source", "no dc path");
+    cures(blocked, finding);
+    String fed =
+        SOUND.replace(
+            "\"amplitude\": 0.1",
+            "\"amplitude\": 0.1, \"couplingCapacitance\": \"10u\", \"biasResistance\": \"10k\"");
+    assertThat(findings(fed)).noneMatch(other -> other.says().contains("no dc path"));
+  }
+
+  @Test
+  void aHeavyDividerIsFound() {
+    String heavy =
+        SOUND.replace("\"upper\": \"10k\", \"lower\": \"1k\"", "\"upper\": 1000, \"lower\": 100");
+    Finding finding = at(heavy, "hookups.divider.feedback", "divider is heavy");
+    cures(heavy, finding);
+  }
+
+  @Test
+  void aLoopGainTooLowForTheLimitsIsFound() {
+    String accurate =
+        SOUND.replace(
+            "\"hookups\":",
+            "\"limits\": [{\"hookup\": \"divider\", \"figure\": \"closedLoopGain\","
+                + " \"minimum\": 10.99, \"maximum\": 11.01}], \"hookups\":");
+    Finding finding = at(accurate, "hookups.divider.feedback", "finite gain alone takes");
+    assertThat(finding.changes())
+        .singleElement()
+        .satisfies(change -> assertThat(change.path()).isEqualTo("hookups.divider.feedback.upper"));
+    assertThat(at(accurate, "limits.0", "Closed-loop gain is").says())
+        .contains("below the limit of 10.99");
+  }
+
+  @Test
+  void aBuildWithinItsLimitsIsNotFound() {
+    String wide =
+        SOUND.replace(
+            "\"hookups\":",
+            "\"limits\": [{\"hookup\": \"divider\", \"figure\": \"closedLoopGain\","
+                + " \"minimum\": 9, \"maximum\": 12}], \"hookups\":");
+    assertThat(findings(wide)).isEmpty();
   }
 }

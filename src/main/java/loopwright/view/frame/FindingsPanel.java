@@ -26,18 +26,24 @@ final class FindingsPanel extends JPanel {
   private final JPanel list = new Entries();
   private final transient Function<String, Optional<String>> blockAt;
   private final transient Consumer<String> onShow;
+  private final transient Consumer<Finding> onApply;
   private transient List<Finding> findings = List.of();
   private String says = "";
 
   /**
    * @param blockAt finds the block that a place belongs to
    * @param onShow shows a block
+   * @param onApply makes the changes of a finding's remedy
    */
-  FindingsPanel(Function<String, Optional<String>> blockAt, Consumer<String> onShow) {
+  FindingsPanel(
+      Function<String, Optional<String>> blockAt,
+      Consumer<String> onShow,
+      Consumer<Finding> onApply) {
     super(new BorderLayout(0, 6));
     Theme.style(this, "card");
     this.blockAt = blockAt;
     this.onShow = onShow;
+    this.onApply = onApply;
     list.setName("findings");
     add(title, BorderLayout.NORTH);
     JScrollPane scroll =
@@ -98,6 +104,9 @@ final class FindingsPanel extends JPanel {
     list.add(block.map(id -> showButton(finding, id)).orElseGet(JLabel::new), "top");
     if (!finding.remedy().isEmpty()) {
       list.add(text(finding.remedy(), "note"), "newline, skip 1, growx, wmin 0, gaptop 0");
+      if (!finding.changes().isEmpty()) {
+        list.add(applyButton(finding), "newline, skip 1, left, gaptop 0");
+      }
     }
   }
 
@@ -106,6 +115,15 @@ final class FindingsPanel extends JPanel {
     button.setToolTipText(finding.where());
     button.getAccessibleContext().setAccessibleName("Show " + finding.where());
     button.addActionListener(event -> onShow.accept(block));
+    return button;
+  }
+
+  private JComponent applyButton(Finding finding) {
+    JButton button = Theme.style(new JButton(RemedyWords.button(finding)), "pill");
+    button.setName("remedy." + finding.where());
+    button.setToolTipText(RemedyWords.changes(finding));
+    button.getAccessibleContext().setAccessibleDescription(finding.says());
+    button.addActionListener(event -> onApply.accept(finding));
     return button;
   }
 
