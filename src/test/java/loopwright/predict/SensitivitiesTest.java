@@ -5,8 +5,11 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
+import java.util.Map;
 import loopwright.circuit.Parameter;
 import loopwright.design.Design;
+import loopwright.design.RandomDesigns;
+import loopwright.design.Surroundings;
 import loopwright.file.DesignText;
 import loopwright.predict.PartSensitivity.Method;
 import loopwright.task.Progress;
@@ -168,6 +171,49 @@ class SensitivitiesTest {
     assertThat(upper.error()).isPositive();
     assertThat(upper.slope().orElseThrow() / gain.value().number().orElseThrow())
         .isCloseTo(0.9 / 1.01, within(2e-3));
+  }
+
+  /** A divided source: in+ stands at 1 V · R_bias/(R_source + R_bias) = 0.9 V. */
+  @Test
+  void aNodesVoltageMovesAsItsDividerDoes() {
+    Design design =
+        figures(
+            "\"gain\": 1000",
+            "\"source\": {\"dc\": 1, \"resistance\": \"1k\", \"biasResistance\": \"9k\"}, "
+                + TENFOLD);
+    Map<String, List<PartSensitivity>> nodes =
+        Sensitivities.ofNodes(design, "main", List.of("in+", "nowhere"), Progress.none());
+    assertThat(nodes.get("nowhere")).isEmpty();
+    PartSensitivity source =
+        nodes.get("in+").stream()
+            .filter(part -> part.name().equals(SOURCE + "resistance"))
+            .findFirst()
+            .orElseThrow();
+    assertThat(source.slope().orElseThrow()).isCloseTo(-0.09, within(1e-13));
+    assertThat(source.method()).isEqualTo(Method.ADJOINT);
+  }
+
+  /** Junction temperatures that move with a part are in whole solutions only. */
+  @Test
+  void withSelfHeatingWholeSolutionsAreCompared() {
+    Design heating =
+        RandomDesigns.of(20)
+            .filter(design -> design.surroundings().selfHeating())
+            .findFirst()
+            .orElseThrow();
+    FigureSensitivity offset = of(heating, "outputOffset");
+    assertThat(offset.parts()).isNotEmpty();
+    assertThat(offset.parts()).allMatch(part -> part.method() == Method.DIFFERENCES);
+    Surroundings here = heating.surroundings();
+    Design cold =
+        heating.withSurroundings(
+            new Surroundings(here.ambient(), here.strayCapacitance(), false, here.biasCoupling()));
+    FigureSensitivity exact = of(cold, "outputOffset");
+    PartSensitivity warm = part(offset, "pair.q1");
+    assertThat(warm.slope().orElseThrow())
+        .isCloseTo(
+            part(exact, "pair.q1").slope().orElseThrow(),
+            within(0.1 * Math.abs(warm.slope().orElseThrow())));
   }
 
   @Test
