@@ -1,10 +1,10 @@
 package loopwright.assembly;
 
 /**
- * How one transistor differs from its record.
+ * How one device differs from its record.
  *
- * @param baseEmitterVoltage more V_BE at the same current, V
- * @param betaRatio its forward current gain over the record's
+ * @param baseEmitterVoltage more V_BE, or forward voltage of a diode, at the same current, V
+ * @param betaRatio a transistor's forward current gain over the record's
  */
 public record DeviceDeviation(double baseEmitterVoltage, double betaRatio) {
   /** As its record says. */

@@ -101,7 +101,9 @@ public final class DeviceModels {
   /** Parameters of a diode at 25 °C. */
   DiodeParameters diode(String role, String stagePart) {
     String name = partName(role, stagePart);
-    return diodes.computeIfAbsent(name, key -> fitted(key, diodeRecord(key)));
+    DiodeParameters parameters = diodes.computeIfAbsent(name, key -> fitted(key, diodeRecord(key)));
+    DeviceDeviation own = deviations.devices().get(role);
+    return own == null ? parameters : higher(parameters, own.baseEmitterVoltage());
   }
 
   /** What a person should know of the fits that were made, by part name. */
@@ -152,6 +154,17 @@ public final class DeviceModels {
   private static TransistorParameters higher(TransistorParameters parameters, double volts) {
     double factor = Math.exp(-volts / Physics.thermalVoltage(Physics.NOMINAL_TEMPERATURE));
     return parameters.withSaturationCurrent(parameters.saturationCurrent() * factor);
+  }
+
+  /** Parameters of a diode that needs more forward voltage, V, for the same current at 25 °C. */
+  private static DiodeParameters higher(DiodeParameters parameters, double volts) {
+    double emission = parameters.ideality() * Physics.thermalVoltage(Physics.NOMINAL_TEMPERATURE);
+    return new DiodeParameters(
+        parameters.saturationCurrent() * Math.exp(-volts / emission),
+        parameters.ideality(),
+        parameters.seriesResistance(),
+        parameters.capacitance(),
+        parameters.transitTime());
   }
 
   private Optional<DeviceChoice> choice(String role) {

@@ -45,7 +45,7 @@ final class LoadAssembly {
   static void addProbes(Workpiece work, Hookup hookup) {
     for (int i = 0; i < hookup.probes().size(); i++) {
       Probe probe = hookup.probes().get(i);
-      String path = "hookups." + hookup.name() + ".probes[" + i + "]";
+      String path = "hookups." + hookup.name() + ".probes." + i;
       if (!work.circuit().has(probe.node())) {
         throw new AssemblyException(
             path

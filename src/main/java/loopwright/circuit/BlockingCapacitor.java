@@ -59,12 +59,25 @@ public final class BlockingCapacitor implements Element {
     return to;
   }
 
+  /** Row of its equation, and index of its current. */
+  public int branch() {
+    return branch;
+  }
+
   int index() {
     return index;
   }
 
   double voltage(CircuitState state) {
     return state.voltage(from) - state.voltage(to);
+  }
+
+  @Override
+  public void addLinearSensitivity(
+      CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {
+    if (!state.holds(index)) {
+      sums.add(name, Parameter.CAPACITANCE, capacitance * form.capacitance(branch, -1, from, to));
+    }
   }
 
   @Override

@@ -27,6 +27,12 @@ public final class Capacitor implements Element {
   }
 
   @Override
+  public void addLinearSensitivity(
+      CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {
+    sums.add(name, Parameter.CAPACITANCE, -capacitance * form.capacitance(from, to, from, to));
+  }
+
+  @Override
   public void stamp(CircuitState state) {
     Stamps stamps = state.stamps();
     double charge = capacitance * (state.voltage(from) - state.voltage(to));

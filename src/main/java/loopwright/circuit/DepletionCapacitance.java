@@ -20,6 +20,11 @@ public final class DepletionCapacitance {
         : JOIN_FACTOR + JOIN_SLOPE * (voltage - JOIN);
   }
 
+  /** Derivative of {@link #factor} by the junction voltage, 1/V. */
+  public static double slope(double voltage) {
+    return voltage < JOIN ? factor(voltage) / (3 * (POTENTIAL - voltage)) : JOIN_SLOPE;
+  }
+
   /** Charge per zero-bias capacitance, V, at a junction voltage in V, forward positive. */
   public static double charge(double voltage) {
     if (voltage < JOIN) {

@@ -11,6 +11,7 @@ import loopwright.part.DiodeParameters;
  */
 public final class DiodeEquations {
   private final double emissionVoltage;
+  private final double nominalEmissionVoltage;
   private final double saturationCurrent;
   private final double capacitance;
   private final double transitTime;
@@ -41,6 +42,8 @@ public final class DiodeEquations {
    */
   public DiodeEquations(DiodeParameters parameters, double kelvin, double shunt) {
     this.emissionVoltage = parameters.ideality() * Physics.thermalVoltage(kelvin);
+    this.nominalEmissionVoltage =
+        parameters.ideality() * Physics.thermalVoltage(Physics.NOMINAL_TEMPERATURE);
     this.saturationCurrent =
         parameters.saturationCurrent()
             * Math.pow(Physics.saturationCurrentFactor(kelvin), 1 / parameters.ideality());
@@ -64,6 +67,36 @@ public final class DiodeEquations {
     conductance = slope + shunt;
     charge = transitTime * forward + capacitance * DepletionCapacitance.charge(voltage);
     chargeByVoltage = transitTime * slope + capacitance * DepletionCapacitance.factor(voltage);
+  }
+
+  /** ∂I/∂(forward voltage at equal current at 25 °C) at a junction voltage in V, S. */
+  double currentByForwardVoltage(double voltage) {
+    return -saturationCurrent * Math.expm1(voltage / emissionVoltage) / nominalEmissionVoltage;
+  }
+
+  /** Derivative of the exponential's own conductance by the junction voltage, S/V. */
+  double conductanceSlope(double voltage) {
+    return exponentialConductance(voltage) / emissionVoltage;
+  }
+
+  /** Derivative of the capacitance by the junction voltage, F/V. */
+  double capacitanceSlope(double voltage) {
+    return transitTime * conductanceSlope(voltage)
+        + capacitance * DepletionCapacitance.slope(voltage);
+  }
+
+  /** ∂²I/∂v∂(forward voltage at equal current at 25 °C), S/V. */
+  double conductanceByForwardVoltage(double voltage) {
+    return -exponentialConductance(voltage) / nominalEmissionVoltage;
+  }
+
+  /** The same of the capacitance, F/V. */
+  double capacitanceByForwardVoltage(double voltage) {
+    return transitTime * conductanceByForwardVoltage(voltage);
+  }
+
+  private double exponentialConductance(double voltage) {
+    return saturationCurrent * Math.exp(voltage / emissionVoltage) / emissionVoltage;
   }
 
   /** Current from anode to cathode, A. */

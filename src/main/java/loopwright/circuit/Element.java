@@ -33,6 +33,34 @@ public sealed interface Element
   }
 
   /**
+   * Adds −λᵀ∂f/∂p for every parameter p of this element: what its change does to a quantity of the
+   * static state whose adjoint solution is λ.
+   *
+   * @param state solved
+   * @param adjoint λ by unknown
+   * @param sums added to
+   */
+  default void addStaticSensitivity(
+      CircuitState state, double[] adjoint, ElementSensitivities sums) {
+    // Leads and capacitors have no part in static currents.
+  }
+
+  /**
+   * Adds the change of a response of the small-signal circuit: −∂/∂p of the form for every
+   * parameter of this element at fixed voltages, and −∂/∂v for the voltages that its small-signal
+   * values hang on.
+   *
+   * @param state solved
+   * @param form of the response's solution and adjoint solution
+   * @param byUnknown change by unknown of the static state; added to
+   * @param sums added to
+   */
+  default void addLinearSensitivity(
+      CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {
+    // Sources and leads have constant entries.
+  }
+
+  /**
    * Adds what noise this element makes at a state.
    *
    * @param state solved

@@ -57,6 +57,18 @@ public final class Inductor implements Element {
   }
 
   @Override
+  public void addStaticSensitivity(
+      CircuitState state, double[] adjoint, ElementSensitivities sums) {
+    sums.add(name, Parameter.RESISTANCE, adjoint[branch] * resistance * state.voltage(branch));
+  }
+
+  @Override
+  public void addLinearSensitivity(
+      CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {
+    sums.add(name, Parameter.RESISTANCE, resistance * form.conductance(branch, -1, branch, -1));
+  }
+
+  @Override
   public void stamp(CircuitState state) {
     Stamps stamps = state.stamps();
     double current = state.voltage(branch);

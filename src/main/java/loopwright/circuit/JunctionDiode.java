@@ -49,6 +49,34 @@ public final class JunctionDiode implements Element {
   }
 
   @Override
+  public void addStaticSensitivity(
+      CircuitState state, double[] adjoint, ElementSensitivities sums) {
+    double through = Stamps.at(adjoint, anode) - Stamps.at(adjoint, cathode);
+    sums.add(
+        role,
+        Parameter.JUNCTION_VOLTAGE,
+        -through * equations.currentByForwardVoltage(voltage(state)));
+  }
+
+  @Override
+  public void addLinearSensitivity(
+      CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {
+    double voltage = voltage(state);
+    double conductance = form.conductance(anode, cathode, anode, cathode);
+    double capacitance = form.capacitance(anode, cathode, anode, cathode);
+    double byVoltage =
+        -equations.conductanceSlope(voltage) * conductance
+            - equations.capacitanceSlope(voltage) * capacitance;
+    Stamps.add(byUnknown, anode, byVoltage);
+    Stamps.add(byUnknown, cathode, -byVoltage);
+    sums.add(
+        role,
+        Parameter.JUNCTION_VOLTAGE,
+        -equations.conductanceByForwardVoltage(voltage) * conductance
+            - equations.capacitanceByForwardVoltage(voltage) * capacitance);
+  }
+
+  @Override
   public void stamp(CircuitState state) {
     double actual = voltage(state);
     double limited =

@@ -51,6 +51,20 @@ public final class Resistor implements Element {
   }
 
   @Override
+  public void addStaticSensitivity(
+      CircuitState state, double[] adjoint, ElementSensitivities sums) {
+    double current = conductance * (state.voltage(from) - state.voltage(to));
+    sums.add(
+        name, Parameter.RESISTANCE, current * (Stamps.at(adjoint, from) - Stamps.at(adjoint, to)));
+  }
+
+  @Override
+  public void addLinearSensitivity(
+      CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {
+    sums.add(name, Parameter.RESISTANCE, conductance * form.conductance(from, to, from, to));
+  }
+
+  @Override
   public void stamp(CircuitState state) {
     Stamps stamps = state.stamps();
     double voltage = state.voltage(from) - state.voltage(to);

@@ -38,6 +38,18 @@ public final class Stamps {
     conductanceScale = new double[unknowns];
   }
 
+  /** Element of a vector by unknown; ground, index −1, is zero. */
+  static double at(double[] vector, int unknown) {
+    return unknown < 0 ? 0 : vector[unknown];
+  }
+
+  /** Adds to an element of a vector by unknown; ground is dropped. */
+  static void add(double[] vector, int unknown, double value) {
+    if (unknown >= 0) {
+      vector[unknown] += value;
+    }
+  }
+
   void clear() {
     Arrays.fill(g, 0);
     Arrays.fill(c, 0);

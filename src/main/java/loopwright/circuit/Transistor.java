@@ -8,6 +8,10 @@ import loopwright.part.Polarity;
  * For pnp every voltage and current is mirrored.
  */
 public final class Transistor implements Element {
+  /** Change of ln I_S by a volt more of V_BE at equal current at 25 °C, 1/V. */
+  private static final double SATURATION_BY_VOLT =
+      -1 / Physics.thermalVoltage(Physics.NOMINAL_TEMPERATURE);
+
   private final String role;
   private final int sign;
   private final int collector;
@@ -101,6 +105,58 @@ public final class Transistor implements Element {
     NoiseSource.addShot(
         role, NoiseSource.Cause.BASE_SHOT, base, emitter, equations.baseCurrent(), sources);
     NoiseSource.addFlicker(role, base, emitter, equations.baseCurrent(), flickerCorner, sources);
+  }
+
+  @Override
+  public void addStaticSensitivity(
+      CircuitState state, double[] adjoint, ElementSensitivities sums) {
+    double toCollector = Stamps.at(adjoint, collector) - Stamps.at(adjoint, emitter);
+    double toBase = Stamps.at(adjoint, base) - Stamps.at(adjoint, emitter);
+    TransistorVariation variation = new TransistorVariation(equations);
+    double vbe = baseEmitter(state);
+    double vbc = baseCollector(state);
+    variation.vary(vbe, vbc, 0, 0, SATURATION_BY_VOLT, 0);
+    sums.add(
+        role,
+        Parameter.JUNCTION_VOLTAGE,
+        -sign * (toCollector * variation.collectorCurrent + toBase * variation.baseCurrent));
+    variation.vary(vbe, vbc, 0, 0, 0, 1);
+    sums.add(
+        role,
+        Parameter.CURRENT_GAIN,
+        -sign * (toCollector * variation.collectorCurrent + toBase * variation.baseCurrent));
+  }
+
+  @Override
+  public void addLinearSensitivity(
+      CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {
+    TransistorVariation variation = new TransistorVariation(equations);
+    double vbe = baseEmitter(state);
+    double vbc = baseCollector(state);
+    variation.vary(vbe, vbc, 1, 0, 0, 0);
+    double byForward = -sign * change(form, variation);
+    Stamps.add(byUnknown, base, byForward);
+    Stamps.add(byUnknown, emitter, -byForward);
+    variation.vary(vbe, vbc, 0, 1, 0, 0);
+    double byReverse = -sign * change(form, variation);
+    Stamps.add(byUnknown, base, byReverse);
+    Stamps.add(byUnknown, collector, -byReverse);
+    variation.vary(vbe, vbc, 0, 0, SATURATION_BY_VOLT, 0);
+    sums.add(role, Parameter.JUNCTION_VOLTAGE, -change(form, variation));
+    variation.vary(vbe, vbc, 0, 0, 0, 1);
+    sums.add(role, Parameter.CURRENT_GAIN, -change(form, variation));
+  }
+
+  /** Change of the form when small-signal values change as a variation says. */
+  private double change(BilinearForm form, TransistorVariation by) {
+    return by.collectorByBaseEmitter * form.conductance(collector, emitter, base, emitter)
+        + by.collectorByBaseCollector * form.conductance(collector, emitter, base, collector)
+        + by.baseByBaseEmitter * form.conductance(base, emitter, base, emitter)
+        + by.baseByBaseCollector * form.conductance(base, emitter, base, collector)
+        + by.baseEmitterChargeByBaseEmitter * form.capacitance(base, emitter, base, emitter)
+        + by.baseEmitterChargeByBaseCollector * form.capacitance(base, emitter, base, collector)
+        + by.baseCollectorChargeByBaseCollector
+            * form.capacitance(base, collector, base, collector);
   }
 
   @Override

@@ -22,19 +22,19 @@ public final class TransistorEquations {
   /** Shunt conductance across each junction that keeps the equations regular, S. */
   public static final double SHUNT = 1e-13;
 
-  private final double thermalVoltage;
-  private final double saturationCurrent;
-  private final double forwardBeta;
-  private final double reverseBeta;
-  private final double inverseEarlyVoltage;
-  private final double inverseKneeCurrent;
-  private final double recombinationCurrent;
-  private final double recombinationVoltage;
-  private final double baseEmitterCapacitance;
-  private final double baseCollectorCapacitance;
-  private final double transitTime;
-  private final double reverseTransitTime;
-  private final double shunt;
+  final double thermalVoltage;
+  final double saturationCurrent;
+  final double forwardBeta;
+  final double reverseBeta;
+  final double inverseEarlyVoltage;
+  final double inverseKneeCurrent;
+  final double recombinationCurrent;
+  final double recombinationVoltage;
+  final double baseEmitterCapacitance;
+  final double baseCollectorCapacitance;
+  final double transitTime;
+  final double reverseTransitTime;
+  final double shunt;
   private final double criticalVoltage;
 
   private double collectorCurrent;

@@ -48,6 +48,15 @@ public final class VoltageSource implements Element {
     return state.voltage(branch);
   }
 
+  /** Only a supply's voltage is a parameter; the generator's is a level. */
+  @Override
+  public void addStaticSensitivity(
+      CircuitState state, double[] adjoint, ElementSensitivities sums) {
+    if (!generator) {
+      sums.add(name, Parameter.SUPPLY, adjoint[branch] * voltage);
+    }
+  }
+
   @Override
   public void stamp(CircuitState state) {
     Stamps stamps = state.stamps();

@@ -218,6 +218,10 @@ public final class HookupFigures {
     return Optional.ofNullable(Outcome.of(() -> solution.noise().band()).value());
   }
 
+  HookupSolution solution() {
+    return solution;
+  }
+
   private static Hookup find(Design design, String name) {
     return design
         .hookup(name)
