@@ -19,6 +19,9 @@ final class DividerLoadCheck implements Check {
   /** More than this share of the gain stage's current is too much; common practice, no source. */
   private static final double SHARE = 0.2;
 
+  /** What the remedy leaves, a share of the same current. */
+  private static final double WANTED = 0.1;
+
   @Override
   public List<Finding> check(Design design, HookupPrediction prediction) {
     boolean follower =
@@ -41,7 +44,7 @@ final class DividerLoadCheck implements Check {
     if (taken <= SHARE * gain.collectorCurrent()) {
       return List.of();
     }
-    double factor = taken / (SHARE * gain.collectorCurrent());
+    double factor = taken / (WANTED * gain.collectorCurrent());
     return List.of(
         new Finding(
             Finding.Severity.RISKY,
@@ -55,7 +58,7 @@ final class DividerLoadCheck implements Check {
                 + " that the gain stage carries.",
             "Resistors "
                 + String.format(Locale.ROOT, "%.1f", factor)
-                + " times as large take a fifth of it.",
+                + " times as large take a tenth of it.",
             changes(prediction, gains, inverting, factor)));
   }
 
