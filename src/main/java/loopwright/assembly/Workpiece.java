@@ -13,6 +13,12 @@ import loopwright.part.Polarity;
  * models, and which rail is which for the pair's polarity.
  */
 final class Workpiece {
+  /** Resistance of a broken lead, Ω. */
+  private static final double OPEN = 1e10;
+
+  /** Resistance of what should not conduct and does, Ω. */
+  private static final double SHORT = 1e-2;
+
   private final Design design;
   private final DeviceModels models;
   private final Temperatures temperatures;
@@ -56,14 +62,38 @@ final class Workpiece {
 
   /** Adds a transistor of a stage. */
   void transistor(String role, String part, String collector, String base, String emitter) {
+    DeviceFault fault = models.deviations().faults().get(role);
+    Polarity polarity = models.polarity(role, part);
+    boolean reversed = fault == DeviceFault.REVERSED;
     circuit.transistor(
         role,
-        models.polarity(role, part),
-        collector,
-        base,
-        emitter,
+        fault == DeviceFault.WRONG_POLARITY ? polarity.opposite() : polarity,
+        broken(role, fault == DeviceFault.COLLECTOR_OPEN, reversed ? emitter : collector),
+        broken(role, fault == DeviceFault.BASE_OPEN, base),
+        broken(role, fault == DeviceFault.EMITTER_OPEN, reversed ? collector : emitter),
         models.transistor(role, part),
         temperatures.kelvin(role));
+    if (fault == DeviceFault.BASE_EMITTER_SHORT) {
+      conduct(role, base, emitter);
+    } else if (fault == DeviceFault.BASE_COLLECTOR_SHORT) {
+      conduct(role, base, collector);
+    } else if (fault == DeviceFault.COLLECTOR_EMITTER_SHORT) {
+      conduct(role, collector, emitter);
+    }
+  }
+
+  /** The terminal's node, or one behind a broken lead. */
+  private String broken(String role, boolean isBroken, String node) {
+    if (!isBroken) {
+      return node;
+    }
+    String behind = role + ".inner.broken";
+    circuit.resistor(role + ".broken", node, behind, OPEN);
+    return behind;
+  }
+
+  private void conduct(String name, String from, String to) {
+    circuit.resistor(name + ".shorted", from, to, SHORT);
   }
 
   /** Adds a diode of a stage. */
@@ -93,10 +123,18 @@ final class Workpiece {
 
   void capacitor(String path, String from, String to, PartValue value) {
     circuit.capacitor(path, from, to, value(path, value));
+    conductIfShorted(path, from, to);
   }
 
   void blockingCapacitor(String path, String from, String to, PartValue value) {
     circuit.blockingCapacitor(path, from, to, value(path, value));
+    conductIfShorted(path, from, to);
+  }
+
+  private void conductIfShorted(String path, String from, String to) {
+    if (models.deviations().shorted().contains(path)) {
+      conduct(path, from, to);
+    }
   }
 
   /** The value of an element in this build. */

@@ -1,9 +1,6 @@
 package loopwright.bench;
 
-import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.stream.IntStream;
 import loopwright.design.Design;
@@ -41,12 +38,13 @@ final class PredictedReadings {
   static PredictedReadings of(Design design, Progress progress) {
     HookupFigures first = HookupFigures.of(design, design.hookups().get(0).name());
     PredictedReadings predicted = new PredictedReadings(design, TolerancedParts.of(first));
-    List<Task> tasks = predicted.tasks();
+    List<ReadingGroup> groups = ReadingGroup.of(design);
     int[] done = {0};
-    for (Task task : tasks) {
-      predicted.solve(task, progress);
+    for (ReadingGroup group : groups) {
+      predicted.solve(group, progress);
       done[0]++;
-      progress.report((double) done[0] / tasks.size(), "predicting what " + task.hookup + " shows");
+      progress.report(
+          (double) done[0] / groups.size(), "predicting what " + group.hookup() + " shows");
     }
     predicted.looseParts(first);
     return predicted;
@@ -78,61 +76,33 @@ final class PredictedReadings {
         : OptionalDouble.empty();
   }
 
-  /** Readings that were taken in one circuit. */
-  private static final class Task {
-    private final Design circuit;
-    private final String hookup;
-    private final List<Integer> readings = new ArrayList<>();
-
-    Task(Design circuit, String hookup) {
-      this.circuit = circuit;
-      this.hookup = hookup;
-    }
-  }
-
-  private List<Task> tasks() {
-    Map<List<Object>, Task> tasks = new LinkedHashMap<>();
-    for (int i = 0; i < readings.size(); i++) {
-      Reading reading = readings.get(i);
-      if (reading.hookup().isPresent()) {
-        Design circuit = new Expectation(reading).circuit(design);
-        String hookup = reading.hookup().get();
-        tasks
-            .computeIfAbsent(List.of(circuit, hookup), key -> new Task(circuit, hookup))
-            .readings
-            .add(i);
-      }
-    }
-    return List.copyOf(tasks.values());
-  }
-
-  private void solve(Task task, Progress progress) {
-    HookupFigures start = HookupFigures.of(task.circuit, task.hookup);
-    for (int reading : task.readings) {
+  private void solve(ReadingGroup group, Progress progress) {
+    HookupFigures start = HookupFigures.of(group.circuit(), group.hookup());
+    for (int reading : group.readings()) {
       nominal[reading] = expected(reading, start);
     }
-    List<TolerancedPart> own = TolerancedParts.in(parts, task.hookup);
+    List<TolerancedPart> own = TolerancedParts.in(parts, group.hookup());
     int lanes = Runtime.getRuntime().availableProcessors();
     IntStream.range(0, lanes)
         .parallel()
         .forEach(
             lane -> {
               // What is solved of a hookup serves one thread, so each lane has its own nominal.
-              HookupFigures mine = HookupFigures.of(task.circuit, task.hookup);
-              task.readings.forEach(reading -> expected(reading, mine));
+              HookupFigures mine = HookupFigures.of(group.circuit(), group.hookup());
+              group.readings().forEach(reading -> expected(reading, mine));
               for (int part = lane; part < own.size(); part += lanes) {
                 progress.check();
-                move(task, mine, own, part);
+                move(group, mine, own, part);
               }
             });
   }
 
-  private void move(Task task, HookupFigures start, List<TolerancedPart> own, int part) {
+  private void move(ReadingGroup group, HookupFigures start, List<TolerancedPart> own, int part) {
     double by = own.get(part).standardUncertainty();
-    HookupFigures up = moved(task, start, own, part, by);
-    HookupFigures down = moved(task, start, own, part, -by);
+    HookupFigures up = moved(group, start, own, part, by);
+    HookupFigures down = moved(group, start, own, part, -by);
     int column = parts.indexOf(own.get(part));
-    for (int reading : task.readings) {
+    for (int reading : group.readings()) {
       if (isSpread(reading)) {
         double high = expected(reading, up).number().orElse(Double.NaN);
         double low = expected(reading, down).number().orElse(Double.NaN);
@@ -144,10 +114,10 @@ final class PredictedReadings {
   }
 
   private static HookupFigures moved(
-      Task task, HookupFigures start, List<TolerancedPart> own, int part, double by) {
+      ReadingGroup group, HookupFigures start, List<TolerancedPart> own, int part, double by) {
     double[] deviations = new double[own.size()];
     deviations[part] = by;
-    return start.of(TolerancedParts.build(task.circuit, own, deviations));
+    return start.of(TolerancedParts.build(group.circuit(), own, deviations));
   }
 
   private FigureValue expected(int reading, HookupFigures figures) {

@@ -32,6 +32,7 @@ public final class CommandLineProgram {
     line.addSubcommand(new PredictCommand(services, console));
     line.addSubcommand(new SizeCommand(services, console));
     line.addSubcommand(new CompareCommand(services, console));
+    line.addSubcommand(new ExplainCommand(services, console));
     line.addSubcommand(new SpreadCommand(services, console));
     line.addSubcommand(new CureCommand(services, console));
     line.setOut(writer(console.out()));
@@ -53,6 +54,7 @@ public final class CommandLineProgram {
         PredictCommand.NAME,
         SizeCommand.NAME,
         CompareCommand.NAME,
+        ExplainCommand.NAME,
         SpreadCommand.NAME,
         CureCommand.NAME);
   }

@@ -43,6 +43,9 @@ final class NoiseFigures {
   private static FigureValue inputNoise(HookupSolution solution) {
     HookupNoise noise = solution.noise();
     NoiseDensity density = noise.density(solution.hookup().source().frequency().value());
+    if (!solution.assembled().isOpen() && !(noise.solvedGain(density.frequency()) > 0)) {
+      return FigureValue.none("at rest the output follows nothing: it lies in the dead zone");
+    }
     return FigureValue.of(
         density.input(),
         sentence(loudest(density.shares()), referred(solution, density), noise.remark()));
