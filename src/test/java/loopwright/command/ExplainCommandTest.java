@@ -11,6 +11,7 @@ import java.util.Map;
 import loopwright.file.DesignFile;
 import loopwright.part.Shelf;
 import loopwright.predict.Predictor;
+import loopwright.quantity.Unit;
 import org.junit.jupiter.api.Test;
 
 class ExplainCommandTest {
@@ -30,7 +31,9 @@ class ExplainCommandTest {
   private static CapturedCall call(String design, String... arguments) {
     CommandServices services =
         new CommandServices(
-            new DesignFile(Shelf.empty(), Map.of()), Predictor::predict, prediction -> List.of());
+            new DesignFile(Shelf.empty(), Map.of("outputOffset", Unit.VOLT)),
+            Predictor::predict,
+            prediction -> List.of());
     return CapturedCall.of(
         new CommandLineProgram(services), design.getBytes(StandardCharsets.UTF_8), arguments);
   }
