@@ -31,12 +31,18 @@ public final class TrBdf2 {
 
   private static final int MOST_ITERATIONS = 25;
 
+  /** There is no shorter step to fall back to. */
+  private static final int MOST_ITERATIONS_OF_JUMP = 200;
+
   /** A Newton step of this share of what is allowed leaves a far smaller error behind. */
   private static final double CONVERGED = 1e-2;
 
   private static final double SAFETY = 0.9;
   private static final double MOST_GROWTH = 4;
   private static final double LEAST_SHARE = 0.1;
+
+  /** No unknown is asked to be better than this share of itself. */
+  private static final double ROUNDING = 1e-12;
 
   /** What a step is cut to when Newton's method fails in it. */
   private static final double CUT = 0.25;
@@ -115,7 +121,7 @@ public final class TrBdf2 {
   public void jump(double instant, double nextLength) {
     for (int i = 0; i < 2; i++) {
       System.arraycopy(qLast, 0, base, 0, base.length);
-      if (!solveStage(instant, time)) {
+      if (!solveStage(instant, time, MOST_ITERATIONS_OF_JUMP)) {
         throw new ArithmeticException("no solution is found after the jump at " + time + " s");
       }
       keep();
@@ -180,7 +186,7 @@ public final class TrBdf2 {
     for (int i = 0; i < base.length; i++) {
       base[i] = qLast[i] - D * length * fLast[i];
     }
-    if (!solveStage(D * length, end - (1 - GAMMA) * length)) {
+    if (!solveStage(D * length, end - (1 - GAMMA) * length, MOST_ITERATIONS)) {
       return false;
     }
     System.arraycopy(x, 0, middle, 0, x.length);
@@ -189,7 +195,7 @@ public final class TrBdf2 {
       x[i] = last[i] + (middle[i] - last[i]) / GAMMA;
       base[i] = qLast[i] - W * length * (fLast[i] + fMiddle[i]);
     }
-    return solveStage(D * length, end);
+    return solveStage(D * length, end, MOST_ITERATIONS);
   }
 
   /** Guesses the end of the first stage from the step before. */
@@ -201,9 +207,9 @@ public final class TrBdf2 {
   }
 
   /** Newton's method on q(x) + weight f(x, t) = base; false when it does not converge. */
-  private boolean solveStage(double weight, double at) {
+  private boolean solveStage(double weight, double at, int most) {
     double size = Double.POSITIVE_INFINITY;
-    for (int i = 0; i < MOST_ITERATIONS; i++) {
+    for (int i = 0; i < most; i++) {
       equations.evaluate(at);
       if (size < CONVERGED && !equations.limited()) {
         return true;
@@ -248,7 +254,7 @@ public final class TrBdf2 {
     double most = 0;
     for (int i = 0; i < vector.length; i++) {
       double reach = Math.max(moved[i], Math.abs(x[i] - origin[i]));
-      double allowed = relative * reach + equations.tolerance(i);
+      double allowed = relative * reach + equations.tolerance(i) + ROUNDING * Math.abs(x[i]);
       if (!Double.isFinite(vector[i])) {
         return Double.NaN;
       }
