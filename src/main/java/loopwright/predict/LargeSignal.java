@@ -87,7 +87,7 @@ final class LargeSignal {
     return (direction > 0 ? rising : falling).get();
   }
 
-  /** Time constants that the figures of the small step rest on must not grow. */
+  /** From the small step until the output stays within its band, s; nothing may grow at rest. */
   double settling() {
     if (solution.poles().stream().anyMatch(pole -> pole.grows())) {
       throw new UnsolvedException("something grows at rest");

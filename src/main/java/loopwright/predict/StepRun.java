@@ -160,8 +160,13 @@ final class StepRun {
     return Arrays.copyOf(volts, count);
   }
 
-  /** The circuit where the run stands. */
-  CircuitState state() {
-    return run.state();
+  /** The output before the step, V. */
+  double start() {
+    return start;
+  }
+
+  /** Where the output should come to, V. */
+  double end() {
+    return end;
   }
 }
