@@ -92,6 +92,11 @@ public record SteadyDistortion(
       if (amplitude == 0) {
         throw new UnsolvedException("the source has no amplitude");
       }
+      String grows = solution.swing().says();
+      if (!grows.isEmpty()) {
+        // Long steps would damp what grows, and show a steady state that there is not.
+        throw new UnsolvedException("no steady state: something " + grows);
+      }
       CircuitState rest = solution.levels().rest();
       int out = solution.assembled().out();
       Transient run =

@@ -8,6 +8,10 @@ import loopwright.task.Progress;
  * A circuit in time, every charge in place and every device in full, from any solved state on. The
  * generator's corners are hit exactly; the steps between follow from the error that is allowed.
  *
+ * <p>A balance that is not stable is left only when something disturbs it, and steps that are long
+ * against the time in which a disturbance grows damp it instead: ask the natural frequencies before
+ * trusting a run that stays quiet.
+ *
  * <p>It keeps only the present point: what is to be remembered is for a {@link Sink} to say, such
  * as {@link TimeRecord}. It owns its work arrays and serves one thread.
  */

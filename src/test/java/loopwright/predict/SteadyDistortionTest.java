@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import loopwright.design.Design;
 import loopwright.file.DesignText;
+import loopwright.file.ExampleDesigns;
 import loopwright.task.Progress;
 import org.junit.jupiter.api.Test;
 
@@ -66,5 +67,16 @@ class SteadyDistortionTest {
     SteadyDistortion none = of("\"gain\": 1", "\"feedback\": {\"kind\": \"open\"}");
     assertThat(none.thd()).isEmpty();
     assertThat(none.says()).isEqualTo("the source has no amplitude");
+  }
+
+  /** Quiet at rest, but not over its swing: what looks steady in long steps would be none. */
+  @Test
+  void anOscillationHasNoSteadyState() {
+    Design design = ExampleDesigns.read("hydrophone-follower.json");
+    SteadyDistortion none =
+        SteadyDistortion.of(design, design.hookup("line").orElseThrow(), Progress.none());
+    assertThat(none.thd()).isEmpty();
+    assertThat(none.says()).startsWith("no steady state: something grows from");
+    assertThat(none.staticThd().number()).isPresent();
   }
 }
