@@ -27,10 +27,8 @@ import loopwright.file.Shelves;
 import loopwright.part.Shelf;
 import loopwright.predict.Catalogue;
 import loopwright.predict.Figure;
-import loopwright.predict.Prediction;
 import loopwright.predict.Predictor;
 import loopwright.quantity.Unit;
-import loopwright.session.Assessment;
 import loopwright.session.PredictionSource;
 import loopwright.session.Session;
 import loopwright.task.BackgroundRunner;
@@ -43,7 +41,6 @@ public final class Loopwright {
   /** The design that the window opens with when none is named. */
   private static final String WORKED_EXAMPLE = "/loopwright/examples/seismometer-coil.json";
 
-  private static final double[] OWN_GRID = {};
   private static final int INPUT_WRONG = 1;
 
   /** No exit status: the window goes on. */
@@ -133,11 +130,7 @@ public final class Loopwright {
   }
 
   private void openWindow(Optional<Path> file, DesignDocument document) {
-    PredictionSource source =
-        (design, hookups, progress) -> {
-          Prediction prediction = Predictor.predict(design, hookups, OWN_GRID, progress);
-          return new Assessment(prediction, Findings.of(prediction));
-        };
+    PredictionSource source = new WindowPredictions();
     TaskRunner runner = new BackgroundRunner(EventQueue::invokeLater);
     Session session =
         file.map(path -> new Session(designs, source, runner, path))

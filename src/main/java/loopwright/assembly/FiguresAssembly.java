@@ -22,6 +22,7 @@ final class FiguresAssembly {
             amplifier.outputLow().orElse(work.design().rails().negative()).value(),
             amplifier.outputHigh().orElse(work.design().rails().positive()).value(),
             amplifier.outputResistance().value(),
+            amplifier.slewRate().value(),
             rates),
         Nodes.IN_PLUS,
         HookupNodes.IN_MINUS_AMPLIFIER,

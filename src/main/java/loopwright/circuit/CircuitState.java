@@ -27,6 +27,7 @@ public final class CircuitState {
   private double generator;
   private double tether;
   private boolean limited;
+  private boolean moving;
 
   CircuitState(Circuit circuit, int memorySize, int blockingCapacitors) {
     this.circuit = circuit;
@@ -144,6 +145,16 @@ public final class CircuitState {
     return anchor[node];
   }
 
+  /** Whether the circuit moves in time, so that what limits a rate of change acts. */
+  public boolean moving() {
+    return moving;
+  }
+
+  /** Makes the circuit move in time, or rest. */
+  public void setMoving(boolean inTime) {
+    moving = inTime;
+  }
+
   /** Whether the last evaluation linearised some junction elsewhere than at its voltage. */
   public boolean limited() {
     return limited;
@@ -186,6 +197,7 @@ public final class CircuitState {
     sourceScale = other.sourceScale;
     generator = other.generator;
     tether = other.tether;
+    moving = other.moving;
     System.arraycopy(other.anchor, 0, anchor, 0, anchor.length);
   }
 

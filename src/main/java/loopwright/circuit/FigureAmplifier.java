@@ -1,5 +1,7 @@
 package loopwright.circuit;
 
+import java.util.stream.DoubleStream;
+
 /**
  * An amplifier known by its figures, between its input nodes and its two output nodes:
  *
@@ -23,6 +25,7 @@ public final class FigureAmplifier implements Element {
    * @param low lowest output, V
    * @param high highest output, V
    * @param outputResistance Ω
+   * @param slewRate fastest change of v_x, V/s, may be infinite; it acts in time only
    * @param poleRates 2π times each pole frequency, rad/s
    */
   public record Figures(
@@ -33,10 +36,25 @@ public final class FigureAmplifier implements Element {
       double low,
       double high,
       double outputResistance,
-      double[] poleRates) {}
+      double slewRate,
+      double[] poleRates) {
+    /**
+     * Keeps the poles fastest first: the slowest is then the one whose rate the slew limit holds,
+     * and nothing before it stores what it cannot follow.
+     */
+    public Figures {
+      poleRates = DoubleStream.of(poleRates).map(r -> -r).sorted().map(r -> -r).toArray();
+    }
+  }
 
   /** Node indices. */
   record Nodes(int inPlus, int inMinus, int gainOut, int out) {}
+
+  /**
+   * Where no pole is stated a slew limit needs a rate of its own: it is that of a pole which
+   * crosses the whole output range in this share of the time that slewing takes.
+   */
+  private static final double UNSTATED_POLE = 1e-4;
 
   private final Figures figures;
   private final Nodes nodes;
@@ -164,20 +182,40 @@ public final class FigureAmplifier implements Element {
       double value = state.voltage(row);
       double from = k == 0 ? input : state.voltage(row - 1);
       double size = k == 0 ? inputSize : Math.abs(from);
-      stamps.current(row, value - from, Math.abs(value) + size);
-      stamps.conductance(stageSlots[k], 1);
+      double time = time(k, state);
+      double most = mostLag(k, time, state);
+      double difference = Math.max(-most, Math.min(most, from - value));
+      double slope = Math.abs(from - value) <= most ? 1 : 0;
+      stamps.current(row, -difference, Math.abs(value) + size);
+      stamps.conductance(stageSlots[k], slope);
       if (k == 0) {
-        stamps.conductance(inPlusSlot, -byPlus);
-        stamps.conductance(inMinusSlot, -byMinus);
+        stamps.conductance(inPlusSlot, -slope * byPlus);
+        stamps.conductance(inMinusSlot, -slope * byMinus);
       } else {
-        stamps.conductance(chainSlots[k], -1);
+        stamps.conductance(chainSlots[k], -slope);
       }
-      if (figures.poleRates().length > 0) {
-        double time = 1 / figures.poleRates()[k];
+      if (time > 0) {
         stamps.charge(row, time * value);
         stamps.capacitance(stageSlots[k], time);
       }
     }
+  }
+
+  /** Time constant of a stage, s; 0 when it follows at once. */
+  private double time(int stage, CircuitState state) {
+    if (figures.poleRates().length > 0) {
+      return 1 / figures.poleRates()[stage];
+    }
+    return state.moving() && Double.isFinite(figures.slewRate())
+        ? UNSTATED_POLE * (figures.high() - figures.low()) / figures.slewRate()
+        : 0;
+  }
+
+  /** How far a stage may lag behind what drives it, V: by the slew limit, in the last stage. */
+  private double mostLag(int stage, double time, CircuitState state) {
+    return stage == stages - 1 && state.moving() && Double.isFinite(figures.slewRate())
+        ? time * figures.slewRate()
+        : Double.POSITIVE_INFINITY;
   }
 
   /** The piece to linearise on: at most one further than the last, towards the drive's own. */

@@ -35,6 +35,8 @@ public final class CommandLineProgram {
     line.addSubcommand(new ExplainCommand(services, console));
     line.addSubcommand(new SpreadCommand(services, console));
     line.addSubcommand(new CureCommand(services, console));
+    line.addSubcommand(new StepCommand(services, console));
+    line.addSubcommand(new DistortionCommand(services, console));
     line.setOut(writer(console.out()));
     line.setErr(writer(console.err()));
     line.setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF));
@@ -56,7 +58,9 @@ public final class CommandLineProgram {
         CompareCommand.NAME,
         ExplainCommand.NAME,
         SpreadCommand.NAME,
-        CureCommand.NAME);
+        CureCommand.NAME,
+        StepCommand.NAME,
+        DistortionCommand.NAME);
   }
 
   private static PrintWriter writer(java.io.PrintStream stream) {

@@ -1,5 +1,6 @@
 package loopwright.command;
 
+import java.util.Collection;
 import loopwright.predict.FigureResult;
 import loopwright.predict.FigureValue;
 import loopwright.predict.HookupPrediction;
@@ -10,9 +11,14 @@ final class FiguresText {
   private FiguresText() {}
 
   static void print(HookupPrediction hookup, TextPage page) {
+    print(hookup.figures().values(), page);
+  }
+
+  /** Some figures only. */
+  static void print(Collection<FigureResult> figures, TextPage page) {
     TextTable table = new TextTable().row("Figure", "formula", "", "solved", "");
     FootNotes notes = new FootNotes();
-    for (FigureResult result : hookup.figures().values()) {
+    for (FigureResult result : figures) {
       boolean alike = result.formula().equals(result.solved());
       table.row(
           result.figure().label(),

@@ -58,7 +58,7 @@ public final class PredictionJson {
     return Json.block(members);
   }
 
-  private static Json figures(Map<String, FigureResult> figures) {
+  static Json figures(Map<String, FigureResult> figures) {
     List<Json.Member> members = new ArrayList<>();
     figures.forEach((key, result) -> members.add(member(key, figure(result))));
     return Json.block(members);

@@ -49,4 +49,22 @@ public record HookupPrediction(
     harmonics = List.copyOf(harmonics);
     notes = List.copyOf(notes);
   }
+
+  /** The same with other results of its figures. */
+  HookupPrediction withFigures(Map<String, FigureResult> others) {
+    return new HookupPrediction(
+        hookup,
+        rest,
+        failure,
+        others,
+        response,
+        loopGain,
+        unstablePoles,
+        overSwing,
+        swingRemark,
+        offsetContributions,
+        harmonics,
+        waveform,
+        notes);
+  }
 }

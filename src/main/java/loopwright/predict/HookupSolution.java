@@ -15,6 +15,7 @@ import loopwright.solve.LinearNetwork;
 import loopwright.solve.MidbandNetwork;
 import loopwright.solve.NaturalFrequencies;
 import loopwright.solve.NaturalFrequencies.Pole;
+import loopwright.task.Progress;
 
 /**
  * Everything that is solved of one hookup, each piece when it is first asked for. The entries of
@@ -43,9 +44,10 @@ final class HookupSolution {
   private final Lazy<ClipLevel> clipHigh;
   private final Lazy<ClipLevel> clipLow;
   private final Lazy<Map<String, DeviceState>> devices;
+  private final LargeSignal largeSignal;
 
   HookupSolution(Design design, Hookup hookup, DeviceModels models) {
-    this(design, hookup, models, Optional.empty());
+    this(design, hookup, models, Optional.empty(), Progress.none());
   }
 
   /**
@@ -53,6 +55,20 @@ final class HookupSolution {
    *     from
    */
   HookupSolution(Design design, Hookup hookup, DeviceModels models, Optional<HookupSolution> near) {
+    this(design, hookup, models, near, Progress.none());
+  }
+
+  /**
+   * @param near the same hookup with values that differ little; what was solved of it is started
+   *     from
+   * @param progress asked by what takes long whether it is still wanted
+   */
+  HookupSolution(
+      Design design,
+      Hookup hookup,
+      DeviceModels models,
+      Optional<HookupSolution> near,
+      Progress progress) {
     this.design = design;
     this.hookup = hookup;
     this.gains = new HookupGains(hookup);
@@ -95,6 +111,7 @@ final class HookupSolution {
     this.devices =
         new Lazy<>(
             () -> new DeviceReadout(assembled()).read(rest.get().state(), rest.get().kelvins()));
+    this.largeSignal = new LargeSignal(this, progress);
   }
 
   Design design() {
@@ -240,6 +257,11 @@ final class HookupSolution {
   /** The output short-circuited. */
   ShortCircuit shortCircuit() {
     return ShortCircuit.of(design, assembled(), gains, rest.get(), heldRest());
+  }
+
+  /** Steps and clipping in time. */
+  LargeSignal largeSignal() {
+    return largeSignal;
   }
 
   /** Throws the reason where there is no loop. */

@@ -133,7 +133,7 @@ record Levels(
   }
 
   /** The state in which the output first reaches a level, or null when it never does. */
-  private static CircuitState reach(
+  static CircuitState reach(
       AssembledHookup hookup, HookupGains gains, CircuitState from, double target) {
     double start = from.voltage(hookup.out());
     if (start == target) {

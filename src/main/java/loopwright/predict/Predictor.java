@@ -21,10 +21,51 @@ public final class Predictor {
   private static final double HIGHEST = 1e9;
   private static final int PER_DECADE = 20;
 
+  private static final String WAITS = "not solved yet: it takes longer than the others";
+
   private Predictor() {}
 
+  /** Whether a prediction was made with a lower cost, so that some of its figures wait. */
+  public static boolean leavesOut(Prediction prediction) {
+    return prediction.hookups().stream()
+        .flatMap(hookup -> hookup.figures().values().stream())
+        .anyMatch(result -> result.solved().says().equals(WAITS));
+  }
+
   /**
-   * Predicts.
+   * The same prediction with the figures too that only a solution in time can tell, for whoever
+   * wanted to see the others first.
+   *
+   * @param prediction made with a lower cost
+   * @param progress reported to, and asked whether the result is still wanted
+   * @throws loopwright.task.CancelledException when it is not
+   */
+  public static Prediction withFiguresInTime(Prediction prediction, Progress progress) {
+    return new Prediction(
+        prediction.design(),
+        prediction.hookups().parallelStream()
+            .map(hookup -> withFiguresInTime(prediction.design(), hookup, progress))
+            .toList());
+  }
+
+  private static HookupPrediction withFiguresInTime(
+      Design design, HookupPrediction hookup, Progress progress) {
+    HookupSolution solution =
+        new HookupSolution(
+            design, hookup.hookup(), new DeviceModels(design), Optional.empty(), progress);
+    Map<String, FigureResult> figures = new LinkedHashMap<>(hookup.figures());
+    for (Figure figure : Catalogue.figures()) {
+      if (figure.cost() == CostClass.TIME) {
+        progress.check();
+        FigureValue formula = figures.get(figure.key()).formula();
+        figures.put(figure.key(), new FigureResult(figure, formula, figure.solve(solution)));
+      }
+    }
+    return hookup.withFigures(figures);
+  }
+
+  /**
+   * Predicts, with figures of every cost.
    *
    * @param design a valid design, every part it names among its own
    * @param hookups names of the hookups to solve; empty means all
@@ -36,6 +77,27 @@ public final class Predictor {
    */
   public static Prediction predict(
       Design design, List<String> hookups, double[] frequencies, Progress progress) {
+    return predict(design, hookups, frequencies, CostClass.TIME, progress);
+  }
+
+  /**
+   * Predicts what does not cost too much; the other figures say that they wait.
+   *
+   * @param design a valid design, every part it names among its own
+   * @param hookups names of the hookups to solve; empty means all
+   * @param frequencies of the responses, Hz; empty means 20 a decade from 1 Hz to 1 GHz
+   * @param dearest the highest cost of a figure that is solved
+   * @param progress reported to, and asked whether the result is still wanted
+   * @throws loopwright.task.CancelledException when it is not
+   * @throws loopwright.assembly.AssemblyException as {@link #predict(Design, List, double[],
+   *     Progress)}
+   */
+  public static Prediction predict(
+      Design design,
+      List<String> hookups,
+      double[] frequencies,
+      CostClass dearest,
+      Progress progress) {
     List<Hookup> chosen =
         design.hookups().stream()
             .filter(hookup -> hookups.isEmpty() || hookups.contains(hookup.name()))
@@ -48,7 +110,11 @@ public final class Predictor {
                 hookup -> {
                   progress.check();
                   DeviceModels models = new DeviceModels(design);
-                  return predict(new HookupSolution(design, hookup, models), grid, progress);
+                  return predict(
+                      new HookupSolution(design, hookup, models, Optional.empty(), progress),
+                      grid,
+                      dearest,
+                      progress);
                 })
             .toList();
     return new Prediction(design, predictions);
@@ -62,14 +128,14 @@ public final class Predictor {
   }
 
   private static HookupPrediction predict(
-      HookupSolution solution, double[] frequencies, Progress progress) {
+      HookupSolution solution, double[] frequencies, CostClass dearest, Progress progress) {
     Outcome<RestSolution> rest = solution.restOutcome();
     Map<String, FigureResult> figures = new LinkedHashMap<>();
     for (Figure figure : Catalogue.figures()) {
       progress.check();
-      figures.put(
-          figure.key(),
-          new FigureResult(figure, figure.estimate(solution), figure.solve(solution)));
+      FigureValue solved =
+          figure.cost().compareTo(dearest) <= 0 ? figure.solve(solution) : FigureValue.none(WAITS);
+      figures.put(figure.key(), new FigureResult(figure, figure.estimate(solution), solved));
     }
     Outcome<SwingStability> swing = solution.swingOutcome();
     return new HookupPrediction(

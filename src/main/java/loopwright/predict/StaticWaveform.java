@@ -13,16 +13,14 @@ import loopwright.solve.GeneratorWalk;
  */
 final class StaticWaveform {
   static final int POINTS = 1024;
-  static final int HARMONICS = 50;
+  static final int HARMONICS = Harmonics.HIGHEST;
   private static final int QUARTER = POINTS / 4;
 
   private final double amplitude;
   private final double[] generator = new double[POINTS];
   private final double[] out = new double[POINTS];
   private final double[] gainOut = new double[POINTS];
-  private final double[] cosine = new double[HARMONICS + 1];
-  private final double[] sine = new double[HARMONICS + 1];
-  private final double[] error = new double[POINTS];
+  private final Harmonics harmonics;
 
   /**
    * Walks the waveform.
@@ -37,7 +35,7 @@ final class StaticWaveform {
     }
     walkQuarter(hookup, rest, 1);
     walkQuarter(hookup, rest, -1);
-    analyse();
+    harmonics = new Harmonics(out);
   }
 
   private void walkQuarter(AssembledHookup hookup, CircuitState rest, int direction) {
@@ -62,52 +60,29 @@ final class StaticWaveform {
     }
   }
 
-  private void analyse() {
-    for (int n = 0; n <= HARMONICS; n++) {
-      double a = 0;
-      double b = 0;
-      for (int k = 0; k < POINTS; k++) {
-        double angle = 2 * Math.PI * ((long) n * k % POINTS) / POINTS;
-        a += out[k] * Math.cos(angle);
-        b += out[k] * Math.sin(angle);
-      }
-      double weight = n == 0 ? 1.0 / POINTS : 2.0 / POINTS;
-      cosine[n] = weight * a;
-      sine[n] = weight * b;
-    }
-    for (int k = 0; k < POINTS; k++) {
-      double angle = 2 * Math.PI * k / POINTS;
-      error[k] = out[k] - cosine[0] - cosine[1] * Math.cos(angle) - sine[1] * Math.sin(angle);
-    }
-  }
-
   /** Mean of the output, V. */
   double mean() {
-    return cosine[0];
+    return harmonics.mean();
   }
 
   /** Fundamental over amplitude, signed. */
   double gain() {
-    return Math.copySign(harmonic(1), sine[1]) / amplitude;
+    return Math.copySign(harmonic(1), harmonics.inPhase()) / amplitude;
   }
 
   /** Peak value of a harmonic, V; index 0 the mean. */
   double harmonic(int n) {
-    return n == 0 ? cosine[0] : Math.hypot(cosine[n], sine[n]);
+    return harmonics.peak(n);
   }
 
   /** Root of the sum of squares of harmonics 2 to 50 over the fundamental. */
   double distortion() {
-    double sum = 0;
-    for (int n = 2; n <= HARMONICS; n++) {
-      sum += cosine[n] * cosine[n] + sine[n] * sine[n];
-    }
-    return Math.sqrt(sum) / harmonic(1);
+    return harmonics.distortion();
   }
 
   /** Half the peak-to-peak of the output less its mean and fundamental, V. */
   double residual() {
-    return halfRange(error);
+    return halfRange(harmonics.residual());
   }
 
   /** Half the range of v(gainOut) − v(out), V. */
@@ -121,7 +96,8 @@ final class StaticWaveform {
 
   /** The waveform for views. */
   Waveform toWaveform() {
-    return new Waveform(generator.clone(), out.clone(), gainOut.clone(), error.clone());
+    return new Waveform(
+        generator.clone(), out.clone(), gainOut.clone(), harmonics.residual().clone());
   }
 
   private static double halfRange(double[] values) {

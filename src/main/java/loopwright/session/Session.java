@@ -210,6 +210,7 @@ public final class Session implements AutoCloseable {
     if (now.current() || now.failure().isPresent()) {
       runner.cancel();
       solving = false;
+      complete();
       return;
     }
     solving = true;
@@ -231,6 +232,32 @@ public final class Session implements AutoCloseable {
           public void finished(Solved result) {
             solved.put(wanted, result);
             ended(Optional.empty());
+            complete();
+          }
+
+          @Override
+          public void failed(RuntimeException cause) {
+            String says = cause.getMessage() == null ? cause.toString() : cause.getMessage();
+            ended(Optional.of(new Failure(design, wanted, says)));
+          }
+        });
+  }
+
+  /** Solves the figures that the present result leaves out, once that is shown. */
+  private void complete() {
+    Design design = history.design();
+    String wanted = hookup;
+    Solved first = solved.get(wanted);
+    if (first == null || !first.design().equals(design) || !source.leavesOut(first.assessment())) {
+      return;
+    }
+    runner.run(
+        progress -> new Solved(source.complete(first.assessment(), progress), first.took()),
+        new Receiver<Solved>() {
+          @Override
+          public void finished(Solved result) {
+            solved.put(wanted, result);
+            tell();
           }
 
           @Override

@@ -17,6 +17,7 @@ import loopwright.file.FileException;
 import loopwright.part.Shelf;
 import loopwright.quantity.Quantity;
 import loopwright.quantity.Unit;
+import loopwright.task.Progress;
 import loopwright.task.Receiver;
 import loopwright.task.SameThreadRunner;
 import loopwright.task.TaskRunner;
@@ -211,6 +212,44 @@ class SessionTest {
     Path file = folder.resolve("coil.json");
     files.save(file, design, Optional.empty());
     return file;
+  }
+
+  /** What takes long comes after what was shown first, also when another hookup came between. */
+  @Test
+  void fillsInWhatWasLeftOut() {
+    List<Assessment> completed = new ArrayList<>();
+    PredictionSource source =
+        new PredictionSource() {
+          @Override
+          public Assessment assess(Design design, List<String> hookups, Progress progress) {
+            return Predictions.assess(design, hookups);
+          }
+
+          @Override
+          public boolean leavesOut(Assessment first) {
+            return !completed.contains(first);
+          }
+
+          @Override
+          public Assessment complete(Assessment first, Progress progress) {
+            Assessment whole =
+                Predictions.assess(
+                    first.prediction().design(),
+                    List.of(first.prediction().hookups().get(0).hookup().name()),
+                    solved -> solved + 1);
+            completed.add(whole);
+            return whole;
+          }
+        };
+    Session session = new Session(files, source, new SameThreadRunner(), opened);
+    assertThat(completed).hasSize(1);
+    assertThat(session.snapshot().current()).isTrue();
+    assertThat(session.snapshot().newest().orElseThrow().assessment()).isSameAs(completed.get(0));
+    session.edit(Edit.of("Load 10k", edited));
+    assertThat(completed).hasSize(2);
+    assertThat(session.snapshot().newest().orElseThrow().assessment()).isSameAs(completed.get(1));
+    session.undo();
+    assertThat(completed).hasSize(3);
   }
 
   private Session session() {

@@ -26,7 +26,15 @@ class DoubleInjectionTest {
     builder.resistor("input", "amplifierSide", CircuitBuilder.GROUND, 4e3);
     builder.figureAmplifier(
         new FigureAmplifier.Figures(
-            12.5, 0, Double.POSITIVE_INFINITY, 0, -10, 10, 1e3, new double[0]),
+            12.5,
+            0,
+            Double.POSITIVE_INFINITY,
+            0,
+            -10,
+            10,
+            1e3,
+            Double.POSITIVE_INFINITY,
+            new double[0]),
         "in+",
         "amplifierSide",
         "gainOut",
