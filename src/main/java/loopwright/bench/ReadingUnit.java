@@ -1,5 +1,7 @@
 package loopwright.bench;
 
+import java.util.List;
+import java.util.stream.Stream;
 import loopwright.design.Reading;
 import loopwright.predict.Catalogue;
 import loopwright.predict.Figure;
@@ -7,7 +9,26 @@ import loopwright.quantity.Unit;
 
 /** The unit of a reading. */
 public final class ReadingUnit {
+  private static final List<String> OF_THE_BENCH =
+      List.of(
+          "nodeVoltage",
+          "gain",
+          "phase",
+          "supplyCurrent",
+          "collectorCurrent",
+          "baseEmitterVoltage",
+          "temperature",
+          "resistance",
+          "capacitance",
+          "beta");
+
   private ReadingUnit() {}
+
+  /** Everything that may be read: quantities of the bench, then every figure by its key. */
+  public static List<String> quantities() {
+    return Stream.concat(OF_THE_BENCH.stream(), Catalogue.figures().stream().map(Figure::key))
+        .toList();
+  }
 
   /** The unit of what was read. */
   public static Unit of(Reading reading) {

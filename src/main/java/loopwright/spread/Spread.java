@@ -52,14 +52,25 @@ public final class Spread {
   /**
    * Samples every hookup of a design.
    *
+   * @see #of(Design, List, Sampling, Progress)
+   */
+  public static List<HookupSpread> of(Design design, Sampling sampling, Progress progress) {
+    return of(
+        design, design.hookups().stream().map(each -> each.name()).toList(), sampling, progress);
+  }
+
+  /**
+   * Samples hookups of a design.
+   *
    * @param design a valid design, every part it names among its own
+   * @param names of the hookups
    * @param progress reported to, and asked whether the result is still wanted
    * @return one entry for each hookup
    * @throws loopwright.task.CancelledException when it is not
    * @throws loopwright.assembly.AssemblyException when the design stands for no circuit
    */
-  public static List<HookupSpread> of(Design design, Sampling sampling, Progress progress) {
-    List<String> names = design.hookups().stream().map(each -> each.name()).toList();
+  public static List<HookupSpread> of(
+      Design design, List<String> names, Sampling sampling, Progress progress) {
     HookupFigures first = HookupFigures.of(design, names.get(0));
     List<TolerancedPart> parts = TolerancedParts.of(first);
     Counter counter = new Counter(progress, names.size() * sampling.samples());

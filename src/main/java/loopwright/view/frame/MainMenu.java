@@ -14,6 +14,7 @@ import javax.swing.JRadioButtonMenuItem;
 import javax.swing.KeyStroke;
 import loopwright.design.Hookup;
 import loopwright.session.Snapshot;
+import loopwright.view.study.Studies;
 import loopwright.view.theme.Theme;
 
 /** The menu bar. */
@@ -31,6 +32,7 @@ final class MainMenu extends JMenuBar {
    * @param theme the present theme
    * @param chooseTheme takes the theme that a person chooses
    * @param chooseHookup takes the hookup that a person chooses
+   * @param studies opens the dialogs that work something out
    * @param quit leaves the program
    */
   MainMenu(
@@ -38,6 +40,7 @@ final class MainMenu extends JMenuBar {
       Theme theme,
       Consumer<Theme> chooseTheme,
       Consumer<String> chooseHookup,
+      Studies studies,
       Runnable quit) {
     this.chooseHookup = chooseHookup;
     undo = item("Undo", "edit.undo", 'U', control(KeyEvent.VK_Z), commands::undo);
@@ -45,6 +48,7 @@ final class MainMenu extends JMenuBar {
     add(fileMenu(commands, quit));
     add(menu("Edit", 'E', undo, redo));
     add(viewMenu(commands, theme, chooseTheme));
+    add(workMenu(studies));
     add(menu("Help", 'H', item("About Loopwright", "help.about", 'A', null, commands::about)));
   }
 
@@ -78,6 +82,21 @@ final class MainMenu extends JMenuBar {
     view.add(hookups);
     view.add(item("Parts: printed and modelled…", "view.parts", 'P', null, commands::parts));
     return view;
+  }
+
+  private static JMenu workMenu(Studies studies) {
+    return menu(
+        "Work out",
+        'W',
+        item("Size a divider…", "work.divider", 'D', control(KeyEvent.VK_D), studies::divider),
+        item("Cure an oscillation…", "work.cure", 'C', control(KeyEvent.VK_K), studies::cure),
+        item("Spread…", "work.spread", 'S', control(KeyEvent.VK_T), studies::spread),
+        item(
+            "Bench: compare and explain…",
+            "work.bench",
+            'B',
+            control(KeyEvent.VK_B),
+            studies::bench));
   }
 
   /** Shows what can be undone, and the hookups. */
@@ -117,7 +136,7 @@ final class MainMenu extends JMenuBar {
 
   private static JMenu menu(String title, char mnemonic, JMenuItem... items) {
     JMenu menu = new JMenu(title);
-    menu.setName(title.toLowerCase(java.util.Locale.ROOT));
+    menu.setName(title.toLowerCase(java.util.Locale.ROOT).replace(' ', '-'));
     menu.setMnemonic(mnemonic);
     for (JMenuItem item : items) {
       menu.add(item);

@@ -1,15 +1,22 @@
 package loopwright.view.frame;
 
 import java.awt.Dimension;
+import java.awt.EventQueue;
 import java.awt.GraphicsEnvironment;
 import java.awt.Rectangle;
 import java.awt.event.WindowAdapter;
 import java.awt.event.WindowEvent;
+import java.util.ArrayList;
+import java.util.List;
 import javax.swing.JFrame;
 import javax.swing.WindowConstants;
 import loopwright.part.Shelf;
 import loopwright.session.Session;
 import loopwright.session.Snapshot;
+import loopwright.task.BackgroundRunner;
+import loopwright.task.TaskRunner;
+import loopwright.view.study.Desk;
+import loopwright.view.study.Studies;
 import loopwright.view.theme.Theme;
 
 /** The main window. All of it belongs to the event thread. */
@@ -21,6 +28,8 @@ public final class MainWindow {
   private final Session session;
   private final Commands commands;
   private final MainMenu menu;
+  private final Studies studies;
+  private final List<TaskRunner> runners = new ArrayList<>();
 
   /**
    * A window on a session, with its usual dialogs.
@@ -45,7 +54,8 @@ public final class MainWindow {
     commands =
         new Commands(
             session, dialogs == null ? new SwingDialogs(frame) : dialogs, workbench::commitTyping);
-    menu = new MainMenu(commands, theme, Theme::apply, session::choose, this::quit);
+    studies = new Studies(frame, new Desk(session::snapshot, session::edit, this::runner));
+    menu = new MainMenu(commands, theme, Theme::apply, session::choose, studies, this::quit);
     frame.setName("window");
     frame.setJMenuBar(menu);
     frame.setContentPane(workbench);
@@ -76,9 +86,16 @@ public final class MainWindow {
     return frame;
   }
 
+  private TaskRunner runner() {
+    TaskRunner runner = new BackgroundRunner(EventQueue::invokeLater);
+    runners.add(runner);
+    return runner;
+  }
+
   private void show(Snapshot snapshot) {
     frame.setTitle(title(snapshot));
     menu.show(snapshot);
+    studies.tell(snapshot);
   }
 
   /** The design's name, an asterisk where it is not saved, and the file it is in. */
@@ -89,6 +106,8 @@ public final class MainWindow {
 
   private void quit() {
     if (commands.mayLeave()) {
+      studies.close();
+      runners.forEach(TaskRunner::close);
       session.close();
       frame.dispose();
     }

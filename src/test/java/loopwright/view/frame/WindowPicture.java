@@ -9,6 +9,9 @@ import java.awt.image.BufferedImage;
 import javax.swing.JPanel;
 import loopwright.part.Shelf;
 import loopwright.session.Session;
+import loopwright.task.SameThreadRunner;
+import loopwright.view.study.Desk;
+import loopwright.view.study.Studies;
 import loopwright.view.theme.Theme;
 
 /** The inside of the window, laid out and painted without any display. */
@@ -26,6 +29,7 @@ final class WindowPicture {
             theme,
             Theme::apply,
             session::choose,
+            new Studies(null, new Desk(session::snapshot, session::edit, SameThreadRunner::new)),
             () -> {});
     menu.show(session.snapshot());
     session.onChange(menu::show);

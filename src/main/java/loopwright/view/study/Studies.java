@@ -1,0 +1,94 @@
+package loopwright.view.study;
+
+import java.awt.Dialog;
+import java.awt.Dimension;
+import java.awt.Window;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.Function;
+import javax.swing.JComponent;
+import javax.swing.JDialog;
+import javax.swing.KeyStroke;
+import javax.swing.WindowConstants;
+import loopwright.session.Snapshot;
+
+/** Opens the studies, each in a dialog beside the window that stays until it is closed. */
+public final class Studies {
+  private static final Dimension USUAL = new Dimension(980, 560);
+  private static final Dimension LEAST = new Dimension(760, 420);
+
+  private final Window owner;
+  private final Desk desk;
+  private final Map<String, JDialog> open = new LinkedHashMap<>();
+  private final Map<String, Study> studies = new LinkedHashMap<>();
+
+  /**
+   * @param owner the window that they stand beside
+   * @param desk its session
+   */
+  public Studies(Window owner, Desk desk) {
+    this.owner = owner;
+    this.desk = desk;
+  }
+
+  /** Ranked dividers for a wanted gain. */
+  public void divider() {
+    show("divider", DividerStudy::new);
+  }
+
+  /** Cures of an oscillation. */
+  public void cure() {
+    show("cure", CureStudy::new);
+  }
+
+  /** Bands for the tolerances. */
+  public void spread() {
+    show("spread", SpreadStudy::new);
+  }
+
+  /** Readings beside the prediction. */
+  public void bench() {
+    show("bench", BenchStudy::new);
+  }
+
+  /** Tells all that are open of another moment. */
+  public void tell(Snapshot snapshot) {
+    studies.values().forEach(study -> study.show(snapshot));
+  }
+
+  /** Closes all. */
+  public void close() {
+    open.values().forEach(JDialog::dispose);
+  }
+
+  private void show(String key, Function<Desk, Study> make) {
+    JDialog dialog =
+        open.computeIfAbsent(
+            key,
+            absent -> {
+              Study study = make.apply(desk);
+              studies.put(key, study);
+              return dialog(study);
+            });
+    dialog.setVisible(true);
+    dialog.toFront();
+  }
+
+  private JDialog dialog(Study study) {
+    JDialog dialog = new JDialog(owner, study.title(), Dialog.ModalityType.MODELESS);
+    dialog.setName(study.getName());
+    dialog.setContentPane(study);
+    dialog.getRootPane().setDefaultButton(study.defaultButton());
+    dialog
+        .getRootPane()
+        .registerKeyboardAction(
+            event -> dialog.setVisible(false),
+            KeyStroke.getKeyStroke("ESCAPE"),
+            JComponent.WHEN_IN_FOCUSED_WINDOW);
+    dialog.setDefaultCloseOperation(WindowConstants.HIDE_ON_CLOSE);
+    dialog.setMinimumSize(LEAST);
+    dialog.setSize(USUAL);
+    dialog.setLocationRelativeTo(owner);
+    return dialog;
+  }
+}
