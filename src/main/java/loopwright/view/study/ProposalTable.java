@@ -48,7 +48,9 @@ final class ProposalTable extends JPanel {
     for (int column = 1; column < columns.size(); column++) {
       table.getColumnModel().getColumn(column).setCellRenderer(right);
     }
-    table.getColumnModel().getColumn(0).setPreferredWidth(220);
+    for (int column = 0; column < columns.size(); column++) {
+      table.getColumnModel().getColumn(column).setPreferredWidth(width(column));
+    }
     words.setName("words");
     words.setEditable(false);
     words.setLineWrap(true);
@@ -59,6 +61,16 @@ final class ProposalTable extends JPanel {
     apply.addActionListener(event -> chosen().ifPresent(onApply));
     add(new JScrollPane(table), BorderLayout.CENTER);
     add(foot(), BorderLayout.SOUTH);
+  }
+
+  /** Words need more room than numbers, and some units more than others. */
+  private int width(int column) {
+    return switch (columns.get(column)) {
+      case "Noise" -> 105;
+      case "Matters most" -> 240;
+      case "Verdict" -> 120;
+      default -> column == 0 ? 200 : 80;
+    };
   }
 
   private JPanel foot() {

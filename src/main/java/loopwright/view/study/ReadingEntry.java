@@ -47,7 +47,7 @@ final class ReadingEntry extends JPanel {
   }
 
   ReadingEntry(Supplier<Snapshot> now, Consumer<Reading> onAdd) {
-    super(new MigLayout("insets 0, fillx, wrap 1", "[grow,fill]", "[]2[]"));
+    super(new MigLayout("insets 0, fillx, wrap 1", "[grow,fill]", "[]4[]2[]"));
     Theme.style(this, "plain");
     this.now = now;
     this.onAdd = onAdd;
@@ -66,13 +66,12 @@ final class ReadingEntry extends JPanel {
     add.setName("add");
     add.setMnemonic('D');
     add.addActionListener(event -> add());
+    add(new Inputs().field("Quantity", 'Q', quantity, 190).field("at", 'T', place, 300));
     add(
         new Inputs()
-            .field("Quantity", 'Q', quantity, 190)
-            .field("at", 'T', place, 150)
             .field("Value", 'V', value, 90)
             .field("shown as", 'H', expression, 110)
-            .field("by", 'Y', instrument, 110)
+            .field("by", 'Y', instrument, 130)
             .own(add));
     add(complaint, "wmin 0");
     fillPlaces(now.get());

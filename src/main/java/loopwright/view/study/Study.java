@@ -14,7 +14,7 @@ public abstract class Study extends JPanel {
    * @param title of the dialog
    */
   Study(String title) {
-    super(new MigLayout("insets 12, fill, wrap 1", "[grow,fill]", "[][][grow,fill]"));
+    super(new MigLayout("insets 12, fill, wrap 1", "[0:0,grow,fill]", "[][][grow,fill]"));
     this.title = title;
     Theme.style(this, "plain");
     setName("study." + title.toLowerCase(java.util.Locale.ROOT).replace(' ', '-'));
