@@ -10,6 +10,7 @@ import java.io.PrintStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -19,27 +20,39 @@ import loopwright.command.CommandLineProgram;
 import loopwright.command.CommandServices;
 import loopwright.command.Console;
 import loopwright.command.Invocation;
+import loopwright.design.Design;
 import loopwright.design.DesignException;
 import loopwright.file.DesignDocument;
 import loopwright.file.DesignFile;
 import loopwright.file.FileException;
+import loopwright.file.Recovery;
 import loopwright.file.Shelves;
+import loopwright.file.UserFolder;
 import loopwright.part.Shelf;
 import loopwright.predict.Catalogue;
 import loopwright.predict.Figure;
 import loopwright.predict.Predictor;
 import loopwright.quantity.Unit;
+import loopwright.session.KeptWork;
 import loopwright.session.PredictionSource;
+import loopwright.session.Preferences;
 import loopwright.session.Session;
 import loopwright.task.BackgroundRunner;
 import loopwright.task.TaskRunner;
+import loopwright.view.frame.Keeping;
 import loopwright.view.frame.MainWindow;
 import loopwright.view.theme.Theme;
 
 /** Composition root: the one place that knows every package. */
 public final class Loopwright {
-  /** The design that the window opens with when none is named. */
-  private static final String WORKED_EXAMPLE = "/loopwright/examples/seismometer-coil.json";
+  /** Designs to begin with; the window opens with the first when none is named. */
+  private static final List<String> EXAMPLES =
+      List.of(
+          "seismometer-coil",
+          "hydrophone-follower",
+          "measured-amplifier",
+          "nine-volt-preamplifier",
+          "everything-fitted");
 
   private static final int INPUT_WRONG = 1;
 
@@ -90,7 +103,7 @@ public final class Loopwright {
     }
     DesignDocument document;
     try {
-      document = file.map(designs::read).orElseGet(this::workedExample);
+      document = file.map(designs::read).orElseGet(() -> example(EXAMPLES.get(0)));
     } catch (FileException | DesignException e) {
       console.err().println(e.getMessage());
       return INPUT_WRONG;
@@ -112,21 +125,15 @@ public final class Loopwright {
     return command(
         List.of("predict", "-"),
         new Console(
-            Loopwright.class.getResourceAsStream(WORKED_EXAMPLE), console.out(), console.err()));
+            Loopwright.class.getResourceAsStream(
+                "/loopwright/examples/" + EXAMPLES.get(0) + ".json"),
+            console.out(),
+            console.err()));
   }
 
   private int command(List<String> arguments, Console streams) {
     CommandServices services = new CommandServices(designs, Predictor::predict, Findings::of);
     return new CommandLineProgram(services).run(arguments.toArray(String[]::new), streams);
-  }
-
-  private DesignDocument workedExample() {
-    try (InputStream stream = Loopwright.class.getResourceAsStream(WORKED_EXAMPLE)) {
-      return designs.read(
-          new String(stream.readAllBytes(), StandardCharsets.UTF_8), "the worked example");
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
   }
 
   private void openWindow(Optional<Path> file, DesignDocument document) {
@@ -135,6 +142,33 @@ public final class Loopwright {
     Session session =
         file.map(path -> new Session(designs, source, runner, path))
             .orElseGet(() -> new Session(designs, source, runner, document.design()));
-    new MainWindow(session, shelf, Theme.LIGHT).open();
+    UserFolder folder = UserFolder.usual();
+    Preferences preferences = new Preferences(folder);
+    KeptWork work = new KeptWork(session, new Recovery(designs, folder));
+    new MainWindow(session, shelf, look(preferences), new Keeping(preferences, work, beginnings()))
+        .open();
+  }
+
+  private static Theme look(Preferences preferences) {
+    return preferences.look().filter(Theme.DARK.name()::equals).isPresent()
+        ? Theme.DARK
+        : Theme.LIGHT;
+  }
+
+  private Map<String, Design> beginnings() {
+    Map<String, Design> beginnings = new LinkedHashMap<>();
+    for (String name : EXAMPLES) {
+      beginnings.put(name, example(name).design());
+    }
+    return beginnings;
+  }
+
+  private DesignDocument example(String name) {
+    String resource = "/loopwright/examples/" + name + ".json";
+    try (InputStream stream = Loopwright.class.getResourceAsStream(resource)) {
+      return designs.read(new String(stream.readAllBytes(), StandardCharsets.UTF_8), name);
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
   }
 }

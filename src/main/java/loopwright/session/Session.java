@@ -1,6 +1,9 @@
 package loopwright.session;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.FileTime;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -29,6 +32,7 @@ public final class Session implements AutoCloseable {
   private final Map<String, Solved> solved = new LinkedHashMap<>();
 
   private Optional<Path> path = Optional.empty();
+  private Optional<FileTime> stamp = Optional.empty();
   private Optional<DesignDocument> document = Optional.empty();
   private Optional<Design> saved = Optional.empty();
   private History history;
@@ -102,6 +106,29 @@ public final class Session implements AutoCloseable {
     tell();
   }
 
+  /** Begins with a design that is in no file yet, in place of this one, whose edits are lost. */
+  public void begin(Design design) {
+    path = Optional.empty();
+    document = Optional.empty();
+    saved = Optional.empty();
+    stamp = Optional.empty();
+    start(design);
+    tell();
+  }
+
+  /** Whether the file was changed by something else since it was opened or saved here. */
+  public boolean changedOnDisk() {
+    return path.isPresent() && !modified(path.get()).equals(stamp);
+  }
+
+  private static Optional<FileTime> modified(Path file) {
+    try {
+      return Optional.of(Files.getLastModifiedTime(file));
+    } catch (IOException e) {
+      return Optional.empty();
+    }
+  }
+
   /**
    * Saves the present design; what was not changed stays as its author wrote it.
    *
@@ -113,6 +140,7 @@ public final class Session implements AutoCloseable {
     files.save(file, history.design(), document);
     saved = Optional.of(history.design());
     path = Optional.of(file);
+    stamp = modified(file);
     tell();
   }
 
@@ -177,6 +205,7 @@ public final class Session implements AutoCloseable {
 
   private void take(Path file, DesignDocument opened) {
     path = Optional.of(file);
+    stamp = modified(file);
     document = Optional.of(opened);
     saved = Optional.of(opened.design());
     start(opened.design());

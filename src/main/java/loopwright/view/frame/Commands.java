@@ -3,9 +3,12 @@ package loopwright.view.frame;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import loopwright.design.Design;
 import loopwright.design.DesignException;
 import loopwright.design.Problem;
 import loopwright.file.FileException;
+import loopwright.file.Recovery;
+import loopwright.session.KeptWork;
 import loopwright.session.Session;
 import loopwright.session.Snapshot;
 
@@ -34,14 +37,49 @@ final class Commands {
     }
   }
 
+  /** Opens a file if the present design may be left. */
+  void openFile(Path file) {
+    commitTyping.run();
+    if (mayLeave()) {
+      open(file);
+    }
+  }
+
   private void open(Path file) {
     attempt("Cannot open the design", () -> session.open(file));
+  }
+
+  /** Begins with a design that is in no file yet, if the present one may be left. */
+  void begin(Design design) {
+    commitTyping.run();
+    if (mayLeave()) {
+      session.begin(design);
+    }
+  }
+
+  /** Offers the work that earlier runs left, one after the other until one is taken up. */
+  void offer(KeptWork work) {
+    for (Recovery.Left left : work.left()) {
+      switch (dialogs.left(left)) {
+        case RESTORE -> {
+          work.restore(left);
+          return;
+        }
+        case DISCARD -> work.discard(left);
+        case LATER -> {
+          return;
+        }
+      }
+    }
   }
 
   /** Saves where the design came from, or asks where. Whether it was saved. */
   boolean save() {
     commitTyping.run();
     Optional<Path> path = session.snapshot().path();
+    if (path.isPresent() && session.changedOnDisk() && !dialogs.mayOverwrite(path.get())) {
+      return saveAs();
+    }
     return path.isPresent() ? save(path.get()) : saveAs();
   }
 

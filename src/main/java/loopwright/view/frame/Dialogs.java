@@ -3,6 +3,7 @@ package loopwright.view.frame;
 import java.nio.file.Path;
 import java.util.Optional;
 import loopwright.design.Design;
+import loopwright.file.Recovery;
 
 /** What the window asks a person in between. */
 public interface Dialogs {
@@ -26,6 +27,19 @@ public interface Dialogs {
 
   /** Asks what to do with the unsaved edits of a design. */
   Answer unsaved(String name);
+
+  /** What to do with work that an earlier run left. */
+  enum Kept {
+    RESTORE,
+    DISCARD,
+    LATER
+  }
+
+  /** Asks what to do with unsaved work that an earlier run left. */
+  Kept left(Recovery.Left left);
+
+  /** Whether a file that something else has changed may be overwritten. */
+  boolean mayOverwrite(Path file);
 
   /**
    * Says what went wrong.

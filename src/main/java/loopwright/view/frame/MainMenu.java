@@ -3,7 +3,9 @@ package loopwright.view.frame;
 import java.awt.event.ActionEvent;
 import java.awt.event.InputEvent;
 import java.awt.event.KeyEvent;
+import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
 import javax.swing.ButtonGroup;
@@ -12,6 +14,7 @@ import javax.swing.JMenuBar;
 import javax.swing.JMenuItem;
 import javax.swing.JRadioButtonMenuItem;
 import javax.swing.KeyStroke;
+import loopwright.design.Design;
 import loopwright.design.Hookup;
 import loopwright.session.Snapshot;
 import loopwright.view.study.Studies;
@@ -24,6 +27,8 @@ final class MainMenu extends JMenuBar {
   private final JMenuItem undo;
   private final JMenuItem redo;
   private final JMenu hookups = new JMenu("Hookup");
+  private final JMenu recent = new JMenu("Open recent");
+  private final transient Commands commands;
   private final transient Consumer<String> chooseHookup;
   private transient List<String> names = List.of();
 
@@ -33,6 +38,7 @@ final class MainMenu extends JMenuBar {
    * @param chooseTheme takes the theme that a person chooses
    * @param chooseHookup takes the hookup that a person chooses
    * @param studies opens the dialogs that work something out
+   * @param beginnings designs to begin with, by a short name
    * @param quit leaves the program
    */
   MainMenu(
@@ -41,23 +47,35 @@ final class MainMenu extends JMenuBar {
       Consumer<Theme> chooseTheme,
       Consumer<String> chooseHookup,
       Studies studies,
+      Map<String, Design> beginnings,
       Runnable quit) {
     this.chooseHookup = chooseHookup;
     undo = item("Undo", "edit.undo", 'U', control(KeyEvent.VK_Z), commands::undo);
     redo = item("Redo", "edit.redo", 'R', controlShift(KeyEvent.VK_Z), commands::redo);
-    add(fileMenu(commands, quit));
+    this.commands = commands;
+    add(fileMenu(commands, beginnings, quit));
     add(menu("Edit", 'E', undo, redo));
     add(viewMenu(commands, theme, chooseTheme));
     add(workMenu(studies));
     add(menu("Help", 'H', item("About Loopwright", "help.about", 'A', null, commands::about)));
   }
 
-  private static JMenu fileMenu(Commands commands, Runnable quit) {
+  /** Offers the files that were open lately. */
+  void showRecent(List<Path> files) {
+    FileMenus.fill(recent, files, commands::openFile);
+  }
+
+  private JMenu fileMenu(Commands commands, Map<String, Design> beginnings, Runnable quit) {
+    recent.setName("file.recent");
+    recent.setMnemonic('R');
+    recent.setEnabled(false);
     JMenu file =
         menu(
             "File",
             'F',
+            FileMenus.beginnings(beginnings, commands::begin),
             item("Open…", "file.open", 'O', control(KeyEvent.VK_O), commands::open),
+            recent,
             item("Save", "file.save", 'S', control(KeyEvent.VK_S), commands::save),
             item("Save as…", "file.saveAs", 'A', controlShift(KeyEvent.VK_S), commands::saveAs));
     file.addSeparator();

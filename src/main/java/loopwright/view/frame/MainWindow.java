@@ -9,8 +9,10 @@ import java.awt.event.WindowEvent;
 import java.util.ArrayList;
 import java.util.List;
 import javax.swing.JFrame;
+import javax.swing.Timer;
 import javax.swing.WindowConstants;
 import loopwright.part.Shelf;
+import loopwright.session.Preferences;
 import loopwright.session.Session;
 import loopwright.session.Snapshot;
 import loopwright.task.BackgroundRunner;
@@ -24,11 +26,16 @@ public final class MainWindow {
   private static final Dimension USUAL = new Dimension(1440, 900);
   private static final Dimension LEAST = new Dimension(1024, 700);
 
+  /** Unsaved work is kept so long after the last change, ms. */
+  private static final int AUTOSAVE = 1500;
+
   private final JFrame frame = new JFrame();
   private final Session session;
   private final Commands commands;
   private final MainMenu menu;
   private final Studies studies;
+  private final Keeping keeping;
+  private final Timer saving;
   private final List<TaskRunner> runners = new ArrayList<>();
 
   /**
@@ -37,9 +44,10 @@ public final class MainWindow {
    * @param session the open design; closed when the window is
    * @param shelf parts to choose from beside those of the design
    * @param theme applied before anything is made
+   * @param keeping what is kept from one run to the next
    */
-  public MainWindow(Session session, Shelf shelf, Theme theme) {
-    this(session, shelf, theme, null);
+  public MainWindow(Session session, Shelf shelf, Theme theme, Keeping keeping) {
+    this(session, shelf, theme, keeping, null);
   }
 
   /**
@@ -47,15 +55,27 @@ public final class MainWindow {
    *
    * @param dialogs asks in between; null for the usual ones
    */
-  MainWindow(Session session, Shelf shelf, Theme theme, Dialogs dialogs) {
+  MainWindow(Session session, Shelf shelf, Theme theme, Keeping keeping, Dialogs dialogs) {
     theme.apply();
     this.session = session;
+    this.keeping = keeping;
+    this.saving = new Timer(AUTOSAVE, event -> keeping.work().keep());
     Workbench workbench = new Workbench(session, shelf);
     commands =
         new Commands(
             session, dialogs == null ? new SwingDialogs(frame) : dialogs, workbench::commitTyping);
     studies = new Studies(frame, new Desk(session::snapshot, session::edit, this::runner));
-    menu = new MainMenu(commands, theme, Theme::apply, session::choose, studies, this::quit);
+    menu =
+        new MainMenu(
+            commands,
+            theme,
+            this::choose,
+            session::choose,
+            studies,
+            keeping.beginnings(),
+            this::quit);
+    saving.setRepeats(false);
+    frame.setTransferHandler(new FileDrop(commands::openFile));
     frame.setName("window");
     frame.setJMenuBar(menu);
     frame.setContentPane(workbench);
@@ -76,14 +96,24 @@ public final class MainWindow {
   /** Puts the window on the screen, as large as there is room. */
   public void open() {
     Rectangle room = GraphicsEnvironment.getLocalGraphicsEnvironment().getMaximumWindowBounds();
-    frame.setSize(Math.min(USUAL.width, room.width), Math.min(USUAL.height, room.height));
+    Preferences.Size wanted =
+        keeping.preferences().size().orElse(new Preferences.Size(USUAL.width, USUAL.height));
+    frame.setSize(
+        Math.min(Math.max(LEAST.width, wanted.width()), room.width),
+        Math.min(Math.max(LEAST.height, wanted.height()), room.height));
     frame.setLocationRelativeTo(null);
     frame.setVisible(true);
+    commands.offer(keeping.work());
   }
 
   /** The window itself. */
   JFrame frame() {
     return frame;
+  }
+
+  private void choose(Theme theme) {
+    theme.apply();
+    keeping.preferences().choose(theme.name());
   }
 
   private TaskRunner runner() {
@@ -95,6 +125,9 @@ public final class MainWindow {
   private void show(Snapshot snapshot) {
     frame.setTitle(title(snapshot));
     menu.show(snapshot);
+    snapshot.path().ifPresent(keeping.preferences()::opened);
+    menu.showRecent(keeping.preferences().recent());
+    saving.restart();
     studies.tell(snapshot);
   }
 
@@ -106,6 +139,9 @@ public final class MainWindow {
 
   private void quit() {
     if (commands.mayLeave()) {
+      saving.stop();
+      keeping.work().forget();
+      keeping.preferences().closed(new Preferences.Size(frame.getWidth(), frame.getHeight()));
       studies.close();
       runners.forEach(TaskRunner::close);
       session.close();

@@ -3,18 +3,25 @@ package loopwright.view.frame;
 import java.awt.Component;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.ZoneId;
+import java.time.format.DateTimeFormatter;
+import java.util.Locale;
 import java.util.Optional;
 import javax.swing.JFileChooser;
 import javax.swing.JOptionPane;
 import javax.swing.JTextArea;
 import javax.swing.filechooser.FileNameExtensionFilter;
 import loopwright.design.Design;
+import loopwright.file.Recovery;
 import loopwright.view.theme.Theme;
 
 /** Asks in dialogs before the window. */
 final class SwingDialogs implements Dialogs {
   private static final String SUFFIX = ".json";
   private static final int COLUMNS = 46;
+  private static final DateTimeFormatter WHEN =
+      DateTimeFormatter.ofPattern("d MMMM yyyy, HH:mm", Locale.ENGLISH)
+          .withZone(ZoneId.systemDefault());
 
   private final Component window;
 
@@ -93,6 +100,46 @@ final class SwingDialogs implements Dialogs {
       case 1 -> Answer.DISCARD;
       default -> Answer.CANCEL;
     };
+  }
+
+  @Override
+  public Kept left(Recovery.Left left) {
+    Object[] choices = {"Restore", "Discard", "Ask again later"};
+    String of = left.of().map(path -> " (" + path.getFileName() + ")").orElse("");
+    int chosen =
+        JOptionPane.showOptionDialog(
+            window,
+            "The program ended before “"
+                + left.design().name()
+                + "”"
+                + of
+                + " was saved.\nIts state of "
+                + WHEN.format(left.when())
+                + " was kept. Restore it?",
+            "Unsaved work",
+            JOptionPane.DEFAULT_OPTION,
+            JOptionPane.QUESTION_MESSAGE,
+            null,
+            choices,
+            choices[0]);
+    return switch (chosen) {
+      case 0 -> Kept.RESTORE;
+      case 1 -> Kept.DISCARD;
+      default -> Kept.LATER;
+    };
+  }
+
+  @Override
+  public boolean mayOverwrite(Path file) {
+    return JOptionPane.showConfirmDialog(
+            window,
+            file.getFileName()
+                + " was changed by something else since it was opened here.\nOverwrite it? "
+                + "Otherwise it can be saved under another name.",
+            "Changed on disk",
+            JOptionPane.YES_NO_OPTION,
+            JOptionPane.WARNING_MESSAGE)
+        == JOptionPane.YES_OPTION;
   }
 
   @Override

@@ -5,8 +5,14 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.FileTime;
 import java.util.Optional;
+import loopwright.design.Change;
+import loopwright.design.Design;
+import loopwright.file.Recovery;
+import loopwright.file.UserFolder;
 import loopwright.session.Edit;
+import loopwright.session.KeptWork;
 import loopwright.session.SampleDesigns;
 import loopwright.session.Session;
 import loopwright.view.frame.Dialogs.Answer;
@@ -137,5 +143,50 @@ class CommandsTest {
   private void edit(String load) {
     session.edit(
         Edit.of("Load " + load, SampleDesigns.withGainLoad(session.snapshot().design(), load)));
+  }
+
+  @Test
+  void aFileThatSomethingElseChangedIsNotOverwrittenUnasked() throws IOException {
+    Path file = folder.resolve("coil.json");
+    dialogs.files.add(file);
+    commands.save();
+    Files.setLastModifiedTime(file, FileTime.fromMillis(1));
+    String before = Files.readString(file);
+    edit("10k");
+    assertThat(commands.save()).isFalse();
+    assertThat(dialogs.said).containsExactly("overwrite coil.json");
+    assertThat(Files.readString(file)).isEqualTo(before);
+
+    dialogs.overwrite = true;
+    assertThat(commands.save()).isTrue();
+    assertThat(session.snapshot().unsaved()).isFalse();
+  }
+
+  @Test
+  void aDesignToBeginWithIsInNoFileYet() {
+    Design other = SampleSessions.quick().snapshot().design();
+    commands.begin(other);
+    assertThat(session.snapshot().path()).isEmpty();
+    assertThat(session.snapshot().design()).isEqualTo(other);
+  }
+
+  @Test
+  void workThatWasLeftIsOfferedAndTakenUp() {
+    UserFolder user = new UserFolder(folder.resolve("user"));
+    Session ended = SampleSessions.quick();
+    ended.edit(
+        Edit.of(
+            "Set",
+            new Change("hookups.divider.feedback.upper", "33k")
+                .applyTo(ended.snapshot().design())));
+    new KeptWork(ended, new Recovery(SampleSessions.files(), user)).keep();
+    KeptWork work = new KeptWork(session, new Recovery(SampleSessions.files(), user));
+
+    dialogs.kept.add(Dialogs.Kept.LATER);
+    commands.offer(work);
+    assertThat(session.snapshot().design()).isNotEqualTo(ended.snapshot().design());
+    dialogs.kept.add(Dialogs.Kept.RESTORE);
+    commands.offer(work);
+    assertThat(session.snapshot().design()).isEqualTo(ended.snapshot().design());
   }
 }

@@ -72,7 +72,13 @@ class MainWindowTest {
                       Screenshots.SOURCE,
                       new BackgroundRunner(EventQueue::invokeLater),
                       file);
-              MainWindow window = new MainWindow(session, shelf, Theme.LIGHT, new SilentDialogs());
+              MainWindow window =
+                  new MainWindow(
+                      session,
+                      shelf,
+                      Theme.LIGHT,
+                      SampleKeeping.in(folder.resolve("user"), session, files),
+                      new SilentDialogs());
               window.open();
               return window.frame();
             });

@@ -7,6 +7,7 @@ import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
 import loopwright.design.Design;
+import loopwright.file.Recovery;
 
 /** Answers as the test has said, and keeps what it was told. */
 final class SilentDialogs implements Dialogs {
@@ -28,6 +29,21 @@ final class SilentDialogs implements Dialogs {
   public Answer unsaved(String name) {
     said.add("unsaved " + name);
     return answers.remove();
+  }
+
+  final Deque<Kept> kept = new ArrayDeque<>();
+  boolean overwrite;
+
+  @Override
+  public Kept left(Recovery.Left left) {
+    said.add("left " + left.design().name());
+    return kept.remove();
+  }
+
+  @Override
+  public boolean mayOverwrite(Path file) {
+    said.add("overwrite " + file.getFileName());
+    return overwrite;
   }
 
   @Override

@@ -6,6 +6,7 @@ import java.awt.Container;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.awt.image.BufferedImage;
+import java.util.Map;
 import javax.swing.JPanel;
 import loopwright.part.Shelf;
 import loopwright.session.Session;
@@ -30,6 +31,7 @@ final class WindowPicture {
             Theme::apply,
             session::choose,
             new Studies(null, new Desk(session::snapshot, session::edit, SameThreadRunner::new)),
+            Map.of(),
             () -> {});
     menu.show(session.snapshot());
     session.onChange(menu::show);
