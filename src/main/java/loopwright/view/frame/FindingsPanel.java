@@ -109,7 +109,7 @@ final class FindingsPanel extends JPanel {
     if (!finding.remedy().isEmpty()) {
       list.add(text(finding.remedy(), "note"), "newline, skip 1, growx, wmin 0, gaptop 0");
       if (!finding.changes().isEmpty()) {
-        list.add(applyButton(finding), "newline, skip 1, left, gaptop 0");
+        list.add(applyButton(finding), "newline, skip 1, span 2, left, wmin 0, gaptop 0");
       }
     }
   }

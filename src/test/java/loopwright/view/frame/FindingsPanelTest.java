@@ -19,6 +19,7 @@ import loopwright.session.SampleDesigns;
 import loopwright.session.Session;
 import loopwright.view.Lookup;
 import loopwright.view.OnEventThread;
+import loopwright.view.Painting;
 import loopwright.view.theme.Theme;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -136,5 +137,20 @@ class FindingsPanelTest {
         .isEqualTo("Set upper resistor to 100 kΩ, lower resistor to 10 kΩ");
     assertThat(RemedyWords.changes(heavy.changes()))
         .isEqualTo("hookups.divider.feedback.upper = 100k, hookups.divider.feedback.lower = 10k");
+  }
+
+  /** As narrow as a window of 1024 pixels makes it. */
+  @Test
+  void noButtonLeavesANarrowPanel() {
+    Painting.of(panel, 372, 220);
+    JPanel list = Lookup.named(panel, "findings", JPanel.class);
+    for (JButton button : buttons()) {
+      assertThat(button.getX() + button.getWidth())
+          .as(button.getText())
+          .isLessThanOrEqualTo(list.getWidth());
+      assertThat(button.getWidth())
+          .as(button.getText())
+          .isGreaterThanOrEqualTo(button.getPreferredSize().width);
+    }
   }
 }
