@@ -83,6 +83,24 @@ public final class SamplePredictions {
         List.of());
   }
 
+  /** A hookup of which only the circuit at rest is solved. */
+  public static HookupPrediction atRest(Hookup hookup, RestState rest) {
+    return new HookupPrediction(
+        hookup,
+        Optional.of(rest),
+        "",
+        figures(hookup, 11, false),
+        List.of(),
+        List.of(),
+        List.of(),
+        List.of(),
+        "",
+        List.of(),
+        List.of(),
+        Optional.empty(),
+        List.of());
+  }
+
   private static HookupPrediction solved(Hookup hookup, double noiseGain, double excess) {
     boolean isOpen = hookup.feedback() instanceof Feedback.Open;
     double amplitude = hookup.source().amplitude().value();

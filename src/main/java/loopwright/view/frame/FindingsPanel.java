@@ -16,6 +16,9 @@ import javax.swing.JTextArea;
 import javax.swing.ScrollPaneConstants;
 import javax.swing.Scrollable;
 import loopwright.check.Finding;
+import loopwright.design.Change;
+import loopwright.design.Design;
+import loopwright.session.Edit;
 import loopwright.session.Snapshot;
 import loopwright.view.theme.Theme;
 import net.miginfocom.swing.MigLayout;
@@ -26,24 +29,24 @@ final class FindingsPanel extends JPanel {
   private final JPanel list = new Entries();
   private final transient Function<String, Optional<String>> blockAt;
   private final transient Consumer<String> onShow;
-  private final transient Consumer<Finding> onApply;
+  private final transient Consumer<Edit> onEdit;
+  private final transient RemedyWords words = new RemedyWords();
+  private transient Optional<Design> design = Optional.empty();
   private transient List<Finding> findings = List.of();
   private String says = "";
 
   /**
    * @param blockAt finds the block that a place belongs to
    * @param onShow shows a block
-   * @param onApply makes the changes of a finding's remedy
+   * @param onEdit makes the edit that a finding's remedy is
    */
   FindingsPanel(
-      Function<String, Optional<String>> blockAt,
-      Consumer<String> onShow,
-      Consumer<Finding> onApply) {
+      Function<String, Optional<String>> blockAt, Consumer<String> onShow, Consumer<Edit> onEdit) {
     super(new BorderLayout(0, 6));
     Theme.style(this, "card");
     this.blockAt = blockAt;
     this.onShow = onShow;
-    this.onApply = onApply;
+    this.onEdit = onEdit;
     list.setName("findings");
     add(title, BorderLayout.NORTH);
     JScrollPane scroll =
@@ -62,6 +65,7 @@ final class FindingsPanel extends JPanel {
   void show(Snapshot snapshot) {
     List<Finding> wanted = snapshot.current() ? snapshot.findings() : List.of();
     String instead = instead(snapshot);
+    design = Optional.of(snapshot.design());
     if (!wanted.equals(findings) || !instead.equals(says)) {
       findings = wanted;
       says = instead;
@@ -105,13 +109,14 @@ final class FindingsPanel extends JPanel {
     if (!finding.remedy().isEmpty()) {
       list.add(text(finding.remedy(), "note"), "newline, skip 1, growx, wmin 0, gaptop 0");
       if (!finding.changes().isEmpty()) {
-        list.add(applyButton(finding), "newline, skip 1, left, gaptop 0");
+        list.add(applyButton(finding), "newline, skip 1, span 2, left, wmin 0, gaptop 0");
       }
     }
   }
 
   private JComponent showButton(Finding finding, String block) {
     JButton button = Theme.style(new JButton("Show"), "pill");
+    button.setName("show." + finding.where());
     button.setToolTipText(finding.where());
     button.getAccessibleContext().setAccessibleName("Show " + finding.where());
     button.addActionListener(event -> onShow.accept(block));
@@ -119,11 +124,14 @@ final class FindingsPanel extends JPanel {
   }
 
   private JComponent applyButton(Finding finding) {
-    JButton button = Theme.style(new JButton(RemedyWords.button(finding)), "pill");
+    String what = words.button(design.orElseThrow(), finding);
+    JButton button = Theme.style(new JButton(what), "pill");
     button.setName("remedy." + finding.where());
-    button.setToolTipText(RemedyWords.changes(finding));
+    button.setToolTipText(RemedyWords.changes(finding.changes()));
     button.getAccessibleContext().setAccessibleDescription(finding.says());
-    button.addActionListener(event -> onApply.accept(finding));
+    button.addActionListener(
+        event ->
+            onEdit.accept(Edit.of(what, Change.applyAll(design.orElseThrow(), finding.changes()))));
     return button;
   }
 

@@ -8,11 +8,8 @@ import javax.swing.BorderFactory;
 import javax.swing.JComponent;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
-import loopwright.check.Finding;
-import loopwright.design.Change;
 import loopwright.part.Shelf;
 import loopwright.predict.HookupPrediction;
-import loopwright.session.Edit;
 import loopwright.session.Session;
 import loopwright.session.Snapshot;
 import loopwright.view.chart.PlotDeck;
@@ -47,9 +44,7 @@ final class Workbench extends JPanel {
     hookups = new HookupChooser(session::choose);
     form = new FormPanel(shelf, session::edit);
     figures = new FiguresPanel(session::measure);
-    findings =
-        new FindingsPanel(
-            form::blockAt, this::select, finding -> session.edit(remedied(session, finding)));
+    findings = new FindingsPanel(form::blockAt, this::select, session::edit);
     path.onSelect(form::select);
     form.onSelect(path::select);
     add(head(), BorderLayout.NORTH);
@@ -95,13 +90,6 @@ final class Workbench extends JPanel {
     plots.show(prediction, snapshot.current(), snapshot.current() ? "" : StatusLine.says(snapshot));
     figures.show(snapshot);
     findings.show(snapshot);
-  }
-
-  /** The remedy of a finding as an edit. */
-  private static Edit remedied(Session session, Finding finding) {
-    return Edit.of(
-        RemedyWords.button(finding),
-        Change.applyAll(session.snapshot().design(), finding.changes()));
   }
 
   private void select(String block) {

@@ -4,6 +4,7 @@ import java.awt.BasicStroke;
 import java.awt.FontMetrics;
 import java.awt.Graphics2D;
 import java.awt.geom.Path2D;
+import java.util.List;
 import loopwright.view.theme.Palette;
 
 /** Draws one block within its bounds: frame, words, and the symbol of what hangs. */
@@ -14,6 +15,7 @@ final class BlockPainter {
   private final int width;
   private final int height;
   private final PathFonts fonts;
+  private final FittedText text;
 
   BlockPainter(
       Graphics2D g2, Block block, double scale, int width, int height, BlockFrame.Look look) {
@@ -23,9 +25,11 @@ final class BlockPainter {
     this.height = height;
     this.frame = new BlockFrame(g2, block, scale, width, height, look);
     this.fonts = PathFonts.at(scale);
+    this.text = new FittedText(g2);
   }
 
-  void paint() {
+  /** Paints; returns the words that were drawn. */
+  List<FittedText.Drawn> paint() {
     frame.paint();
     if (block.hangs()) {
       hanging();
@@ -34,6 +38,7 @@ final class BlockPainter {
     } else {
       inRow();
     }
+    return text.drawn();
   }
 
   private void inRow() {
@@ -41,21 +46,21 @@ final class BlockPainter {
     int x = pixels(10);
     int room = width - 2 * x - point / 2;
     FontMetrics title = g2.getFontMetrics(fonts.title());
-    FontMetrics line = g2.getFontMetrics(fonts.line());
+    FontMetrics number = g2.getFontMetrics(fonts.number());
     int y = pixels(6) + title.getAscent();
     g2.setColor(block.kind() == Block.Kind.ABSENT ? Palette.quiet() : Palette.text());
-    FittedText.draw(g2, block.title(), fonts.title(), x, y, room - frame.markWidth());
-    int bottom = height - pixels(7) - line.getDescent();
-    int lowest = block.headline().isEmpty() ? bottom : bottom - line.getAscent();
+    text.draw(block.title(), fonts.title(), x, y, room - frame.markWidth());
+    int bottom = height - pixels(7) - number.getDescent();
+    int lowest = block.headline().isEmpty() ? bottom : bottom - number.getHeight();
     g2.setColor(Palette.quiet());
-    for (String says : block.says()) {
-      y += line.getHeight();
-      if (y <= lowest) {
-        FittedText.draw(g2, says, fonts.line(), x, y, room);
-      }
+    PackedLines packed =
+        PackedLines.of(block.says(), fonts.line(), g2::getFontMetrics, room, lowest - y);
+    for (String line : packed.lines()) {
+      y += packed.step();
+      text.draw(line, packed.font(), x, y, room);
     }
     g2.setColor(Palette.text());
-    FittedText.draw(g2, block.headline(), fonts.number(), x, bottom, room);
+    text.draw(block.headline(), fonts.number(), x, bottom, room);
     frame.mark(width - pixels(14) - point, pixels(15));
   }
 
@@ -64,8 +69,7 @@ final class BlockPainter {
     int baseline = (height + line.getAscent() - line.getDescent()) / 2;
     int room = width - pixels(20) - frame.markWidth();
     g2.setColor(Palette.text());
-    FittedText.centred(
-        g2, block.says().get(0), fonts.line(), pixels(10) + room / 2, baseline, room);
+    text.centred(block.says().get(0), fonts.line(), pixels(10) + room / 2, baseline, room);
     frame.mark(width - pixels(13), height / 2);
   }
 
@@ -75,13 +79,17 @@ final class BlockPainter {
     int left = x + pixels(17);
     int room = width - left - pixels(4) - frame.markWidth();
     FontMetrics line = g2.getFontMetrics(fonts.line());
-    int y = pixels(11) + line.getAscent();
+    int y = pixels(8) + line.getAscent();
     g2.setColor(Palette.quiet());
     String says = block.title() + ": " + block.says().get(0);
-    int used = FittedText.draw(g2, says, fonts.line(), left, y, room);
+    int used = text.draw(says, fonts.line(), left, y, room);
+    for (String more : block.says().subList(1, block.says().size())) {
+      y += line.getHeight();
+      text.draw(more, fonts.line(), left, y, room + frame.markWidth());
+    }
     g2.setColor(Palette.text());
-    int below = y + line.getHeight() + pixels(1);
-    FittedText.draw(g2, block.headline(), fonts.number(), left, below, room);
+    text.draw(
+        block.headline(), fonts.number(), left, y + line.getHeight(), room + frame.markWidth());
     frame.mark(left + used + pixels(10), pixels(18));
   }
 

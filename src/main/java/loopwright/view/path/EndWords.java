@@ -18,28 +18,34 @@ final class EndWords {
 
   Block source(Source source) {
     List<String> says = new ArrayList<>();
-    String resistance =
-        source.resistance().effective() == 0 ? "" : PartWords.ohms(source.resistance());
+    if (source.resistance().effective() > 0) {
+      says.add(PartWords.ohms(source.resistance()));
+    }
     source
         .attenuator()
         .ifPresent(
-            attenuator ->
-                says.add(
-                    "attenuator 1/"
-                        + PartWords.ratio(
-                            1 + attenuator.series().effective() / attenuator.shunt().effective())));
+            attenuator -> {
+              says.add(
+                  PartWords.ohms(attenuator.series())
+                      + " over "
+                      + PartWords.ohms(attenuator.shunt()));
+              double ratio = 1 + attenuator.series().effective() / attenuator.shunt().effective();
+              says.add("attenuates 1/" + PartWords.ratio(ratio));
+            });
     source
         .couplingCapacitance()
-        .ifPresent(
-            capacitance ->
-                says.add(
-                    "through "
-                        + PartWords.farads(capacitance)
-                        + source
-                            .biasResistance()
-                            .map(bias -> ", " + PartWords.ohms(bias) + place(source.biasTo()))
-                            .orElse("")));
-    says.add(0, says.isEmpty() && resistance.isEmpty() ? "no resistance" : resistance);
+        .ifPresent(capacitance -> says.add("through " + PartWords.farads(capacitance)));
+    source
+        .biasResistance()
+        .ifPresent(bias -> says.add(PartWords.ohms(bias) + place(source.biasTo())));
+    if (says.isEmpty()) {
+      says.add("no resistance");
+    }
+    double dc = source.dc().value();
+    boolean isSine = source.amplitude().value() != 0;
+    if (isSine && dc != 0) {
+      says.add("on " + PartWords.volts(dc) + " dc");
+    }
     return new Block(BlockIds.SOURCE, Block.Kind.END, "Source", says, signal(source));
   }
 
@@ -48,16 +54,13 @@ final class EndWords {
   }
 
   private static String signal(Source source) {
-    double amplitude = source.amplitude().value();
     double dc = source.dc().value();
-    String offset = dc == 0 ? "" : PartWords.volts(dc) + " dc";
-    if (amplitude == 0) {
-      return dc == 0 ? "no signal" : offset;
+    if (source.amplitude().value() == 0) {
+      return dc == 0 ? "no signal" : PartWords.volts(dc) + " dc";
     }
-    return PartWords.volts(amplitude)
+    return PartWords.volts(source.amplitude().value())
         + " peak, "
-        + EngineeringFormat.format(source.frequency().value(), Unit.HERTZ)
-        + (offset.isEmpty() ? "" : " on " + offset);
+        + EngineeringFormat.format(source.frequency().value(), Unit.HERTZ);
   }
 
   Block load(Load load) {

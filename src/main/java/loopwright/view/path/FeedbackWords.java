@@ -37,9 +37,13 @@ final class FeedbackWords {
           + ": ideally \u00D7 "
           + PartWords.ratio(-ratio)
           + inverting.leadCapacitance().map(c -> ", " + PartWords.farads(c) + " across").orElse("")
-          + midRail(inverting.returnTo());
+          + returned(inverting);
     }
-    return "open: nothing comes back";
+    double resistance = ((Feedback.Open) feedback).returnResistance().effective();
+    return "open: nothing comes back, in\u2212 to ground"
+        + (resistance == 0
+            ? ""
+            : " through " + PartWords.ohms(((Feedback.Open) feedback).returnResistance()));
   }
 
   private static String divider(Feedback.NonInverting divider) {
@@ -61,6 +65,18 @@ final class FeedbackWords {
         + (divider.lowerCapacitance().isPresent() && upper > 0 ? ", all at dc" : "")
         + divider.leadCapacitance().map(c -> ", " + PartWords.farads(c) + " across").orElse("")
         + midRail(divider.returnTo());
+  }
+
+  /** What ties the input that the source does not drive. */
+  private static String returned(Feedback.Inverting inverting) {
+    boolean toMidRail = inverting.returnTo() == ReturnNode.MID_RAIL;
+    if (inverting.returnResistance().effective() == 0) {
+      return toMidRail ? ", in+ to mid-rail" : "";
+    }
+    return ", in+ to "
+        + (toMidRail ? "mid-rail" : "ground")
+        + " through "
+        + PartWords.ohms(inverting.returnResistance());
   }
 
   private static String midRail(ReturnNode node) {

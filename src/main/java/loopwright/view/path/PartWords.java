@@ -22,6 +22,16 @@ final class PartWords {
     return EngineeringFormat.format(part.effective(), Unit.OHM);
   }
 
+  /** A resistor with what it is; empty for a wire. */
+  static String ohms(PartValue part, String what) {
+    return part.effective() == 0 ? "" : ohms(part) + what;
+  }
+
+  /** A resistor behind something else; empty for a wire. */
+  static String ohms(String before, PartValue part) {
+    return part.effective() == 0 ? "" : before + ohms(part);
+  }
+
   static String farads(PartValue part) {
     return EngineeringFormat.format(part.effective(), Unit.FARAD);
   }

@@ -8,18 +8,18 @@ import loopwright.view.path.SignalPath.Way;
 
 /**
  * Where everything stands at a size. All measures of the drawing are those of a panel of 1000 by
- * 180 pixels, times one scale.
+ * 222 pixels, times one scale.
  */
 final class PathLayout {
   private static final double NORMAL_WIDTH = 1000;
-  private static final double NORMAL_HEIGHT = 184;
+  private static final double NORMAL_HEIGHT = 222;
   private static final double LEAST_SCALE = 0.75;
   private static final double GREATEST_SCALE = 1.7;
 
   private static final double MARGIN = 8;
   private static final double GAP = 80;
-  private static final double BLOCK_HEIGHT = 92;
-  private static final double HANGING_HEIGHT = 48;
+  private static final double BLOCK_HEIGHT = 118;
+  private static final double HANGING_HEIGHT = 58;
   private static final double LANE_HEIGHT = 26;
 
   /** The amplifier of kind figures is wider than a stage by this factor. */
@@ -32,7 +32,7 @@ final class PathLayout {
   private static final double TAP = 9;
 
   /** Height of the wires behind the input, as a share of a block's height. */
-  static final double SIGNAL = 0.43;
+  static final double SIGNAL = 0.4;
 
   private static final double PLUS = 0.27;
   private static final double MINUS = 0.75;
@@ -60,7 +60,7 @@ final class PathLayout {
       bounds.put(
           entry.getValue().id(),
           new Rectangle(
-              stage.x + pixels(10), below, stage.width + pixels(62), pixels(HANGING_HEIGHT)));
+              stage.x + pixels(10), below, stage.width + pixels(74), pixels(HANGING_HEIGHT)));
     }
     this.laneMiddle = below + pixels(HANGING_HEIGHT + 4 + LANE_HEIGHT / 2) + spare / 3;
   }

@@ -10,8 +10,6 @@ import loopwright.design.FiguresAmplifier;
 import loopwright.design.Hookup;
 import loopwright.design.StagesAmplifier;
 import loopwright.predict.HookupPrediction;
-import loopwright.quantity.EngineeringFormat;
-import loopwright.quantity.Unit;
 import loopwright.view.path.SignalPath.Route;
 import loopwright.view.path.SignalPath.Way;
 import loopwright.view.path.SignalPath.Wire;
@@ -70,27 +68,11 @@ final class PathReader {
   }
 
   private static Block figures(FiguresAmplifier amplifier) {
-    List<String> says = new ArrayList<>();
-    double offset = amplifier.inputOffset().value();
-    double zone = amplifier.deadZone().value();
-    List<String> errors = new ArrayList<>();
-    if (offset != 0) {
-      errors.add("offset " + PartWords.volts(offset));
-    }
-    if (zone != 0) {
-      errors.add("dead zone \u00B1" + PartWords.volts(zone));
-    }
-    says.add(errors.isEmpty() ? "known by its figures" : String.join(", ", errors));
-    List<String> poles =
-        amplifier.poles().stream()
-            .map(pole -> EngineeringFormat.format(pole.value(), Unit.HERTZ))
-            .toList();
-    says.add(poles.isEmpty() ? "" : "poles " + String.join(", ", poles));
     return new Block(
         BlockIds.AMPLIFIER,
         Block.Kind.STAGE,
         "Amplifier",
-        says,
+        AmplifierWords.says(amplifier),
         "gain " + PartWords.ratio(amplifier.gain().value()));
   }
 }

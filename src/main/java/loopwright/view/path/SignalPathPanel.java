@@ -175,12 +175,12 @@ public final class SignalPathPanel extends JComponent {
 
   @Override
   public Dimension getPreferredSize() {
-    return isPreferredSizeSet() ? super.getPreferredSize() : new Dimension(1000, 184);
+    return isPreferredSizeSet() ? super.getPreferredSize() : new Dimension(1000, 222);
   }
 
   @Override
   public Dimension getMinimumSize() {
-    return isMinimumSizeSet() ? super.getMinimumSize() : new Dimension(720, 150);
+    return isMinimumSizeSet() ? super.getMinimumSize() : new Dimension(720, 170);
   }
 
   @Override

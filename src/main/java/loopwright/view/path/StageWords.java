@@ -1,5 +1,6 @@
 package loopwright.view.path;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -94,41 +95,58 @@ final class StageWords {
   }
 
   private Block pair(InputPair pair) {
-    String load =
-        pair.load() instanceof PairLoad.Resistors resistors
-            ? PartWords.ohms(resistors.output()) + " load"
-            : "mirror load";
-    String degeneration =
-        pair.emitterResistance().effective() == 0
-            ? ""
-            : PartWords.ohms(pair.emitterResistance()) + " emitters";
     String first = RestWords.says(rest.current("pair.q1"));
     String second = RestWords.says(rest.current("pair.q2"));
+    double mismatch = pair.baseEmitterMismatch().value();
     return new Block(
         BlockIds.INPUT_PAIR,
         Block.Kind.STAGE,
         "Pair",
-        List.of(parts.transistor(pair.transistor()), load, degeneration),
+        List.of(
+            parts.transistor(pair.transistor()),
+            load(pair.load()),
+            PartWords.ohms(pair.emitterResistance(), " emitters"),
+            PartWords.ohms(pair.baseResistance(), " bases"),
+            mismatch == 0 ? "" : "mismatch " + PartWords.volts(mismatch)),
         first.isEmpty() ? "" : first + " | " + second);
   }
 
+  private static String load(PairLoad load) {
+    if (load instanceof PairLoad.Mirror mirror) {
+      return "mirror " + mirror.transistor() + PartWords.ohms(", ", mirror.emitterResistance());
+    }
+    PairLoad.Resistors resistors = (PairLoad.Resistors) load;
+    boolean both = resistors.other().effective() > 0;
+    return PartWords.ohms(resistors.output())
+        + (both ? " | " + PartWords.ohms(resistors.other()) : "")
+        + " load";
+  }
+
   private Block gain(GainStage stage) {
-    String emitter =
-        stage.emitterResistance().effective() == 0
-            ? ""
-            : PartWords.ohms(stage.emitterResistance())
-                + (stage.emitterBypass().isPresent() ? ", bypassed" : " emitter");
     return new Block(
         BlockIds.GAIN_STAGE,
         Block.Kind.STAGE,
         "Gain stage",
         List.of(
-            parts.transistor(stage.transistor()) + (stage.buffer().isPresent() ? ", buffered" : ""),
+            parts.transistor(stage.transistor()),
+            stage
+                .buffer()
+                .map(
+                    buffer ->
+                        "buffer "
+                            + buffer.transistor()
+                            + PartWords.ohms(", ", buffer.emitterResistance()))
+                .orElse(""),
             stage
                 .compensation()
-                .map(part -> PartWords.farads(part.capacitance()) + " Miller")
+                .map(
+                    part ->
+                        PartWords.farads(part.capacitance())
+                            + PartWords.ohms(" + ", part.resistance())
+                            + " Miller")
                 .orElse(""),
-            emitter),
+            PartWords.ohms(stage.emitterResistance(), " emitter"),
+            stage.emitterBypass().map(part -> PartWords.farads(part) + " bypass").orElse("")),
         RestWords.says(rest.current("gain.q1")));
   }
 
@@ -137,33 +155,44 @@ final class StageWords {
       return new Block(
           BlockIds.OUTPUT_STAGE, Block.Kind.ABSENT, "No follower", List.of("out is gainOut"), "");
     }
+    List<String> says = new ArrayList<>();
+    says.add(two(stage.upper(), stage.lower()) + PartWords.ohms(", ", stage.emitterResistance()));
+    says.addAll(bias(stage.bias()));
+    stage
+        .drivers()
+        .ifPresent(
+            drivers -> {
+              says.add("drivers over " + PartWords.ohms(drivers.resistance()));
+              says.add(two(drivers.upper(), drivers.lower()));
+            });
     OptionalDouble zone = rest.figure("deadZone");
-    String emitters =
-        stage.emitterResistance().effective() == 0
-            ? ""
-            : PartWords.ohms(stage.emitterResistance()) + " emitters";
-    String dead =
-        zone.isPresent() && zone.getAsDouble() >= ZONE
-            ? "dead zone \u00B1" + PartWords.volts(round(zone.getAsDouble()))
-            : "";
-    return new Block(
-        BlockIds.OUTPUT_STAGE,
-        Block.Kind.STAGE,
-        "Follower",
-        List.of(
-            bias(stage.bias()) + (stage.drivers().isPresent() ? ", drivers" : ""), dead, emitters),
-        idle());
+    boolean isJoined = stage.bias() instanceof Bias.Joined;
+    if (isJoined && zone.isPresent() && zone.getAsDouble() >= ZONE) {
+      says.add("dead zone \u00B1" + PartWords.volts(round(zone.getAsDouble())));
+    }
+    return new Block(BlockIds.OUTPUT_STAGE, Block.Kind.STAGE, "Follower", says, idle());
+  }
+
+  private static String two(String upper, String lower) {
+    return upper + "/" + lower;
   }
 
   private static double round(double volts) {
     return Math.rint(volts * 1000) / 1000;
   }
 
-  private static String bias(Bias bias) {
+  private static List<String> bias(Bias bias) {
     if (bias instanceof Bias.Joined) {
-      return "bases joined";
+      return List.of("bases joined");
     }
-    return bias instanceof Bias.Diodes diodes ? diodes.count() + " diodes" : "VBE multiplier";
+    if (bias instanceof Bias.Diodes diodes) {
+      return List.of(diodes.count() + " diodes " + diodes.diode());
+    }
+    Bias.VbeMultiplier multiplier = (Bias.VbeMultiplier) bias;
+    return List.of(
+        "VBE multiplier",
+        multiplier.transistor(),
+        PartWords.ohms(multiplier.upper()) + " over " + PartWords.ohms(multiplier.lower()));
   }
 
   private String idle() {

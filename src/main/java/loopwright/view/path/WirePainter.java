@@ -15,20 +15,24 @@ final class WirePainter {
   private final SignalPath path;
   private final PathLayout layout;
   private final PathFonts fonts;
+  private final FittedText text;
 
   WirePainter(Graphics2D g2, SignalPath path, PathLayout layout) {
     this.g2 = g2;
     this.path = path;
     this.layout = layout;
     this.fonts = PathFonts.at(layout.scale());
+    this.text = new FittedText(g2);
   }
 
-  void paint(Rectangle feedback) {
+  /** Paints; returns the words that were drawn. */
+  List<FittedText.Drawn> paint(Rectangle feedback) {
     forward();
     otherInput();
     if (path.route().way() != Way.OPEN) {
       wayBack(feedback);
     }
+    return text.drawn();
   }
 
   private void forward() {
@@ -55,10 +59,10 @@ final class WirePainter {
     int up = layout.pixels(path.route().way() == Way.INVERTING && y == layout.minusY() ? 9 : 5);
     int gap = layout.pixels(6);
     g2.setColor(Palette.quiet());
-    FittedText.centred(g2, wire.node(), fonts.line(), middle, y - up, room - 4);
+    text.centred(wire.node(), fonts.line(), middle, y - up, room - 4);
     g2.setColor(Palette.text());
     int ascent = g2.getFontMetrics(fonts.number()).getAscent();
-    FittedText.centred(g2, wire.volts(), fonts.number(), middle, y + gap + ascent, room - 4);
+    text.centred(wire.volts(), fonts.number(), middle, y + gap + ascent, room - 4);
   }
 
   /** The input that the source does not drive: its node, and what it is tied to. */
@@ -80,11 +84,11 @@ final class WirePainter {
     int end = x - layout.pixels(isFedBack ? 5 : 10);
     int room = layout.pixels(58);
     g2.setColor(isFedBack ? Palette.accent() : Palette.quiet());
-    FittedText.ending(g2, path.otherInput().node(), fonts.line(), end, y - layout.pixels(1), room);
+    text.ending(path.otherInput().node(), fonts.line(), end, y - layout.pixels(1), room);
     g2.setColor(Palette.text());
     int ascent = g2.getFontMetrics(fonts.number()).getAscent();
-    FittedText.ending(
-        g2, path.otherInput().volts(), fonts.number(), end, y + layout.pixels(1) + ascent, room);
+    text.ending(
+        path.otherInput().volts(), fonts.number(), end, y + layout.pixels(1) + ascent, room);
   }
 
   private void wayBack(Rectangle words) {

@@ -19,6 +19,7 @@ import loopwright.session.Session;
 import loopwright.task.SameThreadRunner;
 import loopwright.view.Lookup;
 import loopwright.view.OnEventThread;
+import loopwright.view.path.SignalPathPanel;
 import loopwright.view.theme.Theme;
 import org.junit.jupiter.api.extension.ExtendWith;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -62,6 +63,25 @@ class WindowPaintingTest {
         .isEqualTo(session.snapshot().design().name());
     assertThat(Lookup.named(picture.root(), "status", JLabel.class).getText())
         .contains("every figure is of this edit");
+    picture.close();
+  }
+
+  /** {@code PathVariantsTest} draws every variant at these sizes. */
+  @ParameterizedTest
+  @CsvSource({
+    "LIGHT, 1024, 700, 984, 187",
+    "DARK, 1024, 700, 984, 187",
+    "LIGHT, 1440, 900, 1400, 222",
+    "DARK, 1440, 900, 1400, 222"
+  })
+  void theSignalPathHasRoomForEveryVariant(
+      Theme theme, int width, int height, int pathWidth, int pathHeight) {
+    theme.apply();
+    WindowPicture picture =
+        new WindowPicture(SampleSessions.quick(), Shelf.empty(), theme, width, height);
+    SignalPathPanel path = Lookup.all(picture.root(), SignalPathPanel.class).get(0);
+    assertThat(path.getWidth()).isGreaterThanOrEqualTo(pathWidth);
+    assertThat(path.getHeight()).isGreaterThanOrEqualTo(pathHeight);
     picture.close();
   }
 

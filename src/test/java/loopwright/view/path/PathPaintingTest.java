@@ -51,7 +51,7 @@ class PathPaintingTest {
     for (Theme theme : Theme.values()) {
       theme.apply();
       SignalPathPanel panel = panel(amplifier, hookup);
-      Painting small = Painting.of(card(panel), 1000, 180).save(file(theme, name, "small"));
+      Painting small = Painting.of(card(panel), 1000, 222).save(file(theme, name, "small"));
       for (Component block : panel.getComponents()) {
         Rectangle inside = block.getBounds();
         inside.grow(-8, -6);
@@ -65,9 +65,9 @@ class PathPaintingTest {
       } else {
         assertThat(back).isGreaterThan(300);
       }
-      Painting large = Painting.of(card(panel), 1900, 320).save(file(theme, name, "large"));
+      Painting large = Painting.of(card(panel), 1900, 370).save(file(theme, name, "large"));
       assertThat(large.count(Palette.wire())).isGreaterThan(small.count(Palette.wire()));
-      Painting.of(card(panel), 760, 150).save(file(theme, name, "tiny"));
+      Painting.of(card(panel), 760, 170).save(file(theme, name, "tiny"));
     }
   }
 
@@ -77,9 +77,9 @@ class PathPaintingTest {
     theme.apply();
     SignalPathPanel panel = panel(SampleDesigns.npn(), SampleDesigns.divider(0.2));
     JPanel card = card(panel);
-    assertThat(Painting.of(card, 1000, 180).count(Palette.accentGround())).isZero();
+    assertThat(Painting.of(card, 1000, 222).count(Palette.accentGround())).isZero();
     panel.select("amplifier.gainStage");
-    Painting painting = Painting.of(card, 1000, 180).save(file(theme, "selected", "small"));
+    Painting painting = Painting.of(card, 1000, 222).save(file(theme, "selected", "small"));
     Rectangle stage = bounds(panel, "amplifier.gainStage");
     assertThat(painting.count(Palette.accentGround(), stage)).isGreaterThan(2000);
     assertThat(painting.count(Palette.accentGround()))
@@ -96,7 +96,7 @@ class PathPaintingTest {
             new Finding(Severity.FAILS, "out.upper", "It melts.", ""),
             new Finding(Severity.RISKY, "amplifier.inputPair", "It is unbalanced.", ""),
             new Finding(Severity.REMARK, "amplifier.gainStage", "It is there.", "")));
-    Painting painting = Painting.of(card(panel), 1000, 180).save(file(theme, "marked", "small"));
+    Painting painting = Painting.of(card(panel), 1000, 222).save(file(theme, "marked", "small"));
     assertThat(painting.count(Palette.fails(), bounds(panel, "amplifier.outputStage")))
         .isGreaterThan(50);
     assertThat(painting.count(Palette.risky(), bounds(panel, "amplifier.inputPair")))

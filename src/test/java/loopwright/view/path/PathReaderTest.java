@@ -63,7 +63,7 @@ class PathReaderTest {
     assertThat(block(path, "amplifier.gainStage").description())
         .isEqualTo("pnp QP; 33 pF Miller; 100 Ω emitter; 1.52 mA");
     assertThat(block(path, "amplifier.outputStage").description())
-        .isEqualTo("bases joined; dead zone ±540 mV; cut off at rest");
+        .isEqualTo("QN/QP; bases joined; dead zone ±540 mV; cut off at rest");
     assertThat(block(path, "load").description()).isEqualTo("10 kΩ, 100 pF");
     assertThat(path.feedback().says()).containsExactly("10 kΩ over 1 kΩ: 1/11 comes back");
   }
@@ -73,7 +73,7 @@ class PathReaderTest {
     SignalPath path = solved(SampleDesigns.npn(), SampleDesigns.divider(0.2));
     Block tail = block(path, "amplifier.inputPair.tail");
     // (0.49 + 0.63) mA of collector current and a 200th of it of base current
-    assertThat(tail.description()).isEqualTo("mirror to −12 V; 1.13 mA");
+    assertThat(tail.description()).isEqualTo("mirror QN to −12 V; set by 10 kΩ; 1.13 mA");
     assertThat(tail.kind()).isEqualTo(Block.Kind.CURRENT_SINK);
     Block load = block(path, "amplifier.gainStage.load");
     // (0.503 V + 12 V) across 8.2 kΩ
@@ -85,16 +85,17 @@ class PathReaderTest {
   void aPnpAmplifierIsFedFromThePositiveRail() {
     SignalPath path = solved(SampleDesigns.pnp(), SampleDesigns.divider(0.2));
     assertThat(block(path, "amplifier.inputPair").description())
-        .startsWith("pnp QP; mirror load; 220 Ω emitters");
+        .startsWith("pnp QP; mirror QN, 100 Ω; 220 Ω emitters; 47 Ω bases");
     assertThat(block(path, "amplifier.gainStage").description())
-        .startsWith("npn QN, buffered; 100 pF Miller; 47 Ω, bypassed");
+        .startsWith(
+            "npn QN; buffer QN, 4.7 kΩ; 100 pF + 220 Ω Miller; 47 Ω emitter; 100 µF bypass");
     assertThat(block(path, "amplifier.outputStage").description())
-        .startsWith("VBE multiplier, drivers; dead zone ±540 mV; 22 Ω emitters");
+        .startsWith("QN/QP, 22 Ω; VBE multiplier; QN; 2.2 kΩ over 1 kΩ; drivers over 470 Ω; QN/QP");
     Block tail = block(path, "amplifier.inputPair.tail");
-    assertThat(tail.says()).containsExactly("two transistors from +12 V");
+    assertThat(tail.says()).containsExactly("two QP from +12 V", "fed by 22 kΩ, 560 Ω");
     assertThat(tail.kind()).isEqualTo(Block.Kind.CURRENT_SOURCE);
     assertThat(block(path, "amplifier.gainStage.load").says())
-        .containsExactly("diode-biased from +12 V");
+        .containsExactly("QP on 2 diodes from +12 V", "D, 22 kΩ, 330 Ω");
   }
 
   @Test
@@ -113,7 +114,7 @@ class PathReaderTest {
     assertThat(path.hanging()).isEmpty();
     assertThat(path.wires()).extracting(Wire::node).containsExactly("in+", "out");
     assertThat(block(path, "amplifier").description())
-        .isEqualTo("offset 6.1 mV, dead zone ±600 mV; poles 50 kHz, 5 MHz; gain 500");
+        .isEqualTo("offset 6.1 mV; dead zone ±600 mV; poles 50 kHz, 5 MHz; gain 500");
   }
 
   @Test
@@ -122,16 +123,18 @@ class PathReaderTest {
     assertThat(path.route().way()).isEqualTo(Way.INVERTING);
     assertThat(path.wires().get(0)).isEqualTo(new Wire("in−", "5.7 mV"));
     assertThat(path.otherInput()).isEqualTo(new Wire("in+", "−1.1 mV"));
-    assertThat(path.feedback().says()).containsExactly("100 kΩ against 10 kΩ: ideally × −10");
+    assertThat(path.feedback().says())
+        .containsExactly("100 kΩ against 10 kΩ: ideally × −10, in+ to ground through 9.1 kΩ");
   }
 
   @Test
   void anOpenHookupHasNoWayBack() {
     SignalPath path = solved(SampleDesigns.npn(), SampleDesigns.open(1));
     assertThat(path.route().way()).isEqualTo(Way.OPEN);
-    assertThat(path.feedback().says()).containsExactly("open: nothing comes back");
+    assertThat(path.feedback().says())
+        .containsExactly("open: nothing comes back, in− to ground through 600 Ω");
     assertThat(block(path, "source").description())
-        .isEqualTo("600 Ω; attenuator 1/1000; 1 V peak, 1 kHz");
+        .isEqualTo("600 Ω; 99.9 kΩ over 100 Ω; attenuates 1/1000; 1 V peak, 1 kHz");
     assertThat(block(path, "load").description()).isEqualTo("nothing connected");
   }
 
@@ -152,7 +155,8 @@ class PathReaderTest {
     assertThat(path.wires()).extracting(Wire::volts).containsOnly("");
     assertThat(block(path, "amplifier.gainStage").description())
         .isEqualTo("pnp QP; 33 pF Miller; 100 Ω emitter");
-    assertThat(block(path, "amplifier.inputPair.tail").description()).isEqualTo("mirror to −12 V");
+    assertThat(block(path, "amplifier.inputPair.tail").description())
+        .isEqualTo("mirror QN to −12 V; set by 10 kΩ");
     SignalPath failed =
         PathReader.read(design, hookup, Optional.of(SamplePredictions.failed(hookup)));
     assertThat(failed.wires()).extracting(Wire::volts).containsOnly("");

@@ -166,7 +166,7 @@ class SignalPathPanelTest {
 
   @Test
   void blocksDoNotOverlapAndStayInside() {
-    int[][] sizes = {{760, 150}, {1000, 180}, {1900, 320}};
+    int[][] sizes = {{760, 170}, {1000, 222}, {1900, 320}};
     for (int[] size : sizes) {
       panel.setSize(size[0], size[1]);
       panel.doLayout();
