@@ -77,7 +77,7 @@ final class SolvedSystems {
           complex.solve(x);
         }
         String what =
-            String.format("%s, %.3g Hz%s", name, frequency, transposed ? ", transposed" : "");
+            name + ", " + frequency + " Hz" + (transposed ? ", transposed" : "");
         check.accept(new LinearProblem(what, pattern, g, im, transposed, b, x));
       }
     }
