@@ -54,13 +54,13 @@ final class EliminationPlan {
     int updates = 0;
     for (int k = 0; k < size; k++) {
       start[k] = next;
-      at.put(key(rows[k], columns[k]), next++);
-      for (int j : byStep(order.right[k], columnStep)) {
-        at.put(key(rows[k], j), next++);
+      at.put(SparsityPattern.key(rows[k], columns[k]), next++);
+      for (int j : byStep(order.right[k], columnStep, columns)) {
+        at.put(SparsityPattern.key(rows[k], j), next++);
       }
       startBelow[k] = next;
-      for (int i : byStep(order.below[k], rowStep)) {
-        at.put(key(i, columns[k]), next++);
+      for (int i : byStep(order.below[k], rowStep, rows)) {
+        at.put(SparsityPattern.key(i, columns[k]), next++);
       }
       updates += order.right[k].length * order.below[k].length;
     }
@@ -70,20 +70,20 @@ final class EliminationPlan {
     target = new int[updates];
     int update = 0;
     for (int k = 0; k < size; k++) {
-      int[] right = byStep(order.right[k], columnStep);
-      int[] below = byStep(order.below[k], rowStep);
+      int[] right = byStep(order.right[k], columnStep, columns);
+      int[] below = byStep(order.below[k], rowStep, rows);
       line[start[k]] = columns[k];
       System.arraycopy(right, 0, line, start[k] + 1, right.length);
       System.arraycopy(below, 0, line, startBelow[k], below.length);
       for (int i : below) {
         for (int j : right) {
-          target[update++] = at.get(key(i, j));
+          target[update++] = at.get(SparsityPattern.key(i, j));
         }
       }
     }
     place = new int[pattern.slots()];
     for (int slot = 0; slot < place.length; slot++) {
-      place[slot] = at.get(key(pattern.row(slot), pattern.column(slot)));
+      place[slot] = at.get(SparsityPattern.key(pattern.row(slot), pattern.column(slot)));
     }
     permutationSign = Permutation.sign(rows, size) * Permutation.sign(columns, size);
   }
@@ -91,10 +91,6 @@ final class EliminationPlan {
   /** Multiplications with additions in one factorisation and one solution. */
   int multiplyAdds() {
     return target.length + entries - size;
-  }
-
-  private static long key(int row, int column) {
-    return ((long) row << 32) | column;
   }
 
   private static int[] inverse(int[] order) {
@@ -105,11 +101,7 @@ final class EliminationPlan {
     return inverse;
   }
 
-  private static int[] byStep(int[] lines, int[] step) {
-    return Arrays.stream(lines)
-        .boxed()
-        .sorted((a, b) -> Integer.compare(step[a], step[b]))
-        .mapToInt(Integer::intValue)
-        .toArray();
+  private static int[] byStep(int[] lines, int[] step, int[] order) {
+    return Arrays.stream(lines).map(line -> step[line]).sorted().map(at -> order[at]).toArray();
   }
 }

@@ -4,21 +4,19 @@ import java.util.Arrays;
 
 /**
  * A complex system (G + sC) x = b of a fixed pattern, eliminated by a plan that was made once; see
- * {@link SparseRealSystem}. Complex entries are interleaved.
+ * {@link SparseSystem} for how far it is trusted. Complex entries are interleaved.
  */
-final class SparseComplexSystem implements ComplexSystem {
-  private static final double LARGEST_SQUARE =
-      SparseRealSystem.LARGEST_MULTIPLIER * SparseRealSystem.LARGEST_MULTIPLIER;
+final class SparseComplexSystem extends SparseSystem implements ComplexSystem {
+  private static final double LARGEST_SQUARE = LARGEST_MULTIPLIER * LARGEST_MULTIPLIER;
+  private static final double WATCHED_SQUARE = WATCHED_MULTIPLIER * WATCHED_MULTIPLIER;
 
-  private final SystemFamily family;
   private final double[] work;
   private EliminationPlan plan;
   private double[] entries;
   private DenseComplexSystem dense;
-  private boolean isDense;
 
   SparseComplexSystem(SystemFamily family) {
-    this.family = family;
+    super(family, 2);
     this.work = new double[2 * family.pattern().size()];
     adopt(family.complexPlan());
   }
@@ -32,7 +30,6 @@ final class SparseComplexSystem implements ComplexSystem {
 
   @Override
   public boolean factor(double[] g, double[] c, double re, double im) {
-    isDense = false;
     double sum = Math.abs(re) + Math.abs(im);
     for (int slot = 0; slot < g.length; slot++) {
       sum += Math.abs(g[slot]) + Math.abs(c[slot]);
@@ -56,12 +53,29 @@ final class SparseComplexSystem implements ComplexSystem {
         return true;
       }
     }
-    family.countDenseFallback();
+    giveUp();
+    return denseSystem().factor(g, c, re, im);
+  }
+
+  @Override
+  boolean factorDense(KeptMatrix matrix) {
+    return denseSystem().factor(matrix.re(), matrix.im(), 0, 1);
+  }
+
+  private DenseComplexSystem denseSystem() {
     if (dense == null) {
       dense = new DenseComplexSystem(family.pattern());
     }
-    isDense = true;
-    return dense.factor(g, c, re, im);
+    return dense;
+  }
+
+  @Override
+  void solveDense(double[] vector, boolean transposed) {
+    if (transposed) {
+      dense.solveTransposed(vector);
+    } else {
+      dense.solve(vector);
+    }
   }
 
   private boolean eliminate(double[] g, double[] c, double re, double im) {
@@ -79,6 +93,7 @@ final class SparseComplexSystem implements ComplexSystem {
     int[] target = plan.target;
     int size = plan.size;
     int update = 0;
+    double largest = 0;
     for (int k = 0; k < size; k++) {
       int pivot = 2 * start[k];
       double pr = a[pivot];
@@ -99,9 +114,11 @@ final class SparseComplexSystem implements ComplexSystem {
         double ai = a[l + 1];
         double lr = ar * pr - ai * pi;
         double li = ar * pi + ai * pr;
-        if (!(lr * lr + li * li <= LARGEST_SQUARE)) {
+        double square = lr * lr + li * li;
+        if (!(square <= LARGEST_SQUARE)) {
           return false;
         }
+        largest = Math.max(largest, square);
         a[l] = lr;
         a[l + 1] = li;
         for (int u = right; u < below; u += 2) {
@@ -113,15 +130,24 @@ final class SparseComplexSystem implements ComplexSystem {
         }
       }
     }
+    if (largest > WATCHED_SQUARE) {
+      watch().keep(g, c, re, im);
+    } else {
+      trust();
+    }
     return true;
   }
 
   @Override
-  public void solve(double[] b) {
-    if (isDense) {
-      dense.solve(b);
-      return;
+  void substitute(double[] vector, boolean transposed) {
+    if (transposed) {
+      substituteTransposed(vector);
+    } else {
+      substitute(vector);
     }
+  }
+
+  private void substitute(double[] b) {
     double[] a = entries;
     double[] w = work;
     int[] line = plan.line;
@@ -155,12 +181,7 @@ final class SparseComplexSystem implements ComplexSystem {
     }
   }
 
-  @Override
-  public void solveTransposed(double[] b) {
-    if (isDense) {
-      dense.solveTransposed(b);
-      return;
-    }
+  private void substituteTransposed(double[] b) {
     double[] a = entries;
     double[] w = work;
     int[] line = plan.line;
@@ -202,7 +223,7 @@ final class SparseComplexSystem implements ComplexSystem {
 
   @Override
   public double logDeterminant() {
-    if (isDense) {
+    if (isDense()) {
       return dense.logDeterminant();
     }
     double sum = 0;
@@ -215,7 +236,7 @@ final class SparseComplexSystem implements ComplexSystem {
 
   @Override
   public double determinantArgument() {
-    if (isDense) {
+    if (isDense()) {
       return dense.determinantArgument();
     }
     double re = plan.permutationSign;

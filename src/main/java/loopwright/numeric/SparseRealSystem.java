@@ -4,26 +4,17 @@ import java.util.Arrays;
 
 /**
  * A real system of a fixed pattern, eliminated by a plan that was made once: the numeric
- * factorisation allocates nothing, hashes nothing and searches nothing.
- *
- * <p>The plan's pivots were safe for the matrix that it was made with. For another matrix a
- * multiplier may become large; then the plan is made anew with the present values, and where no
- * safe order is found a dense factorisation with partial pivoting steps in. Both are counted in the
- * {@link SystemFamily}.
+ * factorisation allocates nothing, hashes nothing and searches nothing; see {@link SparseSystem}
+ * for how far it is trusted.
  */
-final class SparseRealSystem implements RealSystem {
-  /** A multiplier above this costs more digits than a new analysis costs time. */
-  static final double LARGEST_MULTIPLIER = 1e4;
-
-  private final SystemFamily family;
+final class SparseRealSystem extends SparseSystem implements RealSystem {
   private final double[] work;
   private EliminationPlan plan;
   private double[] entries;
   private DenseRealSystem dense;
-  private boolean isDense;
 
   SparseRealSystem(SystemFamily family) {
-    this.family = family;
+    super(family, 1);
     this.work = new double[family.pattern().size()];
     adopt(family.realPlan());
   }
@@ -37,7 +28,6 @@ final class SparseRealSystem implements RealSystem {
 
   @Override
   public boolean factor(double[] values) {
-    isDense = false;
     double sum = 0;
     for (double value : values) {
       sum += Math.abs(value);
@@ -55,12 +45,29 @@ final class SparseRealSystem implements RealSystem {
         return true;
       }
     }
-    family.countDenseFallback();
+    giveUp();
+    return factorDense(values);
+  }
+
+  @Override
+  boolean factorDense(KeptMatrix matrix) {
+    return factorDense(matrix.re());
+  }
+
+  private boolean factorDense(double[] values) {
     if (dense == null) {
       dense = new DenseRealSystem(family.pattern());
     }
-    isDense = true;
     return dense.factor(values);
+  }
+
+  @Override
+  void solveDense(double[] vector, boolean transposed) {
+    if (transposed) {
+      dense.solveTransposed(vector);
+    } else {
+      dense.solve(vector);
+    }
   }
 
   private boolean eliminate(double[] values) {
@@ -74,6 +81,7 @@ final class SparseRealSystem implements RealSystem {
     int[] startBelow = plan.startBelow;
     int[] target = plan.target;
     int update = 0;
+    double largest = 0;
     for (int k = 0; k < plan.size; k++) {
       int pivot = start[k];
       double inverse = 1 / a[pivot];
@@ -86,24 +94,35 @@ final class SparseRealSystem implements RealSystem {
       int end = start[k + 1];
       for (int l = below; l < end; l++) {
         double multiplier = a[l] * inverse;
-        if (!(Math.abs(multiplier) <= LARGEST_MULTIPLIER)) {
+        double magnitude = Math.abs(multiplier);
+        if (!(magnitude <= LARGEST_MULTIPLIER)) {
           return false;
         }
+        largest = Math.max(largest, magnitude);
         a[l] = multiplier;
         for (int u = right; u < below; u++) {
           a[target[update++]] -= multiplier * a[u];
         }
       }
     }
+    if (largest > WATCHED_MULTIPLIER) {
+      watch().keep(values);
+    } else {
+      trust();
+    }
     return true;
   }
 
   @Override
-  public void solve(double[] rightHandSide) {
-    if (isDense) {
-      dense.solve(rightHandSide);
-      return;
+  void substitute(double[] vector, boolean transposed) {
+    if (transposed) {
+      substituteTransposed(vector);
+    } else {
+      substitute(vector);
     }
+  }
+
+  private void substitute(double[] rightHandSide) {
     double[] a = entries;
     double[] w = work;
     int[] line = plan.line;
@@ -124,12 +143,7 @@ final class SparseRealSystem implements RealSystem {
     }
   }
 
-  @Override
-  public void solveTransposed(double[] rightHandSide) {
-    if (isDense) {
-      dense.solveTransposed(rightHandSide);
-      return;
-    }
+  private void substituteTransposed(double[] rightHandSide) {
     double[] a = entries;
     double[] w = work;
     int[] line = plan.line;
@@ -153,7 +167,7 @@ final class SparseRealSystem implements RealSystem {
 
   @Override
   public int determinantSign() {
-    if (isDense) {
+    if (isDense()) {
       return dense.determinantSign();
     }
     int sign = plan.permutationSign;

@@ -9,6 +9,12 @@ import java.util.Map;
  * array that holds the values. A pattern is fixed once built; values are refilled many times.
  */
 public final class SparsityPattern {
+  /**
+   * More than any matrix has columns. Keys row × this + column have hashes that differ, those of
+   * row and column in two halves of a word do not: all of a diagonal fall together.
+   */
+  private static final long MOST_COLUMNS = 1_000_003;
+
   private final int size;
   private final int[] rows;
   private final int[] columns;
@@ -47,6 +53,11 @@ public final class SparsityPattern {
             && Arrays.equals(columns, other.columns));
   }
 
+  /** A number for each place, for maps. */
+  static long key(int row, int column) {
+    return row * MOST_COLUMNS + column;
+  }
+
   /** Collects the places of a matrix and hands out their slots. */
   public static final class Builder {
     private final Map<Long, Integer> slots = new HashMap<>();
@@ -60,7 +71,7 @@ public final class SparsityPattern {
       if (row < 0 || column < 0) {
         return -1;
       }
-      return slots.computeIfAbsent(((long) row << 32) | column, key -> slots.size());
+      return slots.computeIfAbsent(key(row, column), key -> slots.size());
     }
 
     /** The pattern of a matrix of the given size. */
@@ -69,8 +80,8 @@ public final class SparsityPattern {
       int[] columns = new int[slots.size()];
       slots.forEach(
           (place, slot) -> {
-            rows[slot] = (int) (place >> 32);
-            columns[slot] = (int) (long) place;
+            rows[slot] = (int) (place / MOST_COLUMNS);
+            columns[slot] = (int) (place % MOST_COLUMNS);
           });
       return new SparsityPattern(size, rows, columns);
     }

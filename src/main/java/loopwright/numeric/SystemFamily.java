@@ -10,6 +10,7 @@ public final class SystemFamily {
   private EliminationPlan complexPlan;
   private int analyses;
   private int denseFallbacks;
+  private int refinements;
 
   /** A family of a pattern. */
   public SystemFamily(SparsityPattern pattern) {
@@ -36,9 +37,17 @@ public final class SystemFamily {
     return analyses;
   }
 
-  /** How often no safe order was found and a dense factorisation stepped in. */
+  /**
+   * How often a dense factorisation stepped in: no safe order was found, or what a solution left
+   * over could not be brought down to rounding.
+   */
   public int denseFallbacks() {
     return denseFallbacks;
+  }
+
+  /** How often a solution left over more than rounding and was improved by another one. */
+  public int refinements() {
+    return refinements;
   }
 
   /**
@@ -72,6 +81,10 @@ public final class SystemFamily {
 
   void countDenseFallback() {
     denseFallbacks++;
+  }
+
+  void countRefinement() {
+    refinements++;
   }
 
   private EliminationPlan analyse(double[] re, double[] im) {

@@ -1,9 +1,11 @@
 package loopwright.file;
 
+import java.nio.file.Path;
 import java.util.Map;
 import java.util.stream.Collectors;
 import loopwright.design.Design;
 import loopwright.part.RecordShelf;
+import loopwright.part.Shelf;
 import loopwright.predict.Catalogue;
 import loopwright.predict.Figure;
 
@@ -13,10 +15,16 @@ public final class DesignText {
 
   /** The design that a text says. */
   public static Design read(String json) {
+    return file(new RecordShelf(Map.of())).read(json, "a test's own text").design();
+  }
+
+  /** An example of the program by its name; its parts may come from the shelf. */
+  public static Design example(String name) {
+    return file(new ShelfFile().shipped()).read(Path.of("examples", name + ".json")).design();
+  }
+
+  private static DesignFile file(Shelf shelf) {
     return new DesignFile(
-            new RecordShelf(Map.of()),
-            Catalogue.figures().stream().collect(Collectors.toMap(Figure::key, Figure::unit)))
-        .read(json, "a test's own text")
-        .design();
+        shelf, Catalogue.figures().stream().collect(Collectors.toMap(Figure::key, Figure::unit)));
   }
 }

@@ -3,8 +3,10 @@ package loopwright.numeric;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.Random;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /**
@@ -109,6 +111,61 @@ class SystemFamilyTest {
     SystemFamily family = new SystemFamily(RealSystemChecks.full(3));
     assertThat(family.real().factor(new double[] {1, 2, 3, 2, 4, 6, 1, 1, 1})).isFalse();
     assertThat(family.denseFallbacks()).isEqualTo(1);
+  }
+
+  /**
+   * Rows that say x₀ + xₙ = b₀ and, below, xᵢ + xₙ = bᵢ + m xᵢ₋₁: pivots on the diagonal, which a
+   * small m brings about, give multipliers of m and let the last column grow by m at every step.
+   */
+  private static RandomMatrices.Sparse growing(int steps, double m) {
+    SparsityPattern.Builder builder = new SparsityPattern.Builder();
+    double[] values = new double[3 * steps + 1];
+    for (int i = 0; i <= steps; i++) {
+      values[builder.slot(i, i)] = 1;
+      if (i > 0) {
+        values[builder.slot(i, i - 1)] = -m;
+      }
+      values[builder.slot(i, steps)] += i < steps ? 1 : 0;
+    }
+    return new RandomMatrices.Sparse(builder.build(steps + 1), values, new double[values.length]);
+  }
+
+  /** What refinement can cure it cures; where so much is lost that it cannot, dense steps in. */
+  @ParameterizedTest
+  @CsvSource({"3, false", "8, true"})
+  void aResidualBeyondRoundingIsCuredAndCounted(int steps, boolean dense) {
+    RandomMatrices.Sparse gentle = growing(steps, 0.01);
+    RandomMatrices.Sparse harsh = growing(steps, 7e3);
+    SystemFamily family = new SystemFamily(gentle.pattern());
+    RealSystem real = family.real();
+    ComplexSystem complex = family.complex();
+    double[] b = RandomMatrices.vector(steps + 1, new Random(3));
+    double[] complexB = RandomMatrices.vector(2 * steps + 2, new Random(4));
+    assertThat(real.factor(gentle.g())).isTrue();
+    assertThat(complex.factor(gentle.g(), gentle.c(), 0, 1)).isTrue();
+    assertThat(real.factor(harsh.g())).isTrue();
+    assertThat(complex.factor(harsh.g(), harsh.c(), 0, 1)).isTrue();
+    assertThat(family.analyses()).isEqualTo(2);
+
+    double[] x = b.clone();
+    real.solve(x);
+    assertThat(residual(harsh, harsh.g(), x, b)).isLessThan(RESIDUAL);
+    double[] complexX = complexB.clone();
+    complex.solve(complexX);
+    for (int part = 0; part < 2; part++) {
+      assertThat(residual(harsh, harsh.g(), part(complexX, part), part(complexB, part)))
+          .isLessThan(RESIDUAL);
+    }
+    assertThat(family.refinements()).isGreaterThanOrEqualTo(2);
+    assertThat(family.denseFallbacks()).isEqualTo(dense ? 2 : 0);
+    real.solve(b);
+    assertThat(b).isEqualTo(x);
+  }
+
+  private static double[] part(double[] interleaved, int part) {
+    return IntStream.range(0, interleaved.length / 2)
+        .mapToDouble(i -> interleaved[2 * i + part])
+        .toArray();
   }
 
   private static double residual(
