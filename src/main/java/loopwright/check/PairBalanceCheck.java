@@ -18,8 +18,11 @@ import loopwright.sizing.PairCentring;
 final class PairBalanceCheck implements Check {
   private static final String LOAD = "amplifier.inputPair.load.output";
 
-  /** Currents further apart than this ratio cost more than unmatched transistors do (5 mV). */
-  private static final double APART = 1.25;
+  /**
+   * Currents further apart than this ratio make more offset than two unmatched transistors do: ± 5
+   * mV each (common practice, no source), 10 mV between them, exp(10 mV/V_T).
+   */
+  private static final double APART = 1.48;
 
   private static final double IDLE = 1e-9;
 

@@ -42,6 +42,9 @@ final class Overload {
    */
   static double recovery(
       CircuitState rest, int out, double generator, double width, double band, Progress progress) {
+    if (!(width > 0 && width < LONGEST)) {
+      throw new UnsolvedException("the output does not move fast enough to be overloaded in time");
+    }
     GeneratorSignal pulse = GeneratorSignal.pulse(rest.generator(), generator, 0, 0, width, 0);
     Transient run = new Transient(rest, pulse, Transient.Accuracy.USUAL);
     Overload overload = new Overload(out, rest.voltage(out), width);

@@ -2,6 +2,7 @@ package loopwright.view.frame;
 
 import java.awt.BorderLayout;
 import java.awt.Dimension;
+import java.awt.EventQueue;
 import java.awt.Rectangle;
 import java.util.List;
 import java.util.Optional;
@@ -15,6 +16,7 @@ import javax.swing.JScrollPane;
 import javax.swing.JTextArea;
 import javax.swing.ScrollPaneConstants;
 import javax.swing.Scrollable;
+import javax.swing.text.DefaultCaret;
 import loopwright.check.Finding;
 import loopwright.design.Change;
 import loopwright.design.Design;
@@ -92,6 +94,8 @@ final class FindingsPanel extends JPanel {
     findings.forEach(this::lay);
     list.revalidate();
     list.repaint();
+    // The worst stands first; where it stands is known only after the layout.
+    EventQueue.invokeLater(() -> list.scrollRectToVisible(new Rectangle(0, 0, 1, 1)));
   }
 
   private void lay(Finding finding) {
@@ -137,6 +141,9 @@ final class FindingsPanel extends JPanel {
 
   private static JTextArea text(String says, String style) {
     JTextArea area = Theme.style(new JTextArea(says), style);
+    // Else every text would scroll itself into view, and the last would win over the worst.
+    ((DefaultCaret) area.getCaret()).setUpdatePolicy(DefaultCaret.NEVER_UPDATE);
+    area.setCaretPosition(0);
     area.setEditable(false);
     area.setFocusable(false);
     area.setLineWrap(true);

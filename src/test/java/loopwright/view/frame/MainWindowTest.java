@@ -1,5 +1,7 @@
 package loopwright.view.frame;
 
+import static loopwright.view.frame.WindowHand.onEventThread;
+import static loopwright.view.frame.WindowHand.waitFor;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.junit.jupiter.api.Assumptions.assumeFalse;
 
@@ -9,13 +11,10 @@ import java.awt.EventQueue;
 import java.awt.GraphicsEnvironment;
 import java.awt.Point;
 import java.awt.Rectangle;
-import java.awt.Robot;
 import java.awt.event.InputEvent;
 import java.awt.event.KeyEvent;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.concurrent.Callable;
-import java.util.concurrent.FutureTask;
 import java.util.stream.Collectors;
 import javax.swing.JFrame;
 import javax.swing.JTabbedPane;
@@ -40,14 +39,13 @@ import org.junit.jupiter.api.io.TempDir;
 
 /** The window on a real display, driven by keys and pointer, with the real solver behind it. */
 class MainWindowTest {
-  private static final long PATIENCE = 60_000;
   private static final String CAPACITOR = "amplifier.gainStage.compensation.capacitance";
 
   @TempDir private Path folder;
   private Path file;
   private Session session;
   private JFrame frame;
-  private Robot robot;
+  private WindowHand hand;
   private DesignFile files;
 
   @BeforeEach
@@ -55,8 +53,7 @@ class MainWindowTest {
     assumeFalse(GraphicsEnvironment.isHeadless(), "needs a display");
     file = folder.resolve("hydrophone.json");
     Files.copy(Path.of("examples/hydrophone-follower.json"), file);
-    robot = new Robot();
-    robot.setAutoDelay(15);
+    hand = new WindowHand();
     frame =
         onEventThread(
             () -> {
@@ -104,13 +101,14 @@ class MainWindowTest {
     String title = plotTitle();
     assertThat(title).containsIgnoringCase("grows");
 
-    type(field(CAPACITOR), "220p");
+    hand.type(field(CAPACITOR), "220p");
+    hand.press(KeyEvent.VK_ENTER, 0);
     waitFor(() -> cell("oscillationFrequency", FiguresModel.SOLVED).equals("—"));
     assertThat(cell("worstPhaseMargin", FiguresModel.SOLVED)).isNotEqualTo(before);
     waitFor(() -> !plotTitle().equals(title));
     assertThat(onEventThread(frame::getTitle)).startsWith("*");
 
-    press(KeyEvent.VK_Z, InputEvent.CTRL_DOWN_MASK);
+    hand.press(KeyEvent.VK_Z, InputEvent.CTRL_DOWN_MASK);
     waitFor(() -> cell("worstPhaseMargin", FiguresModel.SOLVED).equals(before));
     assertThat(onEventThread(frame::getTitle)).doesNotStartWith("*");
   }
@@ -124,7 +122,7 @@ class MainWindowTest {
         .extracting(Reading::quantity)
         .containsExactly("closedLoopGain");
 
-    press(KeyEvent.VK_S, InputEvent.CTRL_DOWN_MASK);
+    hand.press(KeyEvent.VK_S, InputEvent.CTRL_DOWN_MASK);
     waitFor(() -> !onEventThread(() -> session.snapshot().unsaved()));
     assertThat(files.read(file).design().bench().readings().get(0).value().value())
         .isEqualTo(0.998);
@@ -133,7 +131,8 @@ class MainWindowTest {
   @Test
   void aWrongUnitIsSaidInPlaceAndChangesNothing() throws Exception {
     Design before = onEventThread(() -> session.snapshot().design());
-    type(field(CAPACITOR), "10 kHz");
+    hand.type(field(CAPACITOR), "10 kHz");
+    hand.press(KeyEvent.VK_ENTER, 0);
     waitFor(
         () ->
             onEventThread(
@@ -195,73 +194,9 @@ class MainWindowTest {
               return new Point(
                   corner.x + (int) cell.getCenterX(), corner.y + (int) cell.getCenterY());
             });
-    click(at);
-    click(at);
-    keys(text);
-    press(KeyEvent.VK_ENTER, 0);
-  }
-
-  private void type(JTextField field, String text) throws Exception {
-    Point at =
-        onEventThread(
-            () -> {
-              Point corner = field.getLocationOnScreen();
-              return new Point(corner.x + field.getWidth() / 3, corner.y + field.getHeight() / 2);
-            });
-    click(at);
-    waitFor(() -> onEventThread(field::isFocusOwner));
-    press(KeyEvent.VK_A, InputEvent.CTRL_DOWN_MASK);
-    keys(text);
-    press(KeyEvent.VK_ENTER, 0);
-  }
-
-  private void click(Point at) {
-    robot.mouseMove(at.x, at.y);
-    robot.mousePress(InputEvent.BUTTON1_DOWN_MASK);
-    robot.mouseRelease(InputEvent.BUTTON1_DOWN_MASK);
-    robot.waitForIdle();
-  }
-
-  private void keys(String text) {
-    for (char character : text.toCharArray()) {
-      boolean shift = Character.isUpperCase(character);
-      press(
-          KeyEvent.getExtendedKeyCodeForChar(Character.toLowerCase(character)),
-          shift ? InputEvent.SHIFT_DOWN_MASK : 0);
-    }
-  }
-
-  private void press(int key, int modifier) {
-    int held =
-        switch (modifier) {
-          case InputEvent.CTRL_DOWN_MASK -> KeyEvent.VK_CONTROL;
-          case InputEvent.SHIFT_DOWN_MASK -> KeyEvent.VK_SHIFT;
-          default -> 0;
-        };
-    if (held != 0) {
-      robot.keyPress(held);
-    }
-    robot.keyPress(key);
-    robot.keyRelease(key);
-    if (held != 0) {
-      robot.keyRelease(held);
-    }
-    robot.waitForIdle();
-  }
-
-  private static <T> T onEventThread(Callable<T> work) throws Exception {
-    FutureTask<T> task = new FutureTask<>(work);
-    EventQueue.invokeAndWait(task);
-    return task.get();
-  }
-
-  private static void waitFor(Callable<Boolean> condition) throws Exception {
-    long end = System.currentTimeMillis() + PATIENCE;
-    while (!condition.call()) {
-      if (System.currentTimeMillis() > end) {
-        throw new AssertionError("waited in vain");
-      }
-      Thread.sleep(30);
-    }
+    hand.click(at);
+    hand.click(at);
+    hand.keys(text);
+    hand.press(KeyEvent.VK_ENTER, 0);
   }
 }
