@@ -179,11 +179,32 @@ public final class CircuitBuilder {
 
   /** A wire whose current is an unknown, from the network's to the amplifier's side. */
   public void lead(String name, String from, String to) {
+    lead(name, from, to, false);
+  }
+
+  /**
+   * A lead in which the loop gain is measured at many frequencies: its unknowns are eliminated
+   * last, so that a solution for them alone is short.
+   */
+  public void measuredLead(String name, String from, String to) {
+    lead(name, from, to, true);
+  }
+
+  private void lead(String name, String from, String to, boolean measured) {
     node(from);
     node(to);
     conducts(from, to);
     int branch = branch();
-    plans.add(() -> new Lead(name, index(from), index(to), branchIndex(branch), this));
+    plans.add(
+        () -> {
+          Lead lead = new Lead(name, index(from), index(to), branchIndex(branch), this);
+          if (measured) {
+            pattern.eliminateLast(lead.from());
+            pattern.eliminateLast(lead.to());
+            pattern.eliminateLast(lead.branch());
+          }
+          return lead;
+        });
   }
 
   /**

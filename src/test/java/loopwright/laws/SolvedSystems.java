@@ -76,8 +76,7 @@ final class SolvedSystems {
         } else {
           complex.solve(x);
         }
-        String what =
-            name + ", " + frequency + " Hz" + (transposed ? ", transposed" : "");
+        String what = name + ", " + frequency + " Hz" + (transposed ? ", transposed" : "");
         check.accept(new LinearProblem(what, pattern, g, im, transposed, b, x));
       }
     }
