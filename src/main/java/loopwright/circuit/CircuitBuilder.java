@@ -39,6 +39,7 @@ public final class CircuitBuilder {
   private final SparsityPattern.Builder pattern = new SparsityPattern.Builder();
   private final Map<String, Integer> indices = new LinkedHashMap<>();
   private final double kelvin;
+  private int nodes;
   private int branches;
   private int memory;
   private int blocking;
@@ -303,7 +304,6 @@ public final class CircuitBuilder {
       addStrays(strayCapacitance);
     }
     numberNodes();
-    int nodes = nodeCount();
     int[] diagonal = new int[nodes];
     for (int i = 0; i < nodes; i++) {
       diagonal[i] = slot(i, i);
@@ -353,11 +353,7 @@ public final class CircuitBuilder {
   }
 
   private int branchIndex(int branch) {
-    return nodeCount() + branch;
-  }
-
-  private int nodeCount() {
-    return indices.values().stream().mapToInt(Integer::intValue).max().orElse(-1) + 1;
+    return nodes + branch;
   }
 
   private int index(String name) {
@@ -404,10 +400,15 @@ public final class CircuitBuilder {
     }
   }
 
+  /** The name that stands for an island; on the way each name is moved nearer to it. */
   private static String shore(Map<String, String> island, String name) {
     String at = name;
-    while (!island.get(at).equals(at)) {
-      at = island.get(at);
+    String next = island.get(at);
+    while (!next.equals(at)) {
+      String beyond = island.get(next);
+      island.put(at, beyond);
+      at = beyond;
+      next = island.get(at);
     }
     return at;
   }
@@ -421,5 +422,6 @@ public final class CircuitBuilder {
       byRoot.putIfAbsent(root, next);
       indices.put(name, byRoot.get(root));
     }
+    nodes = byRoot.size() - 1;
   }
 }
