@@ -23,7 +23,8 @@ final class FeedbackAssembly {
           open.returnResistance());
     }
     work.circuit().withoutStray(HookupNodes.IN_MINUS_AMPLIFIER);
-    work.circuit().lead(HookupNodes.FEEDBACK_LEAD, Nodes.IN_MINUS, HookupNodes.IN_MINUS_AMPLIFIER);
+    work.circuit()
+        .measuredLead(HookupNodes.FEEDBACK_LEAD, Nodes.IN_MINUS, HookupNodes.IN_MINUS_AMPLIFIER);
   }
 
   private static void addDivider(Workpiece work, Feedback.NonInverting divider, String path) {

@@ -39,6 +39,7 @@ public final class CircuitBuilder {
   private final SparsityPattern.Builder pattern = new SparsityPattern.Builder();
   private final Map<String, Integer> indices = new LinkedHashMap<>();
   private final double kelvin;
+  private int nodes;
   private int branches;
   private int memory;
   private int blocking;
@@ -179,11 +180,32 @@ public final class CircuitBuilder {
 
   /** A wire whose current is an unknown, from the network's to the amplifier's side. */
   public void lead(String name, String from, String to) {
+    lead(name, from, to, false);
+  }
+
+  /**
+   * A lead in which the loop gain is measured at many frequencies: its unknowns are eliminated
+   * last, so that a solution for them alone is short.
+   */
+  public void measuredLead(String name, String from, String to) {
+    lead(name, from, to, true);
+  }
+
+  private void lead(String name, String from, String to, boolean measured) {
     node(from);
     node(to);
     conducts(from, to);
     int branch = branch();
-    plans.add(() -> new Lead(name, index(from), index(to), branchIndex(branch), this));
+    plans.add(
+        () -> {
+          Lead lead = new Lead(name, index(from), index(to), branchIndex(branch), this);
+          if (measured) {
+            pattern.eliminateLast(lead.from());
+            pattern.eliminateLast(lead.to());
+            pattern.eliminateLast(lead.branch());
+          }
+          return lead;
+        });
   }
 
   /**
@@ -282,7 +304,6 @@ public final class CircuitBuilder {
       addStrays(strayCapacitance);
     }
     numberNodes();
-    int nodes = nodeCount();
     int[] diagonal = new int[nodes];
     for (int i = 0; i < nodes; i++) {
       diagonal[i] = slot(i, i);
@@ -332,11 +353,7 @@ public final class CircuitBuilder {
   }
 
   private int branchIndex(int branch) {
-    return nodeCount() + branch;
-  }
-
-  private int nodeCount() {
-    return indices.values().stream().mapToInt(Integer::intValue).max().orElse(-1) + 1;
+    return nodes + branch;
   }
 
   private int index(String name) {
@@ -383,10 +400,15 @@ public final class CircuitBuilder {
     }
   }
 
+  /** The name that stands for an island; on the way each name is moved nearer to it. */
   private static String shore(Map<String, String> island, String name) {
     String at = name;
-    while (!island.get(at).equals(at)) {
-      at = island.get(at);
+    String next = island.get(at);
+    while (!next.equals(at)) {
+      String beyond = island.get(next);
+      island.put(at, beyond);
+      at = beyond;
+      next = island.get(at);
     }
     return at;
   }
@@ -400,5 +422,6 @@ public final class CircuitBuilder {
       byRoot.putIfAbsent(root, next);
       indices.put(name, byRoot.get(root));
     }
+    nodes = byRoot.size() - 1;
   }
 }

@@ -1,12 +1,14 @@
 package loopwright.numeric;
 
 import java.util.Arrays;
+import java.util.BitSet;
 
 /**
  * Chooses the pivots of a sparse matrix: at each step the place whose elimination touches least
  * (Markowitz, Management Science 3, 1957, 255–269: least (r − 1)(c − 1), then least fill), among
  * those that are at least a tenth of the largest entry of their column, and that are not what
- * rounding left of larger numbers.
+ * rounding left of larger numbers. Rows and columns that are to be eliminated last wait as long as
+ * there is any other.
  *
  * <p>Works on dense copies: it is done once for a pattern, not once for a matrix.
  */
@@ -57,15 +59,17 @@ final class EliminationOrder {
    *
    * @param re real parts by slot
    * @param im imaginary parts by slot
+   * @param someLast whether the pattern's wish is heeded of what comes last
    * @return null when there is no safe pivot at some step
    */
-  static EliminationOrder of(SparsityPattern pattern, double[] re, double[] im) {
+  static EliminationOrder of(SparsityPattern pattern, double[] re, double[] im, boolean someLast) {
     EliminationOrder order = new EliminationOrder(pattern.size());
     for (int slot = 0; slot < pattern.slots(); slot++) {
       order.set(pattern.row(slot), pattern.column(slot), re[slot], im[slot]);
     }
+    BitSet last = someLast ? pattern.last() : new BitSet();
     for (int step = 0; step < order.size; step++) {
-      if (!order.choose(step)) {
+      if (!order.choose(step, last)) {
         return null;
       }
       order.eliminate(step);
@@ -90,7 +94,7 @@ final class EliminationOrder {
     return Math.abs(re[at]) + Math.abs(im[at]);
   }
 
-  private boolean choose(int step) {
+  private boolean choose(int step, BitSet last) {
     long least = Long.MAX_VALUE;
     double firmest = 0;
     int bestRow = -1;
@@ -110,6 +114,9 @@ final class EliminationOrder {
           continue;
         }
         long cost = (long) (count(rowBits[row]) - 1) * (candidates.length - 1);
+        if (last.get(row) || last.get(column)) {
+          cost += (long) size * size;
+        }
         if (cost > least >> 20) {
           continue;
         }

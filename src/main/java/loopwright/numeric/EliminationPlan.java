@@ -23,6 +23,12 @@ final class EliminationPlan {
   /** Column of each pivot. */
   final int[] columns;
 
+  /** Step at which each row is the pivot's. */
+  final int[] rowStep;
+
+  /** Step at which each column is the pivot's. */
+  final int[] columnStep;
+
   /** Entry of each pivot; behind the last the number of entries. */
   final int[] start;
 
@@ -47,8 +53,8 @@ final class EliminationPlan {
     columns = order.columns;
     start = new int[size + 1];
     startBelow = new int[size];
-    int[] rowStep = inverse(rows);
-    int[] columnStep = inverse(columns);
+    rowStep = inverse(rows);
+    columnStep = inverse(columns);
     Map<Long, Integer> at = new HashMap<>();
     int next = 0;
     int updates = 0;

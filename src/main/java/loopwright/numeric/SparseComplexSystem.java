@@ -147,20 +147,52 @@ final class SparseComplexSystem extends SparseSystem implements ComplexSystem {
     }
   }
 
+  @Override
+  public void solveOne(int row, int[] wanted, double[] solution) {
+    if (!isTrusted()) {
+      ComplexSystem.super.solveOne(row, wanted, solution);
+      return;
+    }
+    int lowest = plan.size;
+    for (int unknown : wanted) {
+      lowest = unknown < 0 ? lowest : Math.min(lowest, plan.columnStep[unknown]);
+    }
+    Arrays.fill(work, 0);
+    work[2 * row] = 1;
+    forward(plan.rowStep[row]);
+    backward(solution, lowest);
+  }
+
   private void substitute(double[] b) {
+    System.arraycopy(b, 0, work, 0, 2 * plan.size);
+    forward(0);
+    backward(b, 0);
+  }
+
+  /** From the first step whose row is excited. */
+  private void forward(int first) {
     double[] a = entries;
     double[] w = work;
     int[] line = plan.line;
-    System.arraycopy(b, 0, w, 0, 2 * plan.size);
-    for (int k = 0; k < plan.size; k++) {
+    for (int k = first; k < plan.size; k++) {
       int row = 2 * plan.rows[k];
       double yr = w[row];
       double yi = w[row + 1];
+      if (yr == 0 && yi == 0) {
+        continue;
+      }
       for (int l = plan.startBelow[k]; l < plan.start[k + 1]; l++) {
         subtract(w, 2 * line[l], a[2 * l], a[2 * l + 1], yr, yi);
       }
     }
-    for (int k = plan.size - 1; k >= 0; k--) {
+  }
+
+  /** To the last step whose unknown is wanted. */
+  private void backward(double[] b, int lowest) {
+    double[] a = entries;
+    double[] w = work;
+    int[] line = plan.line;
+    for (int k = plan.size - 1; k >= lowest; k--) {
       int row = 2 * plan.rows[k];
       double sr = w[row];
       double si = w[row + 1];

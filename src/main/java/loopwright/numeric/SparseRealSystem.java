@@ -129,6 +129,9 @@ final class SparseRealSystem extends SparseSystem implements RealSystem {
     System.arraycopy(rightHandSide, 0, w, 0, plan.size);
     for (int k = 0; k < plan.size; k++) {
       double value = w[plan.rows[k]];
+      if (value == 0) {
+        continue;
+      }
       for (int l = plan.startBelow[k]; l < plan.start[k + 1]; l++) {
         w[line[l]] -= a[l] * value;
       }

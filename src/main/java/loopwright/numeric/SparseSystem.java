@@ -47,6 +47,11 @@ abstract class SparseSystem {
     return isDense;
   }
 
+  /** Whether the plan serves and no residual is watched. */
+  final boolean isTrusted() {
+    return !isDense && !isWatched;
+  }
+
   /** Says that the plan serves the matrix at hand, with no multiplier above the watched one. */
   final void trust() {
     isWatched = false;

@@ -1,6 +1,7 @@
 package loopwright.numeric;
 
 import java.util.Arrays;
+import java.util.BitSet;
 import java.util.HashMap;
 import java.util.Map;
 
@@ -18,11 +19,13 @@ public final class SparsityPattern {
   private final int size;
   private final int[] rows;
   private final int[] columns;
+  private final BitSet last;
 
-  private SparsityPattern(int size, int[] rows, int[] columns) {
+  private SparsityPattern(int size, int[] rows, int[] columns, BitSet last) {
     this.size = size;
     this.rows = rows;
     this.columns = columns;
+    this.last = last;
   }
 
   /** Number of rows, and of columns. */
@@ -45,12 +48,18 @@ public final class SparsityPattern {
     return columns[slot];
   }
 
+  /** Indices whose row and column are to be eliminated last; not to be changed. */
+  BitSet last() {
+    return last;
+  }
+
   /** Whether another pattern has the same places in the same slots. */
   public boolean isSameAs(SparsityPattern other) {
     return this == other
         || (size == other.size
             && Arrays.equals(rows, other.rows)
-            && Arrays.equals(columns, other.columns));
+            && Arrays.equals(columns, other.columns)
+            && last.equals(other.last));
   }
 
   /** A number for each place, for maps. */
@@ -61,6 +70,7 @@ public final class SparsityPattern {
   /** Collects the places of a matrix and hands out their slots. */
   public static final class Builder {
     private final Map<Long, Integer> slots = new HashMap<>();
+    private final BitSet last = new BitSet();
 
     /**
      * The slot of a place, made when it is new.
@@ -74,6 +84,17 @@ public final class SparsityPattern {
       return slots.computeIfAbsent(key(row, column), key -> slots.size());
     }
 
+    /**
+     * Says that row and column of an index are to be eliminated last in complex systems, where that
+     * is safe: such rows are excited, and such unknowns read, far more often than others, and
+     * {@link ComplexSystem#solveOne} then has little to do. Negative indices, ground, are ignored.
+     */
+    public void eliminateLast(int index) {
+      if (index >= 0) {
+        last.set(index);
+      }
+    }
+
     /** The pattern of a matrix of the given size. */
     public SparsityPattern build(int size) {
       int[] rows = new int[slots.size()];
@@ -83,7 +104,7 @@ public final class SparsityPattern {
             rows[slot] = (int) (place / MOST_COLUMNS);
             columns[slot] = (int) (place % MOST_COLUMNS);
           });
-      return new SparsityPattern(size, rows, columns);
+      return new SparsityPattern(size, rows, columns, (BitSet) last.clone());
     }
   }
 }

@@ -67,14 +67,14 @@ public final class SystemFamily {
 
   /** Analyses a real matrix; null when there is no safe order. */
   EliminationPlan analyseReal(double[] values) {
-    EliminationPlan plan = analyse(values, new double[values.length]);
+    EliminationPlan plan = analyse(values, new double[values.length], false);
     realPlan = plan == null ? realPlan : plan;
     return plan;
   }
 
   /** Analyses a complex matrix; null when there is no safe order. */
   EliminationPlan analyseComplex(double[] re, double[] im) {
-    EliminationPlan plan = analyse(re, im);
+    EliminationPlan plan = analyse(re, im, true);
     complexPlan = plan == null ? complexPlan : plan;
     return plan;
   }
@@ -87,9 +87,9 @@ public final class SystemFamily {
     refinements++;
   }
 
-  private EliminationPlan analyse(double[] re, double[] im) {
+  private EliminationPlan analyse(double[] re, double[] im, boolean someLast) {
     analyses++;
-    EliminationOrder order = EliminationOrder.of(pattern, re, im);
+    EliminationOrder order = EliminationOrder.of(pattern, re, im, someLast);
     return order == null ? null : new EliminationPlan(pattern, order);
   }
 }

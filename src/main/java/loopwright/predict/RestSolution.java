@@ -30,6 +30,7 @@ record RestSolution(
   private static final double LITTLE_PROGRESS = 0.95;
 
   private static final double LEAST_WEIGHT = 0.05;
+
   private static final double HOTTEST = 1000;
 
   /**
@@ -45,7 +46,8 @@ record RestSolution(
     if (!design.surroundings().selfHeating()) {
       return solver.at(Map.of(), near);
     }
-    RestSolution solution = solver.at(near.map(RestSolution::kelvins).orElse(Map.of()), near);
+    RestSolution solution =
+        solver.at(near.map(other -> other.kelvinsIn(design)).orElse(Map.of()), near);
     double weight = 1;
     double before = Double.POSITIVE_INFINITY;
     for (int round = 0; round < MOST_ROUNDS; round++) {
@@ -87,6 +89,15 @@ record RestSolution(
       }
       throw new UnsolvedException(((OperatingPoint.NotFound) point).reason());
     }
+  }
+
+  /** Its junction temperatures, moved by as much as a design's ambient differs. */
+  private Map<String, Double> kelvinsIn(Design design) {
+    double warmer =
+        design.surroundings().ambient().value() - hookup.design().surroundings().ambient().value();
+    Map<String, Double> moved = new HashMap<>();
+    kelvins.forEach((role, kelvin) -> moved.put(role, kelvin + warmer));
+    return moved;
   }
 
   private Map<String, Double> heated(JunctionHeat heat) {

@@ -19,6 +19,8 @@ public class SmallSignalCircuit {
   private final double[] c;
   private final double[] first;
   private final double[] second;
+  private final int[] wantedOne = new int[1];
+  private final int[] wantedOfLead = new int[3];
 
   /** The small-signal form of a circuit; {@link #linearise} fills it. */
   public SmallSignalCircuit(Circuit circuit) {
@@ -95,7 +97,8 @@ public class SmallSignalCircuit {
     if (!system.factor(g, c, re, im)) {
       return new double[] {Double.NaN, Double.NaN};
     }
-    excite(first, row);
+    wantedOne[0] = unknown;
+    system.solveOne(row, wantedOne, first);
     return unknown < 0
         ? new double[] {0, 0}
         : new double[] {first[2 * unknown], first[2 * unknown + 1]};
@@ -134,14 +137,11 @@ public class SmallSignalCircuit {
     if (!system.factor(g, c, 0, 2 * Math.PI * frequency)) {
       return new double[] {Double.NaN, Double.NaN};
     }
-    excite(first, lead.branch());
-    excite(second, lead.to());
+    wantedOfLead[0] = lead.from();
+    wantedOfLead[1] = lead.to();
+    wantedOfLead[2] = lead.branch();
+    system.solveOne(lead.branch(), wantedOfLead, first);
+    system.solveOne(lead.to(), wantedOfLead, second);
     return LoopGain.combine(lead, first, second);
-  }
-
-  private void excite(double[] vector, int row) {
-    Arrays.fill(vector, 0);
-    vector[2 * row] = 1;
-    system.solve(vector);
   }
 }

@@ -5,8 +5,6 @@ import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import loopwright.design.Design;
 import loopwright.file.DesignText;
 
@@ -16,15 +14,16 @@ final class BenchmarkDesigns {
 
   /** The reference example, which has one of everything that the stage library offers. */
   static Design referenceExample() {
-    try {
-      return DesignText.read(Files.readString(Path.of("examples/everything-fitted.json")));
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
+    return DesignText.example("everything-fitted");
+  }
+
+  /** One of the reference designs by its number, from 1; 0 is the reference example. */
+  static Design numbered(int number) {
+    return number == 0 ? referenceExample() : referenceDesign(number);
   }
 
   /** One of the reference designs by its number, from 1. */
-  static Design referenceDesign(int number) {
+  private static Design referenceDesign(int number) {
     try (InputStream stream =
         BenchmarkDesigns.class.getResourceAsStream("/loopwright/reference-designs.json")) {
       JsonNode cases = new ObjectMapper().readTree(stream).get("cases");

@@ -96,7 +96,15 @@ public class ReferenceExampleBenchmark {
     return frequencies.of(network);
   }
 
-  /** Every figure of the catalogue in all hookups. */
+  /** Every figure of the catalogue in one hookup, on one core. */
+  @Benchmark
+  @OutputTimeUnit(TimeUnit.MILLISECONDS)
+  public Prediction oneHookup() {
+    return Predictor.predict(
+        design, List.of(hookup.hookup().name()), new double[0], Progress.none());
+  }
+
+  /** Every figure of the catalogue in all hookups, each on a core of its own while there are. */
   @Benchmark
   @OutputTimeUnit(TimeUnit.MILLISECONDS)
   public Prediction wholePrediction() {

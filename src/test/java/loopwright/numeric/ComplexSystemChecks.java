@@ -50,6 +50,30 @@ abstract class ComplexSystemChecks {
     }
   }
 
+  /** One row excited and three unknowns read: what a whole solution gives there. */
+  @ParameterizedTest
+  @ValueSource(ints = {3, 12, 40})
+  void aSolutionForSomeUnknownsIsThatForAll(int size) {
+    Random random = new Random(size);
+    RandomMatrices.Sparse sparse = RandomMatrices.regular(size, random);
+    ComplexSystem system = system(sparse.pattern());
+    assertThat(system.factor(sparse.g(), sparse.c(), RE, IM)).isTrue();
+    double[] some = RandomMatrices.vector(2 * size, random);
+    for (int row = 0; row < size; row++) {
+      int[] wanted = {random.nextInt(size), -1, random.nextInt(size), row};
+      double[] all = new double[2 * size];
+      all[2 * row] = 1;
+      system.solve(all);
+      system.solveOne(row, wanted, some);
+      for (int unknown : wanted) {
+        if (unknown >= 0) {
+          assertThat(some[2 * unknown]).isEqualTo(all[2 * unknown]);
+          assertThat(some[2 * unknown + 1]).isEqualTo(all[2 * unknown + 1]);
+        }
+      }
+    }
+  }
+
   @ParameterizedTest
   @ValueSource(doubles = {1e-17, 1, 1e17})
   void singularityIsJudgedWithoutRegardToScale(double scale) {

@@ -1,6 +1,7 @@
 package loopwright.numeric;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import java.util.Random;
 import java.util.stream.IntStream;
@@ -85,6 +86,40 @@ class SystemFamilyTest {
     assertThat(family.complex().factor(matrix.g(), matrix.c(), 0, 1e3)).isTrue();
     assertThat(family.analyses()).isEqualTo(1);
     assertThat(family.multiplyAdds()).isPositive();
+  }
+
+  /** What is read often comes last in complex systems, and the solution is the same. */
+  @Test
+  void whatIsToBeEliminatedLastIs() {
+    SparsityPattern.Builder builder = new SparsityPattern.Builder();
+    int size = 12;
+    for (int row = 0; row < size; row++) {
+      for (int column = Math.max(0, row - 1); column <= Math.min(size - 1, row + 1); column++) {
+        builder.slot(row, column);
+      }
+    }
+    SparsityPattern plain = builder.build(size);
+    builder.eliminateLast(0);
+    builder.eliminateLast(5);
+    builder.eliminateLast(-1);
+    SparsityPattern marked = builder.build(size);
+    assertThat(marked.isSameAs(plain)).isFalse();
+    assertThat(marked.isSameAs(builder.build(size))).isTrue();
+
+    double[] g = new Random(1).doubles(plain.slots(), 0.5, 1).toArray();
+    double[] c = new Random(2).doubles(plain.slots(), 0.5, 1).toArray();
+    SystemFamily family = new SystemFamily(marked);
+    ComplexSystem complex = family.complex();
+    assertThat(complex.factor(g, c, 0, 1)).isTrue();
+    assertThat(family.complexPlan().rowStep[0]).isGreaterThanOrEqualTo(size - 2);
+    assertThat(family.complexPlan().columnStep[5]).isGreaterThanOrEqualTo(size - 2);
+    ComplexSystem other = new SystemFamily(plain).complex();
+    assertThat(other.factor(g, c, 0, 1)).isTrue();
+    double[] x = RandomMatrices.vector(2 * size, new Random(3));
+    double[] y = x.clone();
+    complex.solve(x);
+    other.solve(y);
+    assertThat(x).containsExactly(y, within(1e-12));
   }
 
   @Test
