@@ -8,8 +8,10 @@ import java.util.ResourceBundle;
 import loopwright.design.DesignException;
 import loopwright.design.Field;
 import loopwright.design.FieldText;
+import loopwright.design.PartValue;
 import loopwright.design.Schema;
 import loopwright.design.Shape;
+import loopwright.quantity.Quantity;
 
 /**
  * Makes a variant or block that a person has just chosen: values of the same name stay, the others
@@ -49,7 +51,16 @@ final class Beginnings {
     return schema
         .field(field.name())
         .filter(same -> same.type() == field.type() && same.optional() == field.optional())
-        .map(same -> schema.value(old, same.name()));
+        .map(same -> schema.value(old, same.name()))
+        .filter(value -> isWithin(field, value));
+  }
+
+  /** What could stand there need not fit here: an emitter resistor of 0 Ω is a wire elsewhere. */
+  private static boolean isWithin(Field field, Object value) {
+    if (value instanceof PartValue part) {
+      return field.range().contains(part.value().value());
+    }
+    return !(value instanceof Quantity quantity) || field.range().contains(quantity.value());
   }
 
   private Object first(Class<?> owner, Field field, String path) {

@@ -1,5 +1,6 @@
 package loopwright.view.form;
 
+import java.awt.Component;
 import java.awt.Dimension;
 import java.util.ArrayList;
 import java.util.List;
@@ -9,6 +10,8 @@ import java.util.function.Consumer;
 import java.util.function.Function;
 import javax.swing.JComboBox;
 import javax.swing.JComponent;
+import javax.swing.JLabel;
+import javax.swing.ListCellRenderer;
 import loopwright.design.Field;
 
 /** Edits what is one of several: a variant, a word, a part. */
@@ -73,20 +76,37 @@ final class ChoiceEditor implements RowEditor {
 
   /** For the parts that fit. */
   static ChoiceEditor parts(Row row, RowEdits edits) {
-    return new ChoiceEditor(
-        row,
-        shown -> {
-          List<String> names = new ArrayList<>(edits.parts(shown));
-          shown
-              .value()
-              .map(Object::toString)
-              .filter(name -> !names.contains(name))
-              .ifPresent(name -> names.add(0, name));
-          return names.stream()
-              .map(name -> new Option(name, name, at -> edits.part(at, name)))
-              .toList();
-        },
-        shown -> shown.value().orElse(null));
+    ChoiceEditor editor =
+        new ChoiceEditor(
+            row,
+            shown -> {
+              List<String> names = new ArrayList<>(edits.parts(shown));
+              shown
+                  .value()
+                  .map(Object::toString)
+                  .filter(name -> !names.contains(name))
+                  .ifPresent(name -> names.add(0, name));
+              return names.stream()
+                  .map(name -> new Option(name, name, at -> edits.part(at, name)))
+                  .toList();
+            },
+            shown -> shown.value().orElse(null));
+    editor.describe(edits::about);
+    return editor;
+  }
+
+  /** Shows what is known of each choice in the list that drops down. */
+  private void describe(Function<String, String> about) {
+    ListCellRenderer<? super Option> plain = box.getRenderer();
+    box.setRenderer(
+        (list, option, index, selected, focused) -> {
+          Component drawn =
+              plain.getListCellRendererComponent(list, option, index, selected, focused);
+          if (index >= 0 && option != null && drawn instanceof JLabel label) {
+            label.setText(option.says() + "   " + about.apply(option.says()));
+          }
+          return drawn;
+        });
   }
 
   @Override

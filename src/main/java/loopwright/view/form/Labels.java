@@ -1,5 +1,6 @@
 package loopwright.view.form;
 
+import java.util.Locale;
 import java.util.MissingResourceException;
 import java.util.ResourceBundle;
 import loopwright.design.Field;
@@ -10,17 +11,28 @@ final class Labels {
 
   /** The label of a field of a record. */
   String field(Class<?> owner, String name) {
-    return text(typeName(owner) + "." + name);
+    String key = typeName(owner) + "." + name;
+    return texts.containsKey(key) ? text(key) : humanised(name);
+  }
+
+  /**
+   * The words of a name of the file: {@code collectorEmitterVoltage} is Collector emitter voltage.
+   */
+  static String humanised(String name) {
+    String words = name.replaceAll("([a-z])([A-Z])", "$1 $2").toLowerCase(Locale.ROOT);
+    return words.isEmpty() ? "" : Character.toUpperCase(words.charAt(0)) + words.substring(1);
   }
 
   /** The word for a variant of a family. */
   String kind(Class<?> variant) {
-    return text("kind." + typeName(variant));
+    String key = "kind." + typeName(variant);
+    return texts.containsKey(key) ? text(key) : humanised(variant.getSimpleName());
   }
 
   /** The word for a member of a choice. */
   String choice(Enum<?> constant) {
-    return text("choice." + typeName(constant.getDeclaringClass()) + "." + Field.word(constant));
+    String key = "choice." + typeName(constant.getDeclaringClass()) + "." + Field.word(constant);
+    return texts.containsKey(key) ? text(key) : humanised(Field.word(constant));
   }
 
   /** The title of a block of the design. */

@@ -86,6 +86,11 @@ final class PartRole {
         : Optional.empty();
   }
 
+  /** The record of a name, of the design or the shelf. */
+  Optional<PartRecord> find(String name) {
+    return record(name);
+  }
+
   private Optional<PartRecord> record(String name) {
     return Optional.ofNullable(design.parts().get(name)).or(() -> shelf.find(name));
   }

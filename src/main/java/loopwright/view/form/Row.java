@@ -52,6 +52,52 @@ record Row(String path, Class<?> owner, Field field, Optional<Object> value, int
     }
   }
 
+  /**
+   * The rows for everything that stands in a block, but for the lists and maps of blocks in it,
+   * which have entries of their own.
+   */
+  static List<Row> whole(Design design, String blockPath) {
+    List<Row> rows = new ArrayList<>();
+    Object block = blockPath.isEmpty() ? design : DesignPath.get(design, blockPath);
+    everything(rows, design, block, blockPath, 0);
+    return rows;
+  }
+
+  private static void everything(
+      List<Row> rows, Design design, Object block, String path, int depth) {
+    Schema schema = Schema.of(block.getClass());
+    for (Field field : schema.fields()) {
+      String at = path.isEmpty() ? field.name() : path + "." + field.name();
+      if (Containers.isContainer(field) || at.equals("loopwright")) {
+        continue;
+      }
+      Object value = schema.value(block, field.name());
+      Optional<Object> present =
+          value instanceof Optional<?> optional
+              ? optional.map(Object.class::cast)
+              : Optional.of(value);
+      Row row = new Row(at, block.getClass(), field, present, depth);
+      rows.add(row);
+      switch (field.shape()) {
+        case BLOCK, FAMILY ->
+            present.ifPresent(inner -> everything(rows, design, inner, at, depth + 1));
+        case PART_VALUE ->
+            present.ifPresent(
+                inner -> {
+                  known(rows, design, inner, at + ".tolerance", depth + 1);
+                  known(rows, design, inner, at + ".measured", depth + 1);
+                });
+        default -> {}
+      }
+    }
+  }
+
+  /** What is known of a part beyond its nominal value. */
+  private static void known(List<Row> rows, Design design, Object part, String path, int depth) {
+    Field field = DesignPath.field(design, path);
+    rows.add(new Row(path, part.getClass(), field, DesignPath.find(design, path), depth));
+  }
+
   private static void add(List<Row> rows, Row row) {
     rows.add(row);
     if (row.field().shape() == Shape.FAMILY || row.field().shape() == Shape.BLOCK) {

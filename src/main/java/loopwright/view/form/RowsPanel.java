@@ -82,11 +82,12 @@ final class RowsPanel extends JPanel {
       case LIST -> TextEditor.list(row, edits);
       case FAMILY -> ChoiceEditor.variants(row, edits, labels);
       case CHOICE -> ChoiceEditor.words(row, edits, labels);
-      case TEXT -> ChoiceEditor.parts(row, edits);
+      case TEXT ->
+          edits.namesPart(row) ? ChoiceEditor.parts(row, edits) : TextEditor.text(row, edits);
       case FLAG -> SwitchEditor.flag(row, edits);
       case BLOCK -> SwitchEditor.block(row, edits);
-      case ALTERNATIVES, MAP ->
-          throw new IllegalArgumentException("a form has no field for " + row.path());
+      case ALTERNATIVES -> TextEditor.alternative(row, edits);
+      case MAP -> TextEditor.pairs(row, edits);
     };
   }
 

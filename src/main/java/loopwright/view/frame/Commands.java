@@ -1,16 +1,19 @@
 package loopwright.view.frame;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import loopwright.design.Design;
 import loopwright.design.DesignException;
+import loopwright.design.Hookup;
 import loopwright.design.Problem;
 import loopwright.file.FileException;
 import loopwright.file.Recovery;
 import loopwright.session.KeptWork;
 import loopwright.session.Session;
 import loopwright.session.Snapshot;
+import loopwright.view.form.HookupEdits;
 
 /** What a person can have the window do with the design as a whole. */
 final class Commands {
@@ -118,6 +121,24 @@ final class Commands {
       case DISCARD -> true;
       case CANCEL -> false;
     };
+  }
+
+  /** Copies the chosen hookup; the copy is chosen then. */
+  void copyHookup() {
+    commitTyping.run();
+    Snapshot now = session.snapshot();
+    session.edit(HookupEdits.copy(now.design(), now.hookup()));
+    List<Hookup> hookups = session.snapshot().design().hookups();
+    session.choose(hookups.get(hookups.size() - 1).name());
+  }
+
+  /** Removes the chosen hookup, if it is not the only one. */
+  void removeHookup() {
+    commitTyping.run();
+    Snapshot now = session.snapshot();
+    attempt(
+        "Cannot remove the hookup",
+        () -> session.edit(HookupEdits.remove(now.design(), now.hookup())));
   }
 
   /** Shows the part records of the design. */

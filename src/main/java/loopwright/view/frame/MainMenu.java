@@ -54,7 +54,15 @@ final class MainMenu extends JMenuBar {
     redo = item("Redo", "edit.redo", 'R', controlShift(KeyEvent.VK_Z), commands::redo);
     this.commands = commands;
     add(fileMenu(commands, beginnings, quit));
-    add(menu("Edit", 'E', undo, redo));
+    add(
+        menu(
+            "Edit",
+            'E',
+            undo,
+            redo,
+            item("Whole design…", "edit.whole", 'W', control(KeyEvent.VK_E), studies::whole),
+            item("Copy this hookup", "edit.copyHookup", 'C', null, commands::copyHookup),
+            item("Remove this hookup", "edit.removeHookup", 'M', null, commands::removeHookup)));
     add(viewMenu(commands, theme, chooseTheme));
     add(workMenu(studies));
     add(menu("Help", 'H', item("About Loopwright", "help.about", 'A', null, commands::about)));

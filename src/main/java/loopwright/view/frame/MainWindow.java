@@ -64,7 +64,7 @@ public final class MainWindow {
     commands =
         new Commands(
             session, dialogs == null ? new SwingDialogs(frame) : dialogs, workbench::commitTyping);
-    studies = new Studies(frame, new Desk(session::snapshot, session::edit, this::runner));
+    studies = new Studies(frame, new Desk(session::snapshot, session::edit, this::runner), shelf);
     menu =
         new MainMenu(
             commands,

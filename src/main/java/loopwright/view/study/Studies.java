@@ -10,6 +10,7 @@ import javax.swing.JComponent;
 import javax.swing.JDialog;
 import javax.swing.KeyStroke;
 import javax.swing.WindowConstants;
+import loopwright.part.Shelf;
 import loopwright.session.Snapshot;
 
 /** Opens the studies, each in a dialog beside the window that stays until it is closed. */
@@ -19,15 +20,18 @@ public final class Studies {
 
   private final Window owner;
   private final Desk desk;
+  private final Shelf shelf;
   private final Map<String, JDialog> open = new LinkedHashMap<>();
   private final Map<String, Study> studies = new LinkedHashMap<>();
 
   /**
    * @param owner the window that they stand beside
    * @param desk its session
+   * @param shelf parts to choose from beside those of the design
    */
-  public Studies(Window owner, Desk desk) {
+  public Studies(Window owner, Desk desk, Shelf shelf) {
     this.owner = owner;
+    this.shelf = shelf;
     this.desk = desk;
   }
 
@@ -49,6 +53,11 @@ public final class Studies {
   /** Readings beside the prediction. */
   public void bench() {
     show("bench", BenchStudy::new);
+  }
+
+  /** Every field of the design. */
+  public void whole() {
+    show("whole", self -> new WholeStudy(self, shelf));
   }
 
   /** Tells all that are open of another moment. */

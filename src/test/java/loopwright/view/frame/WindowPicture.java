@@ -30,7 +30,8 @@ final class WindowPicture {
             theme,
             Theme::apply,
             session::choose,
-            new Studies(null, new Desk(session::snapshot, session::edit, SameThreadRunner::new)),
+            new Studies(
+                null, new Desk(session::snapshot, session::edit, SameThreadRunner::new), shelf),
             Map.of(),
             () -> {});
     menu.show(session.snapshot());

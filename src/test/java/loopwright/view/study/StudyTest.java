@@ -162,6 +162,8 @@ class StudyTest {
     theme.apply();
     Session session = session("seismometer-coil");
     Desk desk = desk(session);
+    Painting.of(new WholeStudy(desk, new ShelfFile().shipped()), 980, 560)
+        .save("study.whole-design-" + theme.name().toLowerCase(Locale.ROOT));
     Study[] studies = {
       new DividerStudy(desk), new CureStudy(desk), new SpreadStudy(desk), new BenchStudy(desk)
     };
