@@ -1,8 +1,6 @@
 package loopwright.view.form;
 
 import java.awt.BorderLayout;
-import java.awt.Dimension;
-import java.awt.Rectangle;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -11,13 +9,11 @@ import javax.swing.JComboBox;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
 import javax.swing.ScrollPaneConstants;
-import javax.swing.Scrollable;
 import loopwright.design.Design;
 import loopwright.part.Shelf;
 import loopwright.session.Edit;
 import loopwright.session.Snapshot;
 import loopwright.view.theme.Theme;
-import net.miginfocom.swing.MigLayout;
 
 /** The form of the chosen block of the design, and beneath it what its devices do at rest. */
 public final class FormPanel extends JPanel {
@@ -136,39 +132,6 @@ public final class FormPanel extends JPanel {
     if (!id.equals(selected)) {
       select(id);
       selectListeners.forEach(listener -> listener.accept(id));
-    }
-  }
-
-  /** Rows and values at rest, as wide as there is room. */
-  private static final class Column extends JPanel implements Scrollable {
-    Column() {
-      super(new MigLayout("insets 0 0 0 4, fillx, wrap 1", "[grow,fill]"));
-      Theme.style(this, "plain");
-    }
-
-    @Override
-    public Dimension getPreferredScrollableViewportSize() {
-      return getPreferredSize();
-    }
-
-    @Override
-    public int getScrollableUnitIncrement(Rectangle visible, int orientation, int direction) {
-      return 16;
-    }
-
-    @Override
-    public int getScrollableBlockIncrement(Rectangle visible, int orientation, int direction) {
-      return visible.height;
-    }
-
-    @Override
-    public boolean getScrollableTracksViewportWidth() {
-      return true;
-    }
-
-    @Override
-    public boolean getScrollableTracksViewportHeight() {
-      return false;
     }
   }
 }

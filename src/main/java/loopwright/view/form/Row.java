@@ -68,7 +68,8 @@ record Row(String path, Class<?> owner, Field field, Optional<Object> value, int
     Schema schema = Schema.of(block.getClass());
     for (Field field : schema.fields()) {
       String at = path.isEmpty() ? field.name() : path + "." + field.name();
-      if (Containers.isContainer(field) || at.equals("loopwright")) {
+      boolean ownPlace = path.isEmpty() && field.shape() != Shape.TEXT;
+      if (Containers.isContainer(field) || ownPlace) {
         continue;
       }
       Object value = schema.value(block, field.name());

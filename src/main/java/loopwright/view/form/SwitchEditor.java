@@ -38,7 +38,10 @@ final class SwitchEditor implements RowEditor {
 
   /** For an optional block. */
   static SwitchEditor block(Row row, RowEdits edits) {
-    return new SwitchEditor(row, shown -> shown.value().isPresent(), edits::fitted, "fitted");
+    SwitchEditor editor =
+        new SwitchEditor(row, shown -> shown.value().isPresent(), edits::fitted, "fitted");
+    editor.box.setEnabled(row.field().optional());
+    return editor;
   }
 
   @Override

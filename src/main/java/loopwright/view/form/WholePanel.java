@@ -97,7 +97,9 @@ public final class WholePanel extends JPanel {
             showRows();
           }
         });
-    JScrollPane form = new JScrollPane(rows);
+    JPanel column = new Column();
+    column.add(rows, "growx, wmin 0");
+    JScrollPane form = new JScrollPane(column);
     form.getVerticalScrollBar().setUnitIncrement(16);
     JSplitPane split = new JSplitPane(JSplitPane.HORIZONTAL_SPLIT, new JScrollPane(tree), form);
     split.setDividerLocation(260);
