@@ -28,6 +28,15 @@ public final class CommandLineProgram {
    *     is wrong
    */
   public int run(String[] arguments, Console console) {
+    CommandLine line = line(console);
+    int status = line.execute(arguments);
+    console.out().flush();
+    console.err().flush();
+    return status;
+  }
+
+  /** All commands and their options. */
+  CommandLine line(Console console) {
     CommandLine line = new CommandLine(new TopCommand());
     line.addSubcommand(new PredictCommand(services, console));
     line.addSubcommand(new SizeCommand(services, console));
@@ -44,10 +53,7 @@ public final class CommandLineProgram {
     line.setUsageHelpWidth(HELP_WIDTH);
     line.setParameterExceptionHandler(new WrongCall());
     line.setExecutionExceptionHandler(new WrongInput());
-    int status = line.execute(arguments);
-    console.out().flush();
-    console.err().flush();
-    return status;
+    return line;
   }
 
   /** The words that a call may begin with. */
