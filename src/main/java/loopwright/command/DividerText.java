@@ -43,8 +43,8 @@ final class DividerText {
             .map(value -> EngineeringFormat.format(ohms(value), Unit.OHM))
             .collect(Collectors.joining(" / ")),
         text(divider.gain().number(), Unit.ONE),
-        text(divider.gainLow(), Unit.ONE),
-        text(divider.gainHigh(), Unit.ONE),
+        text(divider.gainLow().number(), Unit.ONE),
+        text(divider.gainHigh().number(), Unit.ONE),
         text(divider.outputOffset().number(), Unit.VOLT),
         text(divider.inputNoise().number(), Unit.VOLT_PER_ROOT_HERTZ),
         text(OptionalDouble.of(divider.dividerCurrent()), Unit.AMPERE),

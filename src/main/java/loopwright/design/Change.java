@@ -1,5 +1,6 @@
 package loopwright.design;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -16,13 +17,25 @@ public record Change(String path, String value) {
    * A copy of the design with all changes made together, so that they may make a block that none of
    * them would complete alone.
    *
-   * @param changes that set values
+   * @param changes that set values, or take something optional away
    * @throws DesignException when the design has no such place or a text does not fit it
    */
   public static Design applyAll(Design design, List<Change> changes) {
     Map<String, Object> values = new LinkedHashMap<>();
-    changes.forEach(change -> values.put(change.path(), change.parsed(design)));
-    return DesignPath.setAll(design, values);
+    List<String> taken = new ArrayList<>();
+    for (Change change : changes) {
+      Object value = change.parsed(design);
+      if (value == null) {
+        taken.add(change.path());
+      } else {
+        values.put(change.path(), value);
+      }
+    }
+    Design changed = DesignPath.setAll(design, values);
+    for (String path : taken) {
+      changed = DesignPath.set(changed, path, null);
+    }
+    return changed;
   }
 
   /**
@@ -32,15 +45,16 @@ public record Change(String path, String value) {
    * @throws DesignException when the design has no such place or the text does not fit it
    */
   public Design applyTo(Design design) {
-    Field field = DesignPath.field(design, path);
-    if (value.isBlank() && !field.isNeeded()) {
-      return DesignPath.set(design, path, null);
-    }
     return DesignPath.set(design, path, parsed(design));
   }
 
+  /** What the text stands for there; null for nothing. */
   private Object parsed(Design design) {
-    Object parsed = FieldText.parse(DesignPath.field(design, path), value, path);
+    Field field = DesignPath.field(design, path);
+    if (value.isBlank() && !field.isNeeded()) {
+      return null;
+    }
+    Object parsed = FieldText.parse(field, value, path);
     if (parsed instanceof PartValue part) {
       parsed =
           DesignPath.find(design, path)

@@ -27,13 +27,16 @@ public final class DividerJson {
     List<String> reasons = new ArrayList<>();
     members.add(member("changes", ChangeJson.of(divider.changes())));
     add(members, reasons, "gain", divider.gain());
-    members.add(member("gainLow", number(divider.gainLow())));
-    members.add(member("gainHigh", number(divider.gainHigh())));
+    add(members, reasons, "gainLow", divider.gainLow());
+    add(members, reasons, "gainHigh", divider.gainHigh());
     add(members, reasons, "outputOffset", divider.outputOffset());
     add(members, reasons, "inputNoise", divider.inputNoise());
     members.add(member("dividerCurrent", number(divider.dividerCurrent())));
     add(members, reasons, "phaseMargin", divider.phaseMargin());
     members.add(member("score", number(divider.score())));
+    if (Double.isInfinite(divider.score())) {
+      reasons.add("score: not solved");
+    }
     members.add(member("says", text(divider.says())));
     if (!reasons.isEmpty()) {
       members.add(member("reason", text(String.join("; ", reasons))));

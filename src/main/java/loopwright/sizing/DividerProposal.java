@@ -1,7 +1,6 @@
 package loopwright.sizing;
 
 import java.util.List;
-import java.util.OptionalDouble;
 import loopwright.design.Change;
 import loopwright.predict.FigureValue;
 
@@ -16,14 +15,14 @@ import loopwright.predict.FigureValue;
  * @param inputNoise solved, or by hand where that is not possible, V/√Hz
  * @param dividerCurrent what the divider takes at the peak output, A
  * @param phaseMargin solved, degrees; without a number where the loop gain never passes 1
- * @param score what speaks against it; the least is best
+ * @param score what speaks against it; the least is best, infinite where it could not be solved
  * @param says the parts, and how it stands beside the others, in words
  */
 public record DividerProposal(
     List<Change> changes,
     FigureValue gain,
-    OptionalDouble gainLow,
-    OptionalDouble gainHigh,
+    FigureValue gainLow,
+    FigureValue gainHigh,
     FigureValue outputOffset,
     FigureValue inputNoise,
     double dividerCurrent,

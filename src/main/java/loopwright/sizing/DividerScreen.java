@@ -4,25 +4,29 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashSet;
 import java.util.List;
+import java.util.PriorityQueue;
 import java.util.Set;
+import java.util.function.Function;
 import loopwright.design.DesignException;
+import loopwright.quantity.EngineeringFormat;
+import loopwright.quantity.Unit;
 
 /**
- * Every divider that the stock can make near a wanted gain, ranked by hand estimates: the few best
- * of them are worth solving.
+ * Every divider that the stock can make for a wanted gain, ranked by hand estimates: the few best
+ * of them are worth solving. The search is exact: a divider is left out only when its gain error
+ * alone already speaks more against it than all terms together against those that are kept.
  */
 final class DividerScreen {
-  /** Ratios further off than this share are not looked at, unless there are no nearer ones. */
-  private static final double[] WINDOWS = {0.12, 0.5, 10};
-
   /** With less than this many times its resistance the source would set the gain. */
   private static final double ABOVE_SOURCE = 10;
 
   /** A ratio this near to 1 is a follower's. */
   private static final double FOLLOWER = 1e-3;
 
-  /** Of two parts there are many ways to come near. */
-  private static final int MOST_NEAR = 6;
+  /** A divider this far from the wanted gain is for another one, unless there is none nearer. */
+  private static final double FAR = 0.5;
+
+  private static final Comparator<Ranked> BY_PLACE = Comparator.comparingDouble(Ranked::place);
 
   private final AmplifierFacts facts;
   private final ResistorStock stock;
@@ -41,101 +45,150 @@ final class DividerScreen {
   }
 
   /** A divider with its score by hand. */
-  record Ranked(DividerCandidate divider, DividerScore score) {}
+  record Ranked(DividerCandidate divider, DividerScore score) {
+    private static final double BEHIND_ALL_NEAR = 1e9;
+
+    /** By it they are ranked: its score, those far from the wanted gain behind all others. */
+    private double place() {
+      return score.sum() + (isFar() ? BEHIND_ALL_NEAR : 0);
+    }
+
+    private boolean isFar() {
+      return score.error() > DividerScore.error(FAR);
+    }
+  }
+
+  /** Whether a gain from the driven input to the output is a follower's. */
+  static boolean isFollower(double ratio) {
+    return Math.abs(ratio - 1) <= FOLLOWER;
+  }
 
   /**
-   * The best of them.
+   * The best of them. Where two parts may make one resistance, the nearest of many that hardly
+   * differ is enough: each single resistor then stands with its best partner only.
    *
    * @param count how many at the most
    * @param path of the feedback, for the message
    * @throws DesignException when no divider gives this gain in this hookup
    */
   List<Ranked> best(int count, String path) {
-    return all(path).stream()
-        .sorted(Comparator.comparingDouble(ranked -> ranked.score().sum()))
-        .limit(count)
-        .toList();
-  }
-
-  /** All that come near the gain. */
-  List<Ranked> all(String path) {
-    double ratio = wanted / facts.ratio();
-    if (!facts.inverting() && ratio < 1 - FOLLOWER) {
+    double ratio = wanted / facts.loop().ratio();
+    boolean inverting = facts.loop().inverting();
+    if (!inverting && ratio < 1 - FOLLOWER) {
       throw new DesignException(
           path,
           "found a wanted gain below what the source network leaves of the generator, expected "
-              + facts.ratio()
+              + EngineeringFormat.format(facts.loop().ratio(), Unit.ONE)
               + " or more with non-inverting feedback");
     }
-    List<Ranked> ranked = new ArrayList<>();
-    if (!facts.inverting() && ratio <= 1 + FOLLOWER) {
-      ranked.add(rank(DividerCandidate.wire()));
-      return ranked;
+    double dividerRatio = facts.loop().dividerRatio(wanted);
+    if (Double.isInfinite(dividerRatio)) {
+      throw new DesignException(
+          path,
+          "found a wanted gain that feedback cannot leave, expected less than "
+              + EngineeringFormat.format(facts.loop().mostGain(), Unit.ONE)
+              + ", what generator to output has without any");
     }
-    double wantedRatio = facts.inverting() ? Math.abs(ratio) : ratio - 1;
-    for (double window : WINDOWS) {
-      collect(ranked, wantedRatio, window);
-      if (!ranked.isEmpty()) {
-        return ranked;
-      }
+    if (!inverting && (isFollower(ratio) || dividerRatio <= FOLLOWER)) {
+      return List.of(rank(DividerCandidate.wire()));
     }
-    throw new DesignException(
-        path, "found no two resistors of " + stock.says() + " near the wanted gain");
+    List<Ranked> all = new Search(dividerRatio, count).all();
+    if (all.isEmpty()) {
+      throw new DesignException(
+          path, "found no two resistors of " + stock.says() + " that could make the wanted gain");
+    }
+    all.sort(BY_PLACE);
+    boolean near = !all.get(0).isFar();
+    return all.stream().filter(one -> !near || !one.isFar()).limit(count).toList();
   }
 
-  /** With two parts allowed, one of the two resistors is made of them, not both. */
-  private void collect(List<Ranked> ranked, double wantedRatio, double window) {
-    Set<List<Double>> seen = new HashSet<>();
-    for (double single : stock.singles()) {
-      if (facts.inverting() && single < ABOVE_SOURCE * facts.sourceResistance()) {
-        continue;
-      }
-      ResistorChoice one = ResistorChoice.single(single);
-      double foot = facts.inverting() ? single + facts.sourceResistance() : single;
-      for (ResistorChoice upper : near(wantedRatio * foot, window)) {
-        add(ranked, seen, DividerCandidate.of(upper, one));
-      }
-      double lowerWanted =
-          single / wantedRatio - (facts.inverting() ? facts.sourceResistance() : 0);
-      for (ResistorChoice lower : near(lowerWanted, window)) {
-        if (lower.parts().size() > 1) {
-          add(ranked, seen, DividerCandidate.of(one, lower));
-        }
-      }
-    }
-  }
-
-  /** The same two resistances made of more parts are no other divider. */
-  private void add(List<Ranked> ranked, Set<List<Double>> seen, DividerCandidate divider) {
-    if (seen.add(List.of(divider.upper().value(), divider.lowerOhms()))) {
-      ranked.add(rank(divider));
-    }
-  }
-
+  /** Two resistors of one tolerance, each uniform within it: ± 2 standard uncertainties. */
   private Ranked rank(DividerCandidate divider) {
-    double noiseGain = 1 + divider.upper().value() / divider.lowerOhms();
-    double share = facts.inverting() ? 1 : (noiseGain - 1) / noiseGain;
+    double noiseGain = facts.loop().noiseGain(divider.upper().value(), divider.lowerOhms());
+    double share = facts.loop().inverting() ? 1 : (noiseGain - 1) / noiseGain;
     double halfBand = 2 * tolerance * share * Math.sqrt(2.0 / 3);
     return new Ranked(divider, DividerScore.byHand(facts, divider, wanted, halfBand));
   }
 
-  /** Choices within some per cent of a value; only the nearest few where there are many. */
-  private List<ResistorChoice> near(double value, double window) {
-    List<ResistorChoice> near = new ArrayList<>();
-    if (!(value > 0)) {
-      return near;
+  /** What the source puts in series with the lower resistor, Ω. */
+  private double inSeries() {
+    return facts.loop().inverting() ? facts.loop().sourceResistance() : 0;
+  }
+
+  /** Goes through the stock, resistor by resistor. */
+  private final class Search {
+    private final double dividerRatio;
+    private final int wantedCount;
+    private final int eachCount;
+    private final Set<List<Double>> seen = new HashSet<>();
+    private final List<Ranked> all = new ArrayList<>();
+
+    /** The scores of the best so far, the worst of them on top. */
+    private final PriorityQueue<Double> leaders = new PriorityQueue<>(Comparator.reverseOrder());
+
+    Search(double dividerRatio, int count) {
+      this.dividerRatio = dividerRatio;
+      this.wantedCount = count;
+      this.eachCount = stock.hasTwoParts() ? 1 : count;
     }
-    for (int i = stock.firstNotBelow(value / (1 + window)); i < stock.choices().size(); i++) {
-      ResistorChoice choice = stock.choices().get(i);
-      if (choice.value() > value * (1 + window)) {
-        break;
+
+    List<Ranked> all() {
+      for (double single : stock.singles()) {
+        ResistorChoice one = ResistorChoice.single(single);
+        nearest(dividerRatio * (single + inSeries()), upper -> DividerCandidate.of(upper, one));
+        if (stock.hasTwoParts()) {
+          nearest(single / dividerRatio - inSeries(), lower -> DividerCandidate.of(one, lower));
+        }
       }
-      near.add(choice);
+      return all;
     }
-    if (near.size() > MOST_NEAR) {
-      near.sort(Comparator.comparingDouble(choice -> Math.abs(choice.value() - value)));
-      return near.subList(0, MOST_NEAR);
+
+    /** The best dividers with a resistance near a value, outward from it on both sides. */
+    private void nearest(double value, Function<ResistorChoice, DividerCandidate> divider) {
+      PriorityQueue<Ranked> kept = new PriorityQueue<>(BY_PLACE.reversed());
+      int start = stock.firstNotBelow(value);
+      int above = start;
+      while (above < stock.choices().size()
+          && mayImprove(kept, divider.apply(stock.choices().get(above)))) {
+        above++;
+      }
+      int below = start - 1;
+      while (below >= 0 && mayImprove(kept, divider.apply(stock.choices().get(below)))) {
+        below--;
+      }
+      kept.forEach(this::take);
     }
-    return near;
+
+    /** Tries one; whether one further out may still be better than what is kept. */
+    private boolean mayImprove(PriorityQueue<Ranked> kept, DividerCandidate divider) {
+      if (divider.lowerOhms() < ABOVE_SOURCE * inSeries()) {
+        return true;
+      }
+      Ranked ranked = rank(divider);
+      boolean full = kept.size() == eachCount;
+      double own = full ? kept.peek().place() : Double.POSITIVE_INFINITY;
+      double leading = leaders.size() == wantedCount ? leaders.peek() : Double.POSITIVE_INFINITY;
+      if (ranked.score().error() >= Math.min(own, leading)) {
+        return false;
+      }
+      if (ranked.place() < own) {
+        if (full) {
+          kept.poll();
+        }
+        kept.add(ranked);
+      }
+      return true;
+    }
+
+    /** The same two resistances made of more parts are no other divider. */
+    private void take(Ranked ranked) {
+      if (seen.add(List.of(ranked.divider().upper().value(), ranked.divider().lowerOhms()))) {
+        all.add(ranked);
+        leaders.add(ranked.place());
+        if (leaders.size() > wantedCount) {
+          leaders.poll();
+        }
+      }
+    }
   }
 }

@@ -8,8 +8,6 @@ import java.util.concurrent.atomic.AtomicInteger;
 import loopwright.design.Change;
 import loopwright.design.Design;
 import loopwright.design.DesignException;
-import loopwright.design.Feedback;
-import loopwright.predict.Build;
 import loopwright.predict.Catalogue;
 import loopwright.predict.Figure;
 import loopwright.predict.FigureValue;
@@ -30,16 +28,17 @@ public final class DividerSizing {
   private final String hookup;
   private final double wanted;
   private final ResistorStock stock;
+  private final DividerPaths paths;
   private final AmplifierFacts facts;
-  private final String at;
 
-  private DividerSizing(HookupFigures nominal, double wanted, ResistorStock stock) {
-    this.design = nominal.design();
-    this.hookup = nominal.hookup().name();
+  private DividerSizing(
+      Design design, DividerPaths paths, double wanted, ResistorStock stock, HookupFigures first) {
+    this.design = design;
+    this.hookup = paths.hookup();
     this.wanted = wanted;
     this.stock = stock;
-    this.facts = AmplifierFacts.of(nominal);
-    this.at = "hookups." + hookup + ".feedback";
+    this.paths = paths;
+    this.facts = AmplifierFacts.of(first, wanted);
   }
 
   /**
@@ -51,7 +50,7 @@ public final class DividerSizing {
    * @param series {@code E12}, {@code E24}, {@code E96} or {@code drawer}
    * @param twoParts whether one of the two resistors may be two parts in series or in parallel
    * @param progress reported to, and asked whether the result is still wanted
-   * @return the best first, at least one
+   * @return the best first, at least one; those that could not be solved last
    * @throws loopwright.task.CancelledException when it is not
    * @throws DesignException when this hookup cannot have that gain, with the place and what was
    *     expected
@@ -63,30 +62,28 @@ public final class DividerSizing {
       String series,
       boolean twoParts,
       Progress progress) {
-    HookupFigures nominal = HookupFigures.of(design, hookup);
-    String at = "hookups." + hookup + ".feedback";
-    if (nominal.hookup().feedback() instanceof Feedback.Open) {
-      throw new DesignException(at, "found an open hookup, expected one with feedback");
-    }
-    boolean inverting = nominal.hookup().feedback() instanceof Feedback.Inverting;
-    if (!(Math.abs(gain) > 0) || !Double.isFinite(gain) || (!inverting && gain < 0)) {
+    DividerPaths paths = DividerPaths.of(design, hookup);
+    if (!(Math.abs(gain) > 0) || !Double.isFinite(gain) || (!paths.inverting() && gain < 0)) {
       throw new DesignException(
-          at,
+          paths.feedback(),
           "found a wanted gain of "
               + EngineeringFormat.format(gain, Unit.ONE)
               + ", expected "
-              + (inverting
+              + (paths.inverting()
                   ? "one that is not zero"
                   : "one above zero: the feedback does not invert"));
     }
-    double signed = inverting ? -Math.abs(gain) : gain;
+    double signed = paths.inverting() ? -Math.abs(gain) : gain;
     ResistorStock stock = ResistorStock.of(design, series, twoParts);
-    return new DividerSizing(nominal, signed, stock).ranked(nominal, progress);
+    HookupFigures first = FirstDivider.around(design, paths, signed);
+    return new DividerSizing(design, paths, signed, stock, first).ranked(progress);
   }
 
-  private List<DividerProposal> ranked(HookupFigures nominal, Progress progress) {
+  private List<DividerProposal> ranked(Progress progress) {
+    progress.check();
+    progress.report(0, "estimating every divider");
     List<DividerScreen.Ranked> best =
-        new DividerScreen(facts, stock, wanted, tolerance()).best(SOLVED, at);
+        new DividerScreen(facts, stock, wanted, tolerance()).best(SOLVED, paths.feedback());
     AtomicInteger done = new AtomicInteger();
     // Dividers share nothing, so that each may have a core of its own.
     List<Solved> solved =
@@ -113,54 +110,72 @@ public final class DividerSizing {
     return design.tolerances().resistor().map(Quantity::value).orElse(stock.tolerance());
   }
 
-  /** A divider with its solved figures. */
+  /**
+   * A divider with its solved figures.
+   *
+   * @param halfBand half the band of the gain, a fraction; NaN where it is not solved
+   * @param worst lowest and highest factor that the two resistors alone can put to the gain
+   * @param score infinite where the gain or its band is not solved
+   */
   record Solved(
       DividerCandidate divider,
       List<Change> changes,
       FigureValue gain,
+      double gainError,
       double halfBand,
+      WorstCase worst,
       FigureValue offset,
+      double biasOffset,
       FigureValue noise,
       double current,
       FigureValue margin,
       DividerScore terms,
-      double score) {}
+      double score) {
+    boolean isSolved() {
+      return Double.isFinite(score);
+    }
+  }
 
   private Solved solve(DividerScreen.Ranked ranked) {
-    List<Change> changes = changes(ranked.divider());
-    HookupFigures figures =
-        HookupFigures.of(design, hookup).of(Build.nominal(Change.applyAll(design, changes)));
+    DividerCandidate divider = ranked.divider();
+    List<Change> changes = paths.changes(divider.upper().value(), lower(divider));
+    Design changed = Change.applyAll(design, changes);
+    HookupFigures figures = HookupFigures.of(changed, hookup);
     FigureValue gain = figures.solved(figure("closedLoopGain"));
-    double half = GainBand.half(figures, paths(ranked.divider()), stock.tolerance());
-    DividerScore terms =
-        ranked
-            .score()
-            .with(gain.number().isPresent() ? gain.number().getAsDouble() / wanted - 1 : 0, half);
-    FigureValue noise = figures.solved(figure("inputNoise"));
+    double error = gain.number().orElse(Double.NaN) / wanted - 1;
+    double half = GainBand.half(figures, resistors(divider), stock.tolerance());
+    FigureValue margin = figures.solved(figure("phaseMargin"));
+    DividerScore terms = ranked.score().with(error, half, margin.number());
     return new Solved(
-        ranked.divider(),
+        divider,
         changes,
         gain,
+        error,
         half,
+        WorstCase.of(changed, paths, divider, facts.loop(), tolerance()),
         figures.solved(figure("outputOffset")),
-        noise.number().isPresent() ? noise : figures.formula(figure("inputNoise")),
-        current(ranked.divider()),
-        figures.solved(figure("phaseMargin")),
+        terms.offsetVolts(facts),
+        noise(figures),
+        DividerScore.current(facts, divider),
+        margin,
         terms,
-        gain.number().isPresent() ? terms.sum() : Double.MAX_VALUE);
+        Double.isNaN(terms.sum()) ? Double.POSITIVE_INFINITY : terms.sum());
+  }
+
+  private static FigureValue noise(HookupFigures figures) {
+    FigureValue solved = figures.solved(figure("inputNoise"));
+    FigureValue byHand = figures.formula(figure("inputNoise"));
+    return solved.number().isPresent() || byHand.number().isEmpty() ? solved : byHand;
   }
 
   private DividerProposal proposal(Solved solved, String says) {
-    OptionalDouble gain = solved.gain().number();
-    double half =
-        gain.isPresent() && Double.isFinite(solved.halfBand())
-            ? Math.abs(gain.getAsDouble()) * solved.halfBand()
-            : Double.NaN;
+    double gain = solved.gain().number().orElse(Double.NaN);
+    double half = Math.abs(gain) * solved.halfBand();
     return new DividerProposal(
         solved.changes(),
         solved.gain(),
-        Double.isNaN(half) ? OptionalDouble.empty() : OptionalDouble.of(gain.orElse(0) - half),
-        Double.isNaN(half) ? OptionalDouble.empty() : OptionalDouble.of(gain.orElse(0) + half),
+        band(gain - half),
+        band(gain + half),
         solved.offset(),
         solved.noise(),
         solved.current(),
@@ -169,39 +184,20 @@ public final class DividerSizing {
         says);
   }
 
-  private double current(DividerCandidate divider) {
-    double peak = facts.amplitude() > 0 ? Math.abs(wanted) * facts.amplitude() : 1;
-    double resistance = divider.upper().value() + (facts.inverting() ? 0 : divider.lowerOhms());
-    return Double.isInfinite(resistance) || resistance == 0 ? 0 : peak / resistance;
+  private static FigureValue band(double end) {
+    return Double.isFinite(end)
+        ? FigureValue.of(end)
+        : FigureValue.none("a build within the tolerances could not be solved");
   }
 
-  private List<Change> changes(DividerCandidate divider) {
-    List<Change> changes = new ArrayList<>();
-    changes.add(change(at + ".upper", divider.upper().value()));
-    divider.lower().ifPresent(lower -> changes.add(change(lowerPath(), lower.value())));
-    boolean standing = nonInverting() != null && nonInverting().lower().isPresent();
-    if (divider.lower().isEmpty() && standing) {
-      changes.add(new Change(lowerPath(), ""));
-    }
-    return changes;
+  private static OptionalDouble lower(DividerCandidate divider) {
+    return divider.lower().isPresent()
+        ? OptionalDouble.of(divider.lowerOhms())
+        : OptionalDouble.empty();
   }
 
-  private Feedback.NonInverting nonInverting() {
-    return design.hookup(hookup).orElseThrow().feedback() instanceof Feedback.NonInverting divider
-        ? divider
-        : null;
-  }
-
-  private String lowerPath() {
-    return at + (facts.inverting() ? ".inputResistor" : ".lower");
-  }
-
-  private List<String> paths(DividerCandidate divider) {
-    return divider.lower().isEmpty() ? List.of() : List.of(at + ".upper", lowerPath());
-  }
-
-  private static Change change(String path, double value) {
-    return new Change(path, EngineeringFormat.spelling(value, Unit.OHM));
+  private List<String> resistors(DividerCandidate divider) {
+    return divider.lower().isEmpty() ? List.of() : List.of(paths.upper(), paths.lower());
   }
 
   private static Figure figure(String key) {

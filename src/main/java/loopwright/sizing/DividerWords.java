@@ -1,18 +1,68 @@
 package loopwright.sizing;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Collectors;
 import loopwright.quantity.EngineeringFormat;
 import loopwright.quantity.Unit;
 import loopwright.sizing.DividerSizing.Solved;
 
-/** A divider's parts, what it is good at and what it gives up to others, in words. */
+/**
+ * A divider in words: its parts, its worst case, what makes its score, and what it gives up to
+ * others.
+ */
 final class DividerWords {
   /** A term that another divider undercuts by less than this is not worth a word. */
   private static final double WORTH = 0.1;
+
+  /** A term below this does not show in a score of two decimals. */
+  private static final double SHOWN = 0.005;
+
+  private static final int DIGITS = 3;
+
+  /** A term of the score, and what it stands for as a person would read it off an instrument. */
+  private record Term(
+      String name, ToDoubleFunction<Solved> share, Function<Solved, String> reading) {}
+
+  private static final List<Term> TERMS =
+      List.of(
+          new Term(
+              "gain error",
+              one -> one.terms().error(),
+              one -> EngineeringFormat.percent(round(one.gainError()))),
+          new Term(
+              "tolerance band",
+              one -> one.terms().band(),
+              one -> "± " + EngineeringFormat.percent(round(one.halfBand()))),
+          new Term(
+              "load on the output",
+              one -> one.terms().current(),
+              one -> number(one.current(), Unit.AMPERE)),
+          new Term(
+              "offset by the bias currents",
+              one -> one.terms().offset(),
+              one -> number(one.biasOffset(), Unit.VOLT)),
+          new Term(
+              "noise",
+              one -> one.terms().noise(),
+              one -> number(one.noise().number().orElse(0), Unit.VOLT_PER_ROOT_HERTZ)),
+          new Term(
+              "phase margin",
+              one -> one.terms().phase(),
+              one ->
+                  one.margin().number().isPresent()
+                      ? number(one.margin().number().getAsDouble(), Unit.DEGREE)
+                      : "no crossing"),
+          new Term(
+              "number of parts",
+              one -> one.terms().parts(),
+              one -> Integer.toString(one.divider().partCount())));
 
   private DividerWords() {}
 
@@ -26,22 +76,21 @@ final class DividerWords {
     if (one.gain().number().isEmpty()) {
       return parts + ": not solved, " + one.gain().says() + ".";
     }
+    if (!one.isSolved()) {
+      return parts + ": a build within the tolerances could not be solved.";
+    }
     List<String> given = new ArrayList<>();
-    giveUp(solved, one, "gain error", s -> s.terms().error(), given);
-    giveUp(solved, one, "tolerance band", s -> s.terms().band(), given);
-    giveUp(solved, one, "load on the output", s -> s.terms().current(), given);
-    giveUp(solved, one, "offset by the bias current", s -> s.terms().offset(), given);
-    giveUp(solved, one, "noise", s -> s.terms().noise(), given);
-    giveUp(solved, one, "phase at the input capacitance", s -> s.terms().phase(), given);
-    String most =
-        "speaks most against it: "
-            + worst(one)
-            + (given.isEmpty() ? "; no other divider is better in anything" : "");
-    return parts
-        + "; "
-        + most
-        + (given.isEmpty() ? "" : "; gives up " + String.join(", ", given))
-        + ".";
+    TERMS.forEach(term -> giveUp(solved, one, term).ifPresent(given::add));
+    return parts + ". " + worst(one) + "Score: " + score(one) + "." + givenUp(solved, given);
+  }
+
+  private static String givenUp(List<Solved> solved, List<String> given) {
+    if (solved.size() == 1) {
+      return "";
+    }
+    return given.isEmpty()
+        ? " No other of these dividers is better in anything by much."
+        : " Gives up " + String.join("; ", given) + ".";
   }
 
   private static String parts(DividerCandidate divider) {
@@ -52,53 +101,60 @@ final class DividerWords {
   }
 
   private static String worst(Solved one) {
-    DividerScore terms = one.terms();
-    List<String> names =
-        List.of(
-            "gain error",
-            "tolerance band",
-            "load on the output",
-            "offset by the bias current",
-            "noise",
-            "phase at the input capacitance",
-            "number of parts");
-    double[] values = {
-      terms.error(),
-      terms.band(),
-      terms.current(),
-      terms.offset(),
-      terms.noise(),
-      terms.phase(),
-      terms.parts()
-    };
-    int most = 0;
-    for (int i = 1; i < values.length; i++) {
-      most = values[i] > values[most] ? i : most;
+    if (one.divider().lower().isEmpty()) {
+      return "";
     }
-    return names.get(most) + " (" + EngineeringFormat.format(values[most], Unit.ONE, 2) + ")";
+    double gain = one.gain().number().orElseThrow();
+    return "With both resistors at the wrong ends of their tolerances the gain is "
+        + EngineeringFormat.format(gain * one.worst().low(), Unit.ONE)
+        + " or "
+        + EngineeringFormat.format(gain * one.worst().high(), Unit.ONE)
+        + ". ";
   }
 
-  private static void giveUp(
-      List<Solved> solved,
-      Solved one,
-      String what,
-      ToDoubleFunction<Solved> term,
-      List<String> given) {
-    Optional<Solved> better =
-        solved.stream()
-            .filter(other -> other.gain().number().isPresent())
-            .filter(other -> term.applyAsDouble(other) < term.applyAsDouble(one) - WORTH)
-            .min(Comparator.comparingDouble(term));
-    better.ifPresent(
-        other ->
-            given.add(
-                what
+  /** The terms that make it, the largest first. */
+  private static String score(Solved one) {
+    String terms =
+        TERMS.stream()
+            .filter(term -> term.share().applyAsDouble(one) >= SHOWN)
+            .sorted(
+                Comparator.comparingDouble((Term term) -> term.share().applyAsDouble(one))
+                    .reversed())
+            .map(
+                term ->
+                    EngineeringFormat.format(term.share().applyAsDouble(one), Unit.ONE, 2)
+                        + " for "
+                        + term.name()
+                        + " ("
+                        + term.reading().apply(one)
+                        + ")")
+            .collect(Collectors.joining(", "));
+    return terms.isEmpty() ? "nothing speaks against it" : terms;
+  }
+
+  private static Optional<String> giveUp(List<Solved> solved, Solved one, Term term) {
+    double own = term.share().applyAsDouble(one);
+    return solved.stream()
+        .filter(Solved::isSolved)
+        .filter(other -> term.share().applyAsDouble(other) < own - WORTH)
+        .min(Comparator.comparingDouble(term.share()))
+        .map(
+            other ->
+                term.name()
                     + " to "
                     + parts(other.divider())
                     + " ("
-                    + EngineeringFormat.format(term.applyAsDouble(other), Unit.ONE, 2)
+                    + term.reading().apply(other)
                     + " instead of "
-                    + EngineeringFormat.format(term.applyAsDouble(one), Unit.ONE, 2)
-                    + ")"));
+                    + term.reading().apply(one)
+                    + ")");
+  }
+
+  private static String number(double value, Unit unit) {
+    return EngineeringFormat.format(value, unit, DIGITS);
+  }
+
+  private static double round(double fraction) {
+    return new BigDecimal(fraction).round(new MathContext(2)).doubleValue();
   }
 }

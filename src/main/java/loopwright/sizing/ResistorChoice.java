@@ -1,5 +1,7 @@
 package loopwright.sizing;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.List;
 import java.util.stream.Collectors;
 import loopwright.quantity.EngineeringFormat;
@@ -13,6 +15,8 @@ import loopwright.quantity.Unit;
  * @param series whether two parts stand in series, else side by side
  */
 record ResistorChoice(double value, List<Double> parts, boolean series) {
+  private static final int DIGITS = 6;
+
   /** Keeps its own copy. */
   ResistorChoice {
     parts = List.copyOf(parts);
@@ -23,11 +27,16 @@ record ResistorChoice(double value, List<Double> parts, boolean series) {
   }
 
   static ResistorChoice inSeries(double one, double other) {
-    return new ResistorChoice(one + other, List.of(one, other), true);
+    return new ResistorChoice(rounded(one + other), List.of(one, other), true);
   }
 
   static ResistorChoice sideBySide(double one, double other) {
-    return new ResistorChoice(one * other / (one + other), List.of(one, other), false);
+    return new ResistorChoice(rounded(one * other / (one + other)), List.of(one, other), false);
+  }
+
+  /** To six digits, far finer than any part is, so that a person can read and type it. */
+  private static double rounded(double value) {
+    return new BigDecimal(value).round(new MathContext(DIGITS)).doubleValue();
   }
 
   /** How it is made, in words. */

@@ -48,7 +48,7 @@ record ResistorStock(
     return new ResistorStock(
         singles,
         choices,
-        tolerance(series),
+        tolerance(series.equals(DRAWER) ? seriesInDrawer(design) : series),
         series.equals(DRAWER) ? "the drawer" : "series " + series);
   }
 
@@ -62,6 +62,13 @@ record ResistorStock(
       case "E96" -> 0.01;
       default -> 0.05;
     };
+  }
+
+  /** The series that the drawer holds; its own name where it holds single values. */
+  private static String seriesInDrawer(Design design) {
+    return design.drawer().resistors().orElseThrow() instanceof Drawer.Stock.Series held
+        ? held.series()
+        : DRAWER;
   }
 
   private static List<Double> series(String name) {
@@ -80,6 +87,11 @@ record ResistorStock(
       return values.values().stream().map(Quantity::value).sorted().distinct().toList();
     }
     return series(((Drawer.Stock.Series) stock.get()).series());
+  }
+
+  /** Whether a resistance may be made of two parts. */
+  boolean hasTwoParts() {
+    return choices.size() > singles.size();
   }
 
   /** Index of the first choice that is not below a value. */

@@ -19,7 +19,8 @@ class SizeCommandTest {
       {"loopwright": 1, "name": "River gauge", "rails": {"positive": 12, "negative": -12},
        "amplifier": {"kind": "figures", "gain": 500},
        "hookups": [
-        {"name": "divider", "feedback": {"kind": "nonInverting", "upper": "9k", "lower": "1k"}}]}
+        {"name": "divider", "feedback": {"kind": "nonInverting", "upper": "9k", "lower": "1k"}},
+        {"name": "bare", "feedback": {"kind": "open"}}]}
       """;
 
   private static CapturedCall call(String... arguments) {
@@ -62,5 +63,26 @@ class SizeCommandTest {
     assertThat(call("size", "-", "--hookup", "divider", "--gain", "2", "--series", "E7").status())
         .isEqualTo(2);
     assertThat(call("size", "-", "--hookup", "divider", "--gain", "0.5").status()).isEqualTo(1);
+    CapturedCall open = call("size", "-", "--hookup", "bare", "--gain", "11");
+    assertThat(open.status()).isEqualTo(1);
+    assertThat(open.err())
+        .isEqualToIgnoringNewLines(
+            "hookups.bare.feedback: found an open hookup, expected one with feedback");
+    CapturedCall tooMuch = call("size", "-", "--hookup", "divider", "--gain", "600");
+    assertThat(tooMuch.status()).isEqualTo(1);
+    assertThat(tooMuch.err()).contains("expected less than 500");
+  }
+
+  /** A wire for a divider: null takes the lower resistor away. */
+  @Test
+  void aFollowerLosesItsLowerResistor() throws IOException {
+    CapturedCall call = call("size", "-", "--hookup", "divider", "--gain", "1", "--json");
+
+    assertThat(call.status()).isZero();
+    JsonNode changes = new ObjectMapper().readTree(call.out()).at("/dividers/0/changes");
+    assertThat(changes.findValuesAsText("path"))
+        .containsExactly("hookups.divider.feedback.upper", "hookups.divider.feedback.lower");
+    assertThat(changes.at("/0/value").asDouble()).isZero();
+    assertThat(changes.at("/1/value").isNull()).isTrue();
   }
 }

@@ -3,6 +3,7 @@ package loopwright.design;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import java.util.List;
 import java.util.Optional;
 import loopwright.quantity.Quantity;
 import org.junit.jupiter.api.Test;
@@ -35,6 +36,17 @@ class ChangeTest {
         new Change("amplifier.inputPair.emitterResistance.measured", "47.3").applyTo(design);
     assertThat(DesignPath.get(measured, "amplifier.inputPair.emitterResistance.value"))
         .isEqualTo(SampleDesigns.quantity("47"));
+  }
+
+  /** Changes made together may set one thing and take another away. */
+  @Test
+  void changesTogetherMaySetAndTakeAway() {
+    Change set = new Change("hookups.gain.feedback.upper", "0");
+    Change take = new Change("hookups.gain.feedback.lower", "");
+    assertThat(DesignPath.find(design, take.path())).isPresent();
+    Design changed = Change.applyAll(design, List.of(take, set));
+    assertThat(DesignPath.find(changed, take.path())).isEmpty();
+    assertThat(changed).isEqualTo(set.applyTo(take.applyTo(design)));
   }
 
   @ParameterizedTest

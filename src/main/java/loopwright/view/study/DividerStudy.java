@@ -103,8 +103,8 @@ public final class DividerStudy extends Study {
                 .map(value -> Numbers.text(ohms(value), Unit.OHM))
                 .collect(Collectors.joining(" / ")),
             Numbers.text(divider.gain().number(), Unit.ONE),
-            Numbers.text(divider.gainLow(), Unit.ONE),
-            Numbers.text(divider.gainHigh(), Unit.ONE),
+            Numbers.text(divider.gainLow().number(), Unit.ONE),
+            Numbers.text(divider.gainHigh().number(), Unit.ONE),
             Numbers.text(divider.outputOffset().number(), Unit.VOLT),
             Numbers.text(divider.inputNoise().number(), Unit.VOLT_PER_ROOT_HERTZ),
             Numbers.text(divider.dividerCurrent(), Unit.AMPERE),

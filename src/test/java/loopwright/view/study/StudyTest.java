@@ -78,7 +78,7 @@ class StudyTest {
     click(study, "start");
 
     assertThat(table(study).getRowCount()).isGreaterThan(10);
-    assertThat(words(study)).contains("speaks most against it");
+    assertThat(words(study)).contains("Score: ", "Gives up ");
     click(study, "apply");
 
     assertThat(session.snapshot().undoable().orElseThrow()).startsWith("Set the divider");
