@@ -44,6 +44,8 @@ public final class CommandLineProgram {
     line.addSubcommand(new ExplainCommand(services, console));
     line.addSubcommand(new SpreadCommand(services, console));
     line.addSubcommand(new CureCommand(services, console));
+    line.addSubcommand(new NoiseCommand(services, console));
+    line.addSubcommand(new StabilityCommand(services, console));
     line.addSubcommand(new StepCommand(services, console));
     line.addSubcommand(new DistortionCommand(services, console));
     line.setOut(writer(console.out()));
@@ -65,6 +67,8 @@ public final class CommandLineProgram {
         ExplainCommand.NAME,
         SpreadCommand.NAME,
         CureCommand.NAME,
+        NoiseCommand.NAME,
+        StabilityCommand.NAME,
         StepCommand.NAME,
         DistortionCommand.NAME);
   }
