@@ -1,6 +1,7 @@
 package loopwright.numeric;
 
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * A complex system (G + sC) x = b of a fixed pattern, eliminated by a plan that was made once; see
@@ -18,14 +19,15 @@ final class SparseComplexSystem extends SparseSystem implements ComplexSystem {
   SparseComplexSystem(SystemFamily family) {
     super(family, 2);
     this.work = new double[2 * family.pattern().size()];
-    adopt(family.complexPlan());
+    this.entries = new double[0];
   }
 
-  private void adopt(EliminationPlan next) {
-    if (next != null && next != plan) {
-      plan = next;
+  private boolean eliminateBy(EliminationPlan next, double[] g, double[] c, double re, double im) {
+    plan = next;
+    if (entries.length < 2 * next.entries) {
       entries = new double[2 * next.entries];
     }
+    return eliminate(g, c, re, im);
   }
 
   @Override
@@ -37,8 +39,15 @@ final class SparseComplexSystem extends SparseSystem implements ComplexSystem {
     if (!(sum < Double.POSITIVE_INFINITY)) {
       return false;
     }
-    if (plan != null && eliminate(g, c, re, im)) {
+    EliminationPlan last = plan;
+    if (last != null && eliminate(g, c, re, im)) {
       return true;
+    }
+    List<EliminationPlan> plans = family.complexPlans();
+    for (int i = 0; i < plans.size(); i++) {
+      if (plans.get(i) != last && eliminateBy(plans.get(i), g, c, re, im)) {
+        return true;
+      }
     }
     double[] realParts = new double[g.length];
     double[] imaginaryParts = new double[g.length];
@@ -47,11 +56,8 @@ final class SparseComplexSystem extends SparseSystem implements ComplexSystem {
       imaginaryParts[slot] = im * c[slot];
     }
     EliminationPlan fresh = family.analyseComplex(realParts, imaginaryParts);
-    if (fresh != null) {
-      adopt(fresh);
-      if (eliminate(g, c, re, im)) {
-        return true;
-      }
+    if (fresh != null && eliminateBy(fresh, g, c, re, im)) {
+      return true;
     }
     giveUp();
     return denseSystem().factor(g, c, re, im);
@@ -81,7 +87,7 @@ final class SparseComplexSystem extends SparseSystem implements ComplexSystem {
   private boolean eliminate(double[] g, double[] c, double re, double im) {
     double[] a = entries;
     int[] place = plan.place;
-    Arrays.fill(a, 0);
+    Arrays.fill(a, 0, 2 * plan.entries, 0);
     for (int slot = 0; slot < place.length; slot++) {
       double capacitance = c[slot];
       int at = 2 * place[slot];

@@ -1,6 +1,7 @@
 package loopwright.numeric;
 
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * A real system of a fixed pattern, eliminated by a plan that was made once: the numeric
@@ -16,14 +17,15 @@ final class SparseRealSystem extends SparseSystem implements RealSystem {
   SparseRealSystem(SystemFamily family) {
     super(family, 1);
     this.work = new double[family.pattern().size()];
-    adopt(family.realPlan());
+    this.entries = new double[0];
   }
 
-  private void adopt(EliminationPlan next) {
-    if (next != null && next != plan) {
-      plan = next;
+  private boolean eliminateBy(EliminationPlan next, double[] values) {
+    plan = next;
+    if (entries.length < next.entries) {
       entries = new double[next.entries];
     }
+    return eliminate(values);
   }
 
   @Override
@@ -35,15 +37,19 @@ final class SparseRealSystem extends SparseSystem implements RealSystem {
     if (!(sum < Double.POSITIVE_INFINITY)) {
       return false;
     }
-    if (plan != null && eliminate(values)) {
+    EliminationPlan last = plan;
+    if (last != null && eliminate(values)) {
       return true;
     }
-    EliminationPlan fresh = family.analyseReal(values);
-    if (fresh != null) {
-      adopt(fresh);
-      if (eliminate(values)) {
+    List<EliminationPlan> plans = family.realPlans();
+    for (int i = 0; i < plans.size(); i++) {
+      if (plans.get(i) != last && eliminateBy(plans.get(i), values)) {
         return true;
       }
+    }
+    EliminationPlan fresh = family.analyseReal(values);
+    if (fresh != null && eliminateBy(fresh, values)) {
+      return true;
     }
     giveUp();
     return factorDense(values);
@@ -73,7 +79,7 @@ final class SparseRealSystem extends SparseSystem implements RealSystem {
   private boolean eliminate(double[] values) {
     double[] a = entries;
     int[] place = plan.place;
-    Arrays.fill(a, 0);
+    Arrays.fill(a, 0, plan.entries, 0);
     for (int slot = 0; slot < place.length; slot++) {
       a[place[slot]] = values[slot];
     }

@@ -7,12 +7,12 @@ import java.util.Arrays;
  * trusted.
  *
  * <p>The plan's pivots were safe for the matrix that it was made with. For another matrix a
- * multiplier may become large; then the plan is made anew with the present values, and where no
- * safe order is found a dense factorisation with partial pivoting steps in. Where a multiplier is
- * larger than an analysis allows, each solution's residual is watched; one that is more than
- * rounding is solved for in its turn and the solution improved by it (Wilkinson, Rounding Errors in
- * Algebraic Processes, 1963: iterative refinement), and where that does not help the dense
- * factorisation steps in too. All are counted in the {@link SystemFamily}.
+ * multiplier may become large; then other plans of the family are tried, a plan is made anew with
+ * the present values, and where no safe order is found a dense factorisation with partial pivoting
+ * steps in. Where a multiplier is larger than an analysis allows, each solution's residual is
+ * watched; one that is more than rounding is solved for in its turn and the solution improved by it
+ * (Wilkinson, Rounding Errors in Algebraic Processes, 1963: iterative refinement), and where that
+ * does not help the dense factorisation steps in too. All are counted in the {@link SystemFamily}.
  */
 abstract class SparseSystem {
   /** A multiplier above this costs more digits than a new analysis costs time. */

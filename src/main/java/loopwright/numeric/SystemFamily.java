@@ -1,13 +1,20 @@
 package loopwright.numeric;
 
+import java.util.ArrayList;
+import java.util.List;
+
 /**
- * Real and complex systems of one pattern. What one of them learns of a good elimination order
- * serves those that are made after it. Not thread-safe.
+ * Real and complex systems of one pattern. What one of them learns of good elimination orders
+ * serves the others. Not thread-safe.
  */
 public final class SystemFamily {
+  /** A sweep over all frequencies needs two or three. */
+  private static final int MOST_PLANS = 4;
+
   private final SparsityPattern pattern;
-  private EliminationPlan realPlan;
-  private EliminationPlan complexPlan;
+
+  private final List<EliminationPlan> realPlans = new ArrayList<>();
+  private final List<EliminationPlan> complexPlans = new ArrayList<>();
   private int analyses;
   private int denseFallbacks;
   private int refinements;
@@ -54,29 +61,27 @@ public final class SystemFamily {
    * Multiplications with additions in one complex factorisation and solution; 0 before the first.
    */
   public int multiplyAdds() {
-    return complexPlan == null ? 0 : complexPlan.multiplyAdds();
+    return complexPlans.isEmpty() ? 0 : complexPlans.get(0).multiplyAdds();
   }
 
-  EliminationPlan realPlan() {
-    return realPlan;
+  /** Plans for real matrices, the newest first; an analysis changes them. */
+  List<EliminationPlan> realPlans() {
+    return realPlans;
   }
 
-  EliminationPlan complexPlan() {
-    return complexPlan;
+  /** Plans for complex matrices, the newest first; an analysis changes them. */
+  List<EliminationPlan> complexPlans() {
+    return complexPlans;
   }
 
   /** Analyses a real matrix; null when there is no safe order. */
   EliminationPlan analyseReal(double[] values) {
-    EliminationPlan plan = analyse(values, new double[values.length], false);
-    realPlan = plan == null ? realPlan : plan;
-    return plan;
+    return analyse(values, new double[values.length], false, realPlans);
   }
 
   /** Analyses a complex matrix; null when there is no safe order. */
   EliminationPlan analyseComplex(double[] re, double[] im) {
-    EliminationPlan plan = analyse(re, im, true);
-    complexPlan = plan == null ? complexPlan : plan;
-    return plan;
+    return analyse(re, im, true, complexPlans);
   }
 
   void countDenseFallback() {
@@ -87,9 +92,18 @@ public final class SystemFamily {
     refinements++;
   }
 
-  private EliminationPlan analyse(double[] re, double[] im, boolean someLast) {
+  private EliminationPlan analyse(
+      double[] re, double[] im, boolean someLast, List<EliminationPlan> plans) {
     analyses++;
     EliminationOrder order = EliminationOrder.of(pattern, re, im, someLast);
-    return order == null ? null : new EliminationPlan(pattern, order);
+    if (order == null) {
+      return null;
+    }
+    EliminationPlan plan = new EliminationPlan(pattern, order);
+    plans.add(0, plan);
+    if (plans.size() > MOST_PLANS) {
+      plans.remove(MOST_PLANS);
+    }
+    return plan;
   }
 }

@@ -111,8 +111,8 @@ class SystemFamilyTest {
     SystemFamily family = new SystemFamily(marked);
     ComplexSystem complex = family.complex();
     assertThat(complex.factor(g, c, 0, 1)).isTrue();
-    assertThat(family.complexPlan().rowStep[0]).isGreaterThanOrEqualTo(size - 2);
-    assertThat(family.complexPlan().columnStep[5]).isGreaterThanOrEqualTo(size - 2);
+    assertThat(family.complexPlans().get(0).rowStep[0]).isGreaterThanOrEqualTo(size - 2);
+    assertThat(family.complexPlans().get(0).columnStep[5]).isGreaterThanOrEqualTo(size - 2);
     ComplexSystem other = new SystemFamily(plain).complex();
     assertThat(other.factor(g, c, 0, 1)).isTrue();
     double[] x = RandomMatrices.vector(2 * size, new Random(3));
