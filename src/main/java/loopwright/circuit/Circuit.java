@@ -8,9 +8,10 @@ import loopwright.numeric.SparsityPattern;
 import loopwright.numeric.SystemFamily;
 
 /**
- * A circuit of fixed topology and values. Its matrix pattern is analysed once; every evaluation
- * only refills values. Devices keep scratch values, so a circuit serves one thread at a time; so do
- * all circuits together that were built like one another.
+ * A circuit of fixed topology and values, but for the temperatures of its junctions. Its matrix
+ * pattern is analysed once; every evaluation only refills values. Devices keep scratch values, so a
+ * circuit serves one thread at a time; so do all circuits together that were built like one
+ * another.
  */
 public final class Circuit {
   /**
@@ -125,6 +126,25 @@ public final class Circuit {
       throw new NoSuchElementException("the circuit has no " + type.getSimpleName() + " " + name);
     }
     return type.cast(element);
+  }
+
+  /**
+   * Brings the junction of a device to another temperature. States that were solved before are no
+   * solutions any more.
+   *
+   * @param role of the device
+   * @param kelvin K
+   * @throws NoSuchElementException when there is no such device
+   */
+  public void heat(String role, double kelvin) {
+    Element element = byName.get(role);
+    if (element instanceof Transistor transistor) {
+      transistor.heat(kelvin);
+    } else if (element instanceof JunctionDiode diode) {
+      diode.heat(kelvin);
+    } else {
+      throw new NoSuchElementException("the circuit has no device " + role);
+    }
   }
 
   /** Where every device meets the circuit, in the order of the signal path. */

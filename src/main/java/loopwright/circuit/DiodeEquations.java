@@ -10,6 +10,7 @@ import loopwright.part.DiodeParameters;
  * <p>{@link #evaluate} leaves its results in fields, as {@link TransistorEquations} does.
  */
 public final class DiodeEquations {
+  private final DiodeParameters parameters;
   private final double emissionVoltage;
   private final double nominalEmissionVoltage;
   private final double saturationCurrent;
@@ -41,6 +42,7 @@ public final class DiodeEquations {
    * @param shunt conductance across the junction, S
    */
   public DiodeEquations(DiodeParameters parameters, double kelvin, double shunt) {
+    this.parameters = parameters;
     this.emissionVoltage = parameters.ideality() * Physics.thermalVoltage(kelvin);
     this.nominalEmissionVoltage =
         parameters.ideality() * Physics.thermalVoltage(Physics.NOMINAL_TEMPERATURE);
@@ -52,6 +54,11 @@ public final class DiodeEquations {
     this.shunt = shunt;
     this.criticalVoltage =
         emissionVoltage * Math.log(emissionVoltage / (Math.sqrt(2) * saturationCurrent));
+  }
+
+  /** The same diode at another junction temperature, K. */
+  DiodeEquations at(double kelvin) {
+    return new DiodeEquations(parameters, kelvin, shunt);
   }
 
   /**

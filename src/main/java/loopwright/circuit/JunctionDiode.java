@@ -7,7 +7,7 @@ public final class JunctionDiode implements Element {
   private final String role;
   private final int anode;
   private final int cathode;
-  private final DiodeEquations equations;
+  private DiodeEquations equations;
   private final int memory;
   private final TwoTerminalSlots slots;
 
@@ -74,6 +74,11 @@ public final class JunctionDiode implements Element {
         Parameter.JUNCTION_VOLTAGE,
         -equations.conductanceByForwardVoltage(voltage) * conductance
             - equations.capacitanceByForwardVoltage(voltage) * capacitance);
+  }
+
+  /** Brings its junction to another temperature, K. */
+  void heat(double kelvin) {
+    equations = equations.at(kelvin);
   }
 
   @Override

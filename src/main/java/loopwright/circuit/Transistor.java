@@ -17,7 +17,7 @@ public final class Transistor implements Element {
   private final int collector;
   private final int base;
   private final int emitter;
-  private final TransistorEquations equations;
+  private TransistorEquations equations;
   private final int memory;
   private final double flickerCorner;
   private final int[] slots = new int[9];
@@ -157,6 +157,11 @@ public final class Transistor implements Element {
         + by.baseEmitterChargeByBaseCollector * form.capacitance(base, emitter, base, collector)
         + by.baseCollectorChargeByBaseCollector
             * form.capacitance(base, collector, base, collector);
+  }
+
+  /** Brings its junction to another temperature, K. */
+  void heat(double kelvin) {
+    equations = equations.at(kelvin);
   }
 
   @Override

@@ -22,6 +22,7 @@ public final class TransistorEquations {
   /** Shunt conductance across each junction that keeps the equations regular, S. */
   public static final double SHUNT = 1e-13;
 
+  private final TransistorParameters parameters;
   final double thermalVoltage;
   final double saturationCurrent;
   final double forwardBeta;
@@ -69,6 +70,7 @@ public final class TransistorEquations {
    * @param shunt conductance across each junction, S
    */
   public TransistorEquations(TransistorParameters parameters, double kelvin, double shunt) {
+    this.parameters = parameters;
     double beta = Physics.betaFactor(kelvin);
     double growth = Physics.saturationCurrentFactor(kelvin);
     this.thermalVoltage = Physics.thermalVoltage(kelvin);
@@ -88,6 +90,11 @@ public final class TransistorEquations {
     this.shunt = shunt;
     this.criticalVoltage =
         thermalVoltage * Math.log(thermalVoltage / (Math.sqrt(2) * saturationCurrent));
+  }
+
+  /** The same transistor at another junction temperature, K. */
+  TransistorEquations at(double kelvin) {
+    return new TransistorEquations(parameters, kelvin, shunt);
   }
 
   /**

@@ -6,7 +6,9 @@ import java.util.Optional;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.Assembler;
 import loopwright.assembly.DeviceModels;
+import loopwright.assembly.Temperatures;
 import loopwright.circuit.CircuitState;
+import loopwright.circuit.DeviceTerminals;
 import loopwright.design.Design;
 import loopwright.design.Hookup;
 import loopwright.solve.OperatingPoint;
@@ -69,13 +71,22 @@ record RestSolution(
                   "thermal runaway: the junction of " + role + " finds no rest");
             }
           });
-      solution = solver.at(next, Optional.of(solution));
+      solution = solver.heated(next, solution);
     }
     throw new UnsolvedException("the junction temperatures do not settle");
   }
 
   /** Solves one hookup at given junction temperatures. */
   private record Solver(Design design, Hookup hookup, DeviceModels models, JunctionHeat heat) {
+    /** The same circuit with its junctions at other temperatures; what it was is given up. */
+    RestSolution heated(Map<String, Double> kelvins, RestSolution before) {
+      CircuitState state = before.state().copy();
+      RestSolution.heat(before.hookup(), heat.temperatures(kelvins));
+      return OperatingPointSolver.solvedNear(state)
+          ? new RestSolution(before.hookup(), state, before.remark(), kelvins)
+          : at(kelvins, Optional.of(before));
+    }
+
     RestSolution at(Map<String, Double> kelvins, Optional<RestSolution> near) {
       AssembledHookup assembled =
           Assembler.assemble(
@@ -88,6 +99,12 @@ record RestSolution(
         return new RestSolution(assembled, found.state(), remark, kelvins);
       }
       throw new UnsolvedException(((OperatingPoint.NotFound) point).reason());
+    }
+  }
+
+  private static void heat(AssembledHookup hookup, Temperatures temperatures) {
+    for (DeviceTerminals device : hookup.circuit().devices()) {
+      hookup.circuit().heat(device.role(), temperatures.kelvin(device.role()));
     }
   }
 

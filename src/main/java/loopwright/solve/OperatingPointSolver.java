@@ -62,6 +62,16 @@ public final class OperatingPointSolver {
   }
 
   /**
+   * Newton's method alone, from a state whose circuit has changed a little.
+   *
+   * @param state start on entry, solution on return
+   * @return whether it converged; if not, the state is where it stopped
+   */
+  public static boolean solvedNear(CircuitState state) {
+    return new StaticSolver(state.circuit()).solve(state, NEAR_STEPS);
+  }
+
+  /**
    * Solves again from a state whose conditions have changed a little: Newton from there, and where
    * that fails by letting the circuit settle.
    *
