@@ -45,6 +45,11 @@ public final class Studies {
     show("cure", CureStudy::new);
   }
 
+  /** Stability against one value after the other. */
+  public void stability() {
+    show("stability", StabilityStudy::new);
+  }
+
   /** Bands for the tolerances. */
   public void spread() {
     show("spread", SpreadStudy::new);

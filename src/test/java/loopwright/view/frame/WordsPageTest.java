@@ -31,6 +31,7 @@ import loopwright.view.study.CureStudy;
 import loopwright.view.study.Desk;
 import loopwright.view.study.DividerStudy;
 import loopwright.view.study.SpreadStudy;
+import loopwright.view.study.StabilityStudy;
 import loopwright.view.study.WholeStudy;
 import loopwright.view.theme.Theme;
 import org.junit.jupiter.api.Test;
@@ -101,6 +102,7 @@ class WordsPageTest {
             new DividerStudy(desk),
             new CureStudy(desk),
             new SpreadStudy(desk),
+            new StabilityStudy(desk),
             new BenchStudy(desk),
             new WholeStudy(desk, shelf))) {
       studyWords(study, words);

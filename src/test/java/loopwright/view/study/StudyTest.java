@@ -148,6 +148,15 @@ class StudyTest {
   }
 
   @Test
+  void stabilityIsShownAgainstOneValueAfterTheOther() {
+    StabilityStudy study = new StabilityStudy(desk(session("measured-amplifier")));
+    click(study, "start");
+    assertThat(table(study).getRowCount()).isGreaterThan(30);
+    assertThat(words(study)).contains("Load capacitance: ");
+    Painting.of(study, 980, 560).save("study.stability-light");
+  }
+
+  @Test
   void bandsAreSampled() {
     SpreadStudy study = new SpreadStudy(desk(session("measured-amplifier")));
     Lookup.named(study, "samples", JTextField.class).setText("60");

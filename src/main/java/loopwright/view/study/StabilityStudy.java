@@ -1,0 +1,78 @@
+package loopwright.view.study;
+
+import java.util.ArrayList;
+import java.util.List;
+import javax.swing.JButton;
+import javax.swing.JLabel;
+import loopwright.quantity.Unit;
+import loopwright.session.Snapshot;
+import loopwright.sizing.StabilitySweep;
+import loopwright.view.theme.Theme;
+
+/** Worst margin and growth of the whole swing against one value after the other. */
+public final class StabilityStudy extends Study {
+  private static final List<String> COLUMNS =
+      List.of("Varied value", "Value", "Verdict", "Margin", "Growth", "Frequency");
+
+  private final transient Desk desk;
+  private final JLabel where = Theme.style(new JLabel(), "quiet");
+  private final WorkBar bar;
+  private final ProposalTable table;
+
+  /**
+   * @param desk the window's session
+   */
+  public StabilityStudy(Desk desk) {
+    super("Stability");
+    this.desk = desk;
+    bar = new WorkBar(desk.runners().get(), "Vary values", 'V', this::find);
+    table = new ProposalTable("Stability", COLUMNS, proposal -> {}).withoutApply();
+    where.setName("where");
+    add(where);
+    add(bar);
+    add(table, "hmin 240");
+    table.show(
+        List.of(),
+        "Load capacitance, compensation, stray capacitance, supply lead inductance and the divider's"
+            + " upper resistor are varied one after the other; each row is the worst of the whole"
+            + " swing, and the present value is marked.");
+    show(desk.now().get());
+  }
+
+  @Override
+  public void show(Snapshot snapshot) {
+    where.setText("in hookup " + snapshot.hookup());
+  }
+
+  @Override
+  public JButton defaultButton() {
+    return bar.startButton();
+  }
+
+  private void find() {
+    Snapshot now = desk.now().get();
+    bar.run(progress -> StabilitySweep.of(now.design(), now.hookup(), progress), this::showSweeps);
+  }
+
+  private void showSweeps(List<StabilitySweep> sweeps) {
+    List<Proposal> rows = new ArrayList<>();
+    String says = String.join(".\n", sweeps.stream().map(StabilitySweep::says).toList()) + ".";
+    for (StabilitySweep sweep : sweeps) {
+      sweep.points().forEach(point -> rows.add(row(sweep, point, says)));
+    }
+    table.show(rows, says);
+  }
+
+  private static Proposal row(StabilitySweep sweep, StabilitySweep.Point point, String says) {
+    return new Proposal(
+        List.of(
+            sweep.what() + (point.present() ? ", present" : ""),
+            Numbers.text(point.value(), sweep.unit()),
+            point.stable() ? "stable" : "grows",
+            Numbers.text(point.phaseMargin(), Unit.DEGREE),
+            Numbers.text(point.growth(), Unit.PER_SECOND),
+            Numbers.text(point.frequency(), Unit.HERTZ)),
+        says,
+        List.of());
+  }
+}
