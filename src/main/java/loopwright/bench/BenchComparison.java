@@ -14,6 +14,12 @@ public final class BenchComparison {
   /** Coverage factor of a prediction's band. */
   private static final double FACTOR = 2;
 
+  /**
+   * No reading is believed closer than this share of its spread: first-order propagation is not,
+   * and readings that repeat one another would else weigh by rounding.
+   */
+  private static final double LEAST_OWN = 1e-3;
+
   private final Design design;
   private final PredictedReadings predicted;
   private final List<MeasuredValue> measured;
@@ -108,7 +114,8 @@ public final class BenchComparison {
           (measured.get(i).value() - predicted.nominal(i).number().orElseThrow()) / spread(i);
       for (int column = 0; column < count; column++) {
         int j = judged.get(column);
-        double sum = row == column ? square(measured.get(i).uncertainty().standard()) : 0;
+        double own = measured.get(i).uncertainty().standard();
+        double sum = row == column ? square(own) + square(LEAST_OWN * spread(i)) : 0;
         for (int part = 0; part < predicted.parts().size(); part++) {
           sum += predicted.moves(i)[part] * predicted.moves(j)[part];
         }

@@ -15,7 +15,7 @@ import loopwright.predict.TolerancedParts;
  */
 record DriftFit(
     double deviation, Evidence.Fit fit, double logEvidence, FaultyReadings.Shown shown) {
-  private static final int STEPS = 24;
+  private static final int STEPS = 14;
   private static final double GOLDEN = (Math.sqrt(5) - 1) / 2;
   private static final double FAR = 2.5;
 

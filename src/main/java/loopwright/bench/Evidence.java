@@ -2,9 +2,13 @@ package loopwright.bench;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
 import loopwright.design.Design;
 import loopwright.design.Reading;
 import loopwright.numeric.Cholesky;
+import loopwright.predict.Catalogue;
+import loopwright.predict.CostClass;
+import loopwright.predict.Figure;
 import loopwright.predict.TolerancedPart;
 import loopwright.quantity.Unit;
 
@@ -18,6 +22,19 @@ final class Evidence {
 
   /** Beyond what is predicted a reading may be anywhere within this many times its value. */
   private static final double ANYWHERE = 10;
+
+  private static final Set<String> TOO_LONG =
+      Set.of(
+          "worstPhaseMargin",
+          "worstGrowth",
+          "oscillationFrequency",
+          "clipHigh",
+          "clipLow",
+          "hottestJunction",
+          "shortCircuitCurrent",
+          "offsetDrift",
+          "inputNoise",
+          "outputNoise");
 
   /** Keeps readings that repeat one another from making the covariance singular. */
   private static final double TINY = 1e-9;
@@ -38,7 +55,8 @@ final class Evidence {
         readings.stream().map(reading -> MeasuredValue.of(design, reading)).toList();
     for (int i = 0; i < readings.size(); i++) {
       boolean isKnown = predicted.standard(i).isPresent();
-      if (isKnown && both(values.get(i), i) > 0 && readings.get(i).hookup().isPresent()) {
+      boolean isUsed = isKnown && both(values.get(i), i) > 0;
+      if (isUsed && readings.get(i).hookup().isPresent() && isQuick(readings.get(i))) {
         judged.add(i);
       }
     }
@@ -63,6 +81,18 @@ final class Evidence {
         covariance[row][column] = sum / spread[row] / spread[column];
       }
     }
+  }
+
+  /**
+   * Whether hundreds of faults can be solved for it: figures of the whole swing, of drift and of
+   * noise take too long.
+   */
+  private static boolean isQuick(Reading reading) {
+    return !TOO_LONG.contains(reading.quantity())
+        && Catalogue.find(reading.quantity())
+            .map(Figure::cost)
+            .filter(cost -> cost == CostClass.TIME)
+            .isEmpty();
   }
 
   private double both(MeasuredValue value, int reading) {

@@ -29,7 +29,7 @@ public final class FaultSearch {
   private static final double NONE_OF_THESE = 0.05;
 
   /** Drifts that the first-order estimate ranks below so many others are not searched. */
-  private static final int DRIFTS = 8;
+  private static final int DRIFTS = 6;
 
   private static final int SHOWN = 12;
   private static final double LEAST_SHOWN = 1e-4;
@@ -211,7 +211,8 @@ public final class FaultSearch {
         evidence.count()
             + " readings, "
             + hypotheses.size()
-            + " explanations that compete; single faults only.");
+            + " explanations that compete; single faults only; figures of the whole swing, of drift, of"
+            + " noise and of the time domain are left out.");
   }
 
   private List<String> alike(Hypothesis one) {
