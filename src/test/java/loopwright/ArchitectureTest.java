@@ -109,6 +109,10 @@ class ArchitectureTest {
             HouseRules::commandLineLibraryOnlyInCommand,
             "planted.solve.UsesForeignLibraries"),
         breach(
+            "PDF and SVG libraries only in sheet",
+            HouseRules::paperLibrariesOnlyInSheet,
+            "planted.solve.UsesForeignLibraries"),
+        breach(
             "form layout only in view",
             HouseRules::formLayoutOnlyInView,
             "planted.solve.UsesForeignLibraries"),

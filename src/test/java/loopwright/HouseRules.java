@@ -93,6 +93,17 @@ final class HouseRules {
     return onlyIn("command", "everything else is called with values, not with words", "picocli..");
   }
 
+  ArchRule paperLibrariesOnlyInSheet() {
+    return onlyIn(
+        "sheet",
+        "drawings know only a Graphics2D, so that one drawing serves screen, PDF and SVG",
+        "org.apache.pdfbox..",
+        "org.apache.fontbox..",
+        "de.rototor.pdfbox..",
+        "org.apache.batik..",
+        "org.apache.xmlgraphics..");
+  }
+
   ArchRule formLayoutOnlyInView() {
     return onlyIn("view", "only the window lays out forms", "net.miginfocom..");
   }
@@ -132,12 +143,12 @@ final class HouseRules {
         .because("two designs open at once, and two tests at once, must not see each other");
   }
 
-  private ArchRule onlyIn(String home, String reason, String library) {
+  private ArchRule onlyIn(String home, String reason, String... libraries) {
     return noClasses()
         .that(house.outside(home))
         .should()
         .dependOnClassesThat()
-        .resideInAPackage(library)
+        .resideInAnyPackage(libraries)
         .because(reason);
   }
 

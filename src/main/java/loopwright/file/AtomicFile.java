@@ -15,7 +15,7 @@ import java.nio.file.attribute.PosixFileAttributeView;
 import java.util.UUID;
 
 /** Writes a file so that at every moment either the old one or the new one is there, whole. */
-final class AtomicFile {
+public final class AtomicFile {
   private AtomicFile() {}
 
   /**
@@ -24,22 +24,32 @@ final class AtomicFile {
    * @throws FileException when it cannot; what was there before is then untouched
    */
   static void write(Path file, String text) {
+    write(file, text.getBytes(StandardCharsets.UTF_8));
+  }
+
+  /**
+   * Writes bytes. A link is followed, permissions of an existing file are kept.
+   *
+   * @param content not modified
+   * @throws FileException when it cannot; what was there before is then untouched
+   */
+  public static void write(Path file, byte[] content) {
     if (Files.isDirectory(file)) {
       throw new FileException(file + ": found a folder, expected the name of a file to write");
     }
     try {
-      replace(Files.exists(file) ? file.toRealPath() : file.toAbsolutePath(), text);
+      replace(Files.exists(file) ? file.toRealPath() : file.toAbsolutePath(), content);
     } catch (IOException e) {
       throw unwritable(file, e);
     }
   }
 
-  private static void replace(Path file, String text) throws IOException {
+  private static void replace(Path file, byte[] content) throws IOException {
     Path beside = file.resolveSibling("." + UUID.randomUUID() + ".part");
     try {
       try (FileChannel channel =
           FileChannel.open(beside, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE)) {
-        ByteBuffer bytes = ByteBuffer.wrap(text.getBytes(StandardCharsets.UTF_8));
+        ByteBuffer bytes = ByteBuffer.wrap(content);
         while (bytes.hasRemaining()) {
           channel.write(bytes);
         }

@@ -3,6 +3,8 @@ package planted.solve;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.formdev.flatlaf.FlatLightLaf;
 import net.miginfocom.layout.CC;
+import org.apache.batik.svggen.SVGGraphics2D;
+import org.apache.pdfbox.pdmodel.PDDocument;
 import org.ejml.data.DMatrixRMaj;
 import org.jfree.chart.JFreeChart;
 import picocli.CommandLine;
@@ -14,4 +16,6 @@ record UsesForeignLibraries(
     JFreeChart chart,
     FlatLightLaf look,
     CommandLine line,
-    CC constraint) {}
+    CC constraint,
+    PDDocument paper,
+    SVGGraphics2D vectors) {}
