@@ -18,6 +18,15 @@ import loopwright.circuit.CircuitState;
 public final class Continuation {
   private static final int CORRECTOR_STEPS = 12;
 
+  /**
+   * A node further from ground than this, V, is driven by a current that nothing takes up; there
+   * the error counts as a share of its voltage, or the walk would never end.
+   */
+  private static final double ORDINARY = 1e3;
+
+  /** A walk to one value that takes more steps leads nowhere. */
+  private static final int MOST_STEPS = 50_000;
+
   /** Shortest step, as a share of the drive's scale. */
   private static final double SHORTEST = 1e-11;
 
@@ -50,7 +59,8 @@ public final class Continuation {
    * @param state solved; it moves with the walk
    * @param drive what moves
    * @param scale typical size of the drive's values, in its unit
-   * @param largestError largest accepted distance between prediction and solution at any node, V
+   * @param largestError largest accepted distance between prediction and solution at any node, V;
+   *     at a node beyond 1000 V that share of a thousandth of its voltage
    */
   Continuation(
       StaticSolver solver, CircuitState state, Drive drive, double scale, double largestError) {
@@ -92,8 +102,8 @@ public final class Continuation {
    *     its last point
    */
   public boolean advance(double target) {
-    while (drive() != target) {
-      if (!step(target)) {
+    for (int steps = 0; drive() != target; steps++) {
+      if (steps == MOST_STEPS || !step(target)) {
         return false;
       }
     }
@@ -150,7 +160,7 @@ public final class Continuation {
     double length = Math.copySign(SLIDE / steepest(), target - from);
     for (int i = 0; i < SHORTENINGS; i++) {
       predict(from + length, length);
-      boolean solved = solver.solveInPlane(state, drive, tangent, CORRECTOR_STEPS);
+      boolean solved = solver.solveInPlane(state, drive, tangent, 1, CORRECTOR_STEPS);
       boolean onward = (drive() - from) * length > 0 && (target - drive()) * length > 0;
       if (solved && onward && judge() <= largestError) {
         stride = Math.abs(length);
@@ -192,7 +202,9 @@ public final class Continuation {
   private double judge() {
     double error = 0;
     for (int node = 0; node < state.circuit().nodes(); node++) {
-      error = Math.max(error, Math.abs(state.unknowns()[node] - predicted[node]));
+      double volts = state.unknowns()[node];
+      double beyond = Math.max(1, Math.abs(volts) / ORDINARY);
+      error = Math.max(error, Math.abs(volts - predicted[node]) / beyond);
     }
     if (error > largestError) {
       return error;

@@ -13,9 +13,13 @@ public final class OperatingPointSolver {
   private static final double SOURCE_PATH_ERROR = 0.3;
   private static final int NEAR_STEPS = 20;
   private static final int MOST_JUMPS = 5;
+  private static final int MOST_FOLDED_STEPS = 5000;
 
   /** How far beyond a fold the jump is followed, as a share of the supply. */
   private static final double BEYOND_FOLD = 1e-3;
+
+  /** A node further from ground than this, V, is no place where a circuit rests. */
+  private static final double FAR_AWAY = 10e3;
 
   private OperatingPointSolver() {}
 
@@ -28,20 +32,24 @@ public final class OperatingPointSolver {
       return settled(solver, 0);
     }
     StringBuilder remark = new StringBuilder();
+    CircuitState fold = null;
     for (int jumps = 0; jumps <= MOST_JUMPS; jumps++) {
       Continuation path = new Continuation(solver, state, Drive.sources(), 1, SOURCE_PATH_ERROR);
       if (follow(path)) {
         return new OperatingPoint.Found(state, remark.toString());
       }
       double reached = state.sourceScale();
+      if (fold == null) {
+        fold = state.copy();
+      }
       remark.append(remark.isEmpty() ? "the path from all sources at zero jumps at " : " and ");
       remark.append(Math.round(100 * reached)).append(" % of the supply");
       state.setSourceScale(Math.min(1, reached + BEYOND_FOLD));
       if (!Settling.settle(solver, state)) {
-        return settled(solver, reached);
+        break;
       }
     }
-    return settled(solver, state.sourceScale());
+    return throughFolds(solver, fold);
   }
 
   /**
@@ -88,6 +96,19 @@ public final class OperatingPointSolver {
     return Settling.settle(solver, state);
   }
 
+  /** Where settling after a jump fails: along the curve through its folds, from the first one. */
+  private static OperatingPoint throughFolds(StaticSolver solver, CircuitState fold) {
+    double reached = fold.sourceScale();
+    if (new FoldedPath(solver, fold, Drive.sources()).follow(1, MOST_FOLDED_STEPS)) {
+      return new OperatingPoint.Found(
+          fold,
+          "the path from all sources at zero turns back at "
+              + Math.round(100 * reached)
+              + " % of the supply and was followed until it came to full supply");
+    }
+    return settled(solver, reached);
+  }
+
   private static boolean follow(Continuation path) {
     try {
       return path.advance(1);
@@ -107,8 +128,26 @@ public final class OperatingPointSolver {
     return new OperatingPoint.NotFound(
         "no operating point found: the sources could be raised to "
             + where
-            + ", and the currents at node "
-            + solver.worstNode(state)
-            + " do not balance");
+            + ", and "
+            + unresolved(solver, state));
+  }
+
+  /** Why a state is no solution. */
+  private static String unresolved(StaticSolver solver, CircuitState state) {
+    int farthest = 0;
+    for (int node = 1; node < state.circuit().nodes(); node++) {
+      if (Math.abs(state.voltage(node)) > Math.abs(state.voltage(farthest))) {
+        farthest = node;
+      }
+    }
+    double volts = state.voltage(farthest);
+    return Math.abs(volts) > FAR_AWAY
+        ? "nothing takes up the current at node "
+            + state.circuit().nodeName(farthest)
+            + ", which it drives beyond "
+            + (volts < 0 ? "−" : "")
+            + Math.round(FAR_AWAY / 1000)
+            + " kV"
+        : "the currents at node " + solver.worstNode(state) + " do not balance";
   }
 }

@@ -21,6 +21,9 @@ public final class StaticSolver {
   private static final double LEAST_CURRENT = 1e-15;
   private static final double CONDUCTED = 1e-15;
 
+  /** Spacings of a double that a step may be long and yet be rounding. */
+  private static final double ROUNDED = 4;
+
   /** Below this a step that does not converge is rounding, V. */
   private static final double NEAR = 1e-6;
 
@@ -99,11 +102,13 @@ public final class StaticSolver {
    *
    * @param state start on entry, solution and stamps there on return
    * @param drive what moves with the unknowns
-   * @param direction change of every unknown per unit of the drive; not modified
+   * @param direction unknowns' part of the normal; not modified
+   * @param driveDirection the drive's part of the normal
    * @param most iterations at the most
    * @return whether it converged; if not, the unknowns are where it stopped
    */
-  boolean solveInPlane(CircuitState state, Drive drive, double[] direction, int most) {
+  boolean solveInPlane(
+      CircuitState state, Drive drive, double[] direction, double driveDirection, int most) {
     double[] unknowns = state.unknowns();
     double distance = 0;
     lastStep = Double.POSITIVE_INFINITY;
@@ -125,7 +130,7 @@ public final class StaticSolver {
       system.solve(step);
       system.solve(byDrive);
       double along = along(direction, byDrive);
-      double moved = -(distance + along(direction, step)) / (1 + along);
+      double moved = -(distance + along(direction, step)) / (driveDirection + along);
       for (int k = 0; k < step.length; k++) {
         step[k] += moved * byDrive[k];
       }
@@ -134,7 +139,7 @@ public final class StaticSolver {
         return false;
       }
       drive.set(state, drive.get(state) + moved);
-      distance += along(direction, step) + moved;
+      distance += along(direction, step) + driveDirection * moved;
     }
     return false;
   }
@@ -183,7 +188,8 @@ public final class StaticSolver {
     return false;
   }
 
-  private double along(double[] direction, double[] vector) {
+  /** Scalar product over the nodes. */
+  double along(double[] direction, double[] vector) {
     double sum = 0;
     for (int node = 0; node < circuit.nodes(); node++) {
       sum += direction[node] * vector[node];
@@ -228,8 +234,14 @@ public final class StaticSolver {
 
   private double move(double[] unknowns) {
     double largest = 0;
+    double counted = 0;
     for (int node = 0; node < circuit.nodes(); node++) {
-      largest = Math.max(largest, Math.abs(step[node]));
+      double size = Math.abs(step[node]);
+      largest = Math.max(largest, size);
+      // What a double cannot tell from the voltage itself is no step: a current that nothing takes
+      // up can drive a node to millions of volts.
+      double noise = ROUNDED * Math.ulp(unknowns[node]);
+      counted = Math.max(counted, noise > STEP ? size * (STEP / noise) : size);
     }
     if (Double.isNaN(largest) || Arrays.stream(step).anyMatch(Double::isNaN)) {
       return Double.NaN;
@@ -238,7 +250,7 @@ public final class StaticSolver {
     for (int i = 0; i < unknowns.length; i++) {
       unknowns[i] += scale * step[i];
     }
-    return largest;
+    return counted;
   }
 
   private boolean isBalanced(CircuitState state) {

@@ -11,21 +11,24 @@ final class RandomAmplifiers {
   private final Dice dice;
   private final Rails rails;
   private final Polarity pair;
+  private final CurrentRange currents;
   private final double half;
 
   /**
    * @param pair polarity of the pair
+   * @param currents of tail and gain stage
    */
-  RandomAmplifiers(Dice dice, Rails rails, Polarity pair) {
+  RandomAmplifiers(Dice dice, Rails rails, Polarity pair, CurrentRange currents) {
     this.dice = dice;
     this.rails = rails;
     this.pair = pair;
+    this.currents = currents;
     this.half = (rails.positive().value() - rails.negative().value()) / 2;
   }
 
   StagesAmplifier amplifier() {
-    double tailCurrent = dice.spread(0.2e-3, 3e-3);
-    double gainCurrent = dice.spread(0.7e-3, 8e-3);
+    double tailCurrent = dice.spread(currents.leastTail(), currents.mostTail());
+    double gainCurrent = dice.spread(currents.leastGain(), currents.mostGain());
     boolean buffered = dice.chance(0.25);
     double degeneration = dice.chance(0.6) ? dice.spread(20, 0.8 / gainCurrent) : 0;
     double drop = (buffered ? 2 : 1) * DROP + gainCurrent * degeneration;

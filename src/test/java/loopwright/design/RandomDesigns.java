@@ -26,15 +26,19 @@ public final class RandomDesigns {
 
   /** One design of three stages with the one hookup {@code main}. */
   public static Design of(long seed) {
-    Dice dice = new Dice(seed);
+    return of(new Dice(seed), "random design " + seed, CurrentRange.ORDINARY);
+  }
+
+  /** One design of three stages with the one hookup {@code main}, from dice already thrown. */
+  static Design of(Dice dice, String name, CurrentRange currents) {
     Rails rails = rails(dice);
     Polarity pair = dice.one(Polarity.NPN, Polarity.PNP);
     RandomParts parts = new RandomParts(dice);
     Map<String, PartRecord> records = parts.records();
-    StagesAmplifier amplifier = new RandomAmplifiers(dice, rails, pair).amplifier();
+    StagesAmplifier amplifier = new RandomAmplifiers(dice, rails, pair, currents).amplifier();
     return new Design(
         Design.VERSION,
-        "random design " + seed,
+        name,
         Optional.empty(),
         rails,
         surroundings(dice),

@@ -3,10 +3,7 @@ package loopwright.laws;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
-import java.util.HashSet;
 import java.util.Set;
-import java.util.stream.Collectors;
-import java.util.stream.Stream;
 import loopwright.assembly.AssembledHookup;
 import loopwright.circuit.CircuitState;
 import loopwright.design.Design;
@@ -26,8 +23,8 @@ class CurrentBalanceTest {
     for (Design design : RandomDesigns.of(DESIGNS).toList()) {
       AssembledHookup hookup = Solved.assembled(design);
       CircuitState rest = Solved.atRest(hookup);
-      Wiring wiring = wiring(design);
-      CurrentSum sum = checkNodes(hookup, rest, wiring, fed(wiring));
+      Wiring wiring = Wiring.of(design);
+      CurrentSum sum = checkNodes(hookup, rest, wiring, wiring.fed());
       checkSupply(hookup, rest, sum, wiring, "ideal.positive", 1);
       checkSupply(hookup, rest, sum, wiring, "ideal.negative", -1);
       for (String device : new String[] {"pair.q1", "pair.q2", "gain.q1"}) {
@@ -45,8 +42,8 @@ class CurrentBalanceTest {
       AssembledHookup hookup = Solved.assembled(design);
       CircuitState rest = Solved.atRest(hookup);
       rest.holdBlockingCapacitors();
-      Wiring wiring = wiring(design);
-      Set<String> leftOut = fed(wiring);
+      Wiring wiring = Wiring.of(design);
+      Set<String> leftOut = wiring.fed();
       for (Wiring.Capacitance capacitor : wiring.capacitances()) {
         if (capacitor.blocking()) {
           leftOut.add(wiring.node(capacitor.from()));
@@ -62,20 +59,6 @@ class CurrentBalanceTest {
     }
   }
 
-  private static Wiring wiring(Design design) {
-    Wiring wiring = new Wiring();
-    new HookupWiring(design, design.hookups().get(0), wiring).add();
-    new StageWiring(design, wiring).add();
-    return wiring;
-  }
-
-  /** Nodes that a source feeds. */
-  private static Set<String> fed(Wiring wiring) {
-    return Stream.of("ground", "generator", "ideal.positive", "ideal.negative")
-        .map(wiring::node)
-        .collect(Collectors.toCollection(HashSet::new));
-  }
-
   private static CurrentSum checkNodes(
       AssembledHookup hookup, CircuitState state, Wiring wiring, Set<String> leftOut) {
     CurrentSum sum = new CurrentSum(hookup, state, wiring);
@@ -83,10 +66,9 @@ class CurrentBalanceTest {
         .forEach(
             (name, node) -> {
               if (!leftOut.contains(name)) {
-                // Half as much again for what two ways of rounding leave.
                 assertThat(Math.abs(node.leaving()))
                     .as("%s at %s", hookup.design().name(), name)
-                    .isLessThanOrEqualTo(1.5 * node.allowed());
+                    .isLessThanOrEqualTo(CurrentSum.ROUNDED_TWICE * node.allowed());
               }
             });
     assertThat(sum.nodes()).hasSizeGreaterThan(8);

@@ -35,6 +35,9 @@ final class CurrentSum {
     }
   }
 
+  /** By how much two ways of rounding may exceed what is allowed. */
+  static final double ROUNDED_TWICE = 1.5;
+
   private static final double SHUNT = 1e-13;
 
   private final AssembledHookup hookup;

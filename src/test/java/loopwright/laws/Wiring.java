@@ -2,8 +2,13 @@ package loopwright.laws;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import loopwright.design.Design;
 
 /**
  * What is connected to what: a plain list of parts between named nodes, kept apart from the
@@ -31,6 +36,21 @@ final class Wiring {
   private final List<DiodeAt> diodes = new ArrayList<>();
   private final List<Current> currents = new ArrayList<>();
   private final Map<String, String> sameAs = new HashMap<>();
+
+  /** What the parts of a design and its first hookup are connected to. */
+  static Wiring of(Design design) {
+    Wiring wiring = new Wiring();
+    new HookupWiring(design, design.hookups().get(0), wiring).add();
+    new StageWiring(design, wiring).add();
+    return wiring;
+  }
+
+  /** Nodes that a source feeds. */
+  Set<String> fed() {
+    return Stream.of("ground", "generator", "ideal.positive", "ideal.negative")
+        .map(this::node)
+        .collect(Collectors.toCollection(HashSet::new));
+  }
 
   List<Resistance> resistances() {
     return resistances;
