@@ -17,12 +17,14 @@ public final class Findings {
           new DcPathCheck(),
           new RecordLimitsCheck(),
           new HotJunctionCheck(),
+          new RunawayCheck(),
           new RailsCheck(),
           new ReverseJunctionCheck(),
           new BuildLimitsCheck(),
           new PairBalanceCheck(),
           new DividerLoadCheck(),
           new LoopGainCheck(),
+          new SlewCheck(),
           new SolveNoteCheck());
 
   private Findings() {}

@@ -1,14 +1,14 @@
 package loopwright.check;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
-import java.util.Map;
+import java.util.Set;
 import loopwright.design.Design;
 import loopwright.predict.DeviceState;
 import loopwright.predict.HookupPrediction;
-import loopwright.predict.RestState;
 
-/** A transistor that is saturated at rest, or close to it. */
+/** A transistor that is saturated at rest or at an end of the signal, or close to it. */
 final class SaturationCheck implements Check {
   /** Below this a small transistor is saturated; common practice, no source. */
   private static final double SATURATED = 0.25;
@@ -16,22 +16,54 @@ final class SaturationCheck implements Check {
   /** Below this little is left before it saturates; common practice, no source. */
   private static final double CLOSE = 0.5;
 
+  private static final String REST = "at rest";
+
   /** A device that carries less takes no part, A. */
   private static final double IDLE = 1e-6;
 
   @Override
   public List<Finding> check(Design design, HookupPrediction prediction) {
     List<Finding> findings = new ArrayList<>();
-    Map<String, DeviceState> devices = prediction.rest().map(RestState::devices).orElse(Map.of());
-    devices.forEach(
-        (role, device) -> {
-          if (device instanceof DeviceState.TransistorState state
-              && state.collectorCurrent() + state.baseCurrent() > IDLE
-              && state.collectorEmitterVoltage() < CLOSE) {
-            findings.add(finding(role, state));
-          }
-        });
+    Set<String> told = new HashSet<>();
+    SwingDevices.places(prediction)
+        .forEach(
+            (place, devices) ->
+                devices.forEach(
+                    (role, device) -> {
+                      if (device instanceof DeviceState.TransistorState state
+                          && state.collectorCurrent() + state.baseCurrent() > IDLE
+                          && state.collectorEmitterVoltage() < room(place)
+                          && told.add(role)) {
+                        findings.add(
+                            place.equals(REST)
+                                ? finding(role, state)
+                                : swinging(role, state, place));
+                      }
+                    }));
     return findings;
+  }
+
+  /** At rest some room shall be left; at the ends of the signal it may all be used. */
+  private static double room(String place) {
+    return place.equals(REST) ? CLOSE : SATURATED;
+  }
+
+  private static Finding swinging(String role, DeviceState.TransistorState state, String place) {
+    return new Finding(
+        Finding.Severity.RISKY,
+        role,
+        "It saturates "
+            + place
+            + ": only "
+            + Say.volts(state.collectorEmitterVoltage())
+            + " from collector to emitter at "
+            + Say.amperes(state.collectorCurrent())
+            + ".",
+        "Less amplitude, or: " + lowerFirst(remedy(role)));
+  }
+
+  private static String lowerFirst(String sentence) {
+    return Character.toLowerCase(sentence.charAt(0)) + sentence.substring(1);
   }
 
   private static Finding finding(String role, DeviceState.TransistorState state) {

@@ -45,6 +45,7 @@ public final class CommandLineProgram {
     line.addSubcommand(new SpreadCommand(services, console));
     line.addSubcommand(new CureCommand(services, console));
     line.addSubcommand(new NoiseCommand(services, console));
+    line.addSubcommand(new HeatCommand(services, console));
     line.addSubcommand(new StabilityCommand(services, console));
     line.addSubcommand(new StepCommand(services, console));
     line.addSubcommand(new DistortionCommand(services, console));
@@ -68,6 +69,7 @@ public final class CommandLineProgram {
         SpreadCommand.NAME,
         CureCommand.NAME,
         NoiseCommand.NAME,
+        HeatCommand.NAME,
         StabilityCommand.NAME,
         StepCommand.NAME,
         DistortionCommand.NAME);

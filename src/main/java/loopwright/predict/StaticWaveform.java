@@ -1,5 +1,6 @@
 package loopwright.predict;
 
+import java.util.Map;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.Nodes;
 import loopwright.circuit.Circuit;
@@ -21,6 +22,8 @@ final class StaticWaveform {
   private final double[] out = new double[POINTS];
   private final double[] gainOut = new double[POINTS];
   private final Harmonics harmonics;
+  private Map<String, DeviceState> atCrest = Map.of();
+  private Map<String, DeviceState> atTrough = Map.of();
 
   /**
    * Walks the waveform.
@@ -57,6 +60,12 @@ final class StaticWaveform {
         out[at] = output;
         gainOut[at] = driver;
       }
+    }
+    Map<String, DeviceState> devices = new DeviceReadout(hookup).read(walk.state(), Map.of());
+    if (direction > 0) {
+      atCrest = devices;
+    } else {
+      atTrough = devices;
     }
   }
 
@@ -97,7 +106,12 @@ final class StaticWaveform {
   /** The waveform for views. */
   Waveform toWaveform() {
     return new Waveform(
-        generator.clone(), out.clone(), gainOut.clone(), harmonics.residual().clone());
+        generator.clone(),
+        out.clone(),
+        gainOut.clone(),
+        harmonics.residual().clone(),
+        atCrest,
+        atTrough);
   }
 
   private static double halfRange(double[] values) {

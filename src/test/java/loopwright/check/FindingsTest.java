@@ -244,4 +244,80 @@ class FindingsTest {
                 + " \"minimum\": 9, \"maximum\": 12}], \"hookups\":");
     assertThat(findings(wide)).isEmpty();
   }
+
+  /** Joined by two diodes on a stiff bias, no emitter resistors, 200 K/W: it cannot hold. */
+  @Test
+  void thermalRunawayIsFoundAndItsRemedyHolds() {
+    String warm =
+        SOUND
+            .replace(
+                "\"emitterBaseVoltage\": 6}",
+                "\"emitterBaseVoltage\": 6, \"thermalResistance\": 200}")
+            .replace(
+                "\"parts\": {",
+                "\"parts\": {\"d\": {\"kind\": \"diode\", \"model\": {\"saturationCurrent\": 1.4e-14,"
+                    + " \"ideality\": 1}},")
+            .replace(
+                "\"load\": {\"kind\": \"resistor\", \"resistance\": \"8k2\"}",
+                "\"load\": {\"kind\": \"resistor\", \"resistance\": \"1k\"}")
+            .replace("\"output\": \"1k5\"", "\"output\": \"1k8\"")
+            .replace(
+                "{\"kind\": \"none\"}",
+                "{\"kind\": \"pushPull\", \"upper\": \"n\", \"lower\": \"p\","
+                    + " \"bias\": {\"kind\": \"diodes\", \"diode\": \"d\"}}");
+    Finding runaway =
+        findings(warm).stream()
+            .filter(finding -> finding.where().equals("amplifier.outputStage"))
+            .findAny()
+            .orElseThrow();
+    assertThat(runaway.severity()).isNotEqualTo(Finding.Severity.REMARK);
+    assertThat(runaway.where()).isEqualTo("amplifier.outputStage");
+    assertThat(runaway.changes()).hasSize(1);
+    Design cured = Change.applyAll(DesignText.read(warm), runaway.changes());
+    assertThat(
+            Findings.of(Predictor.predict(cured, List.of(), new double[] {1e3}, Progress.none())))
+        .noneMatch(finding -> finding.where().equals("amplifier.outputStage"));
+  }
+
+  @Test
+  void aJunctionIsHeldAgainstItsOwnPartsLimit() {
+    String hot =
+        SOUND.replace(
+            "\"emitterBaseVoltage\": 6}",
+            "\"emitterBaseVoltage\": 6, \"thermalResistance\": 2000, \"junctionTemperature\": 60}");
+    assertThat(findings(hot))
+        .anySatisfy(
+            finding -> {
+              assertThat(finding.severity()).isEqualTo(Finding.Severity.FAILS);
+              assertThat(finding.says()).contains("beyond its part's limit of 60 °C");
+            });
+  }
+
+  @Test
+  void whatSaturatesOnlyAtTheEndsOfTheSignalIsFound() {
+    String loud = SOUND.replace("\"amplitude\": 0.1", "\"amplitude\": 2");
+    assertThat(findings(loud))
+        .anySatisfy(
+            finding -> {
+              assertThat(finding.where()).isEqualTo("gain.q1");
+              assertThat(finding.says()).contains("It saturates with the output at ");
+            });
+  }
+
+  @Test
+  void aSlewRateThatTheFormulaDoesNotTellIsExplained() {
+    String degenerated =
+        SOUND
+            .replace("\"output\": \"1k5\", \"other\": \"1k5\"", "\"output\": \"4k7\"")
+            .replace(
+                "\"gainStage\": {\"transistor\": \"p\",",
+                "\"gainStage\": {\"transistor\": \"p\", \"emitterResistance\": \"1k\",");
+    assertThat(findings(degenerated))
+        .anySatisfy(
+            finding -> {
+              assertThat(finding.severity()).isEqualTo(Finding.Severity.REMARK);
+              assertThat(finding.says())
+                  .contains("The output slews ", "of the hand formula", "emitter resistor");
+            });
+  }
 }

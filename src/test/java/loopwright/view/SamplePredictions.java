@@ -315,6 +315,6 @@ public final class SamplePredictions {
       gainOut[i] = out[i] == 0 ? ideal * (1 + loop) : out[i] + Math.signum(ideal) * DEAD_ZONE;
       error[i] = out[i] - ideal + zone * 4 / Math.PI * sine;
     }
-    return new Waveform(generator, out, gainOut, error);
+    return new Waveform(generator, out, gainOut, error, Map.of(), Map.of());
   }
 }

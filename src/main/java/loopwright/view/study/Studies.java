@@ -50,6 +50,11 @@ public final class Studies {
     show("stability", StabilityStudy::new);
   }
 
+  /** Idle current, runaway and dissipation. */
+  public void heat() {
+    show("heat", HeatStudy::new);
+  }
+
   /** Bands for the tolerances. */
   public void spread() {
     show("spread", SpreadStudy::new);

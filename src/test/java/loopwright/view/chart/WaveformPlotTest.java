@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import loopwright.predict.HookupPrediction;
 import loopwright.predict.Waveform;
@@ -83,7 +84,12 @@ class WaveformPlotTest {
             prediction.harmonics(),
             Optional.of(
                 new Waveform(
-                    waveform.generator(), waveform.out(), waveform.out(), waveform.error())),
+                    waveform.generator(),
+                    waveform.out(),
+                    waveform.out(),
+                    waveform.error(),
+                    Map.of(),
+                    Map.of())),
             List.of());
     assertThat(Drawn.strips(picture(same)).get(0).getSeriesCount()).isEqualTo(1);
   }

@@ -174,7 +174,11 @@ class StudyTest {
     Painting.of(new WholeStudy(desk, new ShelfFile().shipped()), 980, 560)
         .save("study.whole-design-" + theme.name().toLowerCase(Locale.ROOT));
     Study[] studies = {
-      new DividerStudy(desk), new CureStudy(desk), new SpreadStudy(desk), new BenchStudy(desk)
+      new DividerStudy(desk),
+      new CureStudy(desk),
+      new SpreadStudy(desk),
+      new BenchStudy(desk),
+      new HeatStudy(desk)
     };
     Lookup.named(studies[2], "samples", JTextField.class).setText("40");
     Lookup.named(studies[1], "margin", JTextField.class).setText("80");
