@@ -1,9 +1,11 @@
 package loopwright.predict;
 
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Predicate;
+import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.DeviceModels;
 import loopwright.assembly.Nodes;
 import loopwright.circuit.Element;
@@ -109,6 +111,30 @@ public final class HookupFigures {
   /** Voltages of all nodes with a name at rest, V; empty where the circuit finds no rest. */
   public Map<String, Double> nodes() {
     return solution.restOutcome().isPresent() ? solution.nodes() : Map.of();
+  }
+
+  /**
+   * The nodes at which a probe can change something: one name for each node of the circuit, without
+   * ground and those that an ideal source holds; empty where the circuit finds no rest.
+   */
+  public List<String> probedNodes() {
+    Map<Integer, String> names = new LinkedHashMap<>();
+    if (failure().isPresent()) {
+      return List.of();
+    }
+    AssembledHookup assembled = solution.assembled();
+    List<String> held =
+        List.of(Nodes.GENERATOR, Nodes.IDEAL_POSITIVE, Nodes.IDEAL_NEGATIVE).stream()
+            .filter(assembled.circuit()::hasNode)
+            .toList();
+    List<Integer> fed = held.stream().map(assembled.circuit()::node).toList();
+    for (String name : solution.nodes().keySet()) {
+      int node = assembled.circuit().node(name);
+      if (node >= 0 && !fed.contains(node)) {
+        names.putIfAbsent(node, name);
+      }
+    }
+    return List.copyOf(names.values());
   }
 
   /** Devices at rest by role; empty where the circuit finds no rest. */

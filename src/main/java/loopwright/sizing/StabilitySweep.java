@@ -2,12 +2,16 @@ package loopwright.sizing;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.IntStream;
 import loopwright.design.Change;
 import loopwright.design.Design;
 import loopwright.design.DesignException;
+import loopwright.design.DesignPath;
 import loopwright.design.Feedback;
+import loopwright.design.PartValue;
+import loopwright.design.Probe;
 import loopwright.design.StagesAmplifier;
 import loopwright.predict.Build;
 import loopwright.predict.HookupFigures;
@@ -21,7 +25,8 @@ import loopwright.task.Progress;
  * How stable a hookup is over its whole swing while one value is varied.
  *
  * @param what is varied, in words
- * @param path of the value
+ * @param path of the value; of a probe {@code hookups.NAME.probes.NODE}, which stands for one more
+ *     probe at that node
  * @param unit of the value
  * @param points in the order of the value, the present one among them
  */
@@ -52,8 +57,8 @@ public record StabilitySweep(String what, String path, Unit unit, List<Point> po
   }
 
   /**
-   * Sweeps load capacitance, compensation, stray capacitance, supply inductance, and the gain by
-   * the upper resistor of the divider.
+   * Sweeps load capacitance, compensation, stray capacitance, supply inductance, the gain by the
+   * upper resistor of the divider, and a probe's capacitance at each node in turn.
    *
    * @param design a valid design, every part it names among its own
    * @param hookup name of a hookup with feedback
@@ -110,6 +115,10 @@ public record StabilitySweep(String what, String path, Unit unit, List<Point> po
               100 * foot,
               divider.upper().effective()));
     }
+    for (String node : nominal.probedNodes()) {
+      wanted.add(
+          sweep("Capacitance at " + node, at + "probes." + node, Unit.FARAD, 2.2e-12, 1e-9, 0));
+    }
     List<StabilitySweep> sweeps = new ArrayList<>();
     for (StabilitySweep sweep : wanted) {
       progress.report((double) sweeps.size() / wanted.size(), sweep.what());
@@ -156,10 +165,8 @@ public record StabilitySweep(String what, String path, Unit unit, List<Point> po
   }
 
   private Point at(Design design, String hookup, Point point) {
-    Change change = new Change(path, EngineeringFormat.spelling(point.value(), unit));
     HookupFigures figures =
-        HookupFigures.of(design, hookup)
-            .of(Build.nominal(Change.applyAll(design, List.of(change))));
+        HookupFigures.of(design, hookup).of(Build.nominal(with(design, hookup, point.value())));
     List<SwingLevel> levels = figures.overSwing(LEVELS, level -> true);
     SwingLevel worst = null;
     for (SwingLevel level : levels) {
@@ -178,6 +185,21 @@ public record StabilitySweep(String what, String path, Unit unit, List<Point> po
             .min(),
         worst == null ? OptionalDouble.empty() : worst.growth(),
         worst == null ? OptionalDouble.empty() : worst.frequency());
+  }
+
+  /** The design with a value; with a probe of that capacitance where the sweep is of a node. */
+  private Design with(Design design, String hookup, double value) {
+    String probes = "hookups." + hookup + ".probes";
+    if (!path.startsWith(probes + ".")) {
+      return Change.applyAll(
+          design, List.of(new Change(path, EngineeringFormat.spelling(value, unit))));
+    }
+    int next = design.hookup(hookup).orElseThrow().probes().size();
+    String node = path.substring(probes.length() + 1);
+    return DesignPath.set(
+        design,
+        probes + "." + next,
+        new Probe(node, Optional.empty(), Optional.of(PartValue.of(value))));
   }
 
   /** In a sentence: where it is stable. */

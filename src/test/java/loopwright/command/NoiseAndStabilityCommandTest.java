@@ -66,6 +66,9 @@ class NoiseAndStabilityCommandTest {
     JsonNode load = json.at("/sweeps/0");
     assertThat(load.get("path").asText()).isEqualTo("hookups.divider.load.capacitance");
     assertThat(load.get("points").findValuesAsText("present")).contains("true");
+    assertThat(json.get("sweeps").findValuesAsText("path"))
+        .contains("hookups.divider.probes.out")
+        .doesNotContain("hookups.divider.probes.generator", "hookups.divider.probes.ground");
     JsonNode gain = json.at("/sweeps/3");
     assertThat(gain.get("path").asText()).isEqualTo("hookups.divider.feedback.upper");
     // The lower the gain, the less stable: T = A/NG with poles at 30 and 50 MHz.

@@ -33,8 +33,8 @@ public final class StabilityStudy extends Study {
     add(table, "hmin 240");
     table.show(
         List.of(),
-        "Load capacitance, compensation, stray capacitance, supply lead inductance and the divider's"
-            + " upper resistor are varied one after the other; each row is the worst of the whole"
+        "Load capacitance, compensation, stray capacitance, supply lead inductance, the divider's upper"
+            + " resistor and a probe's capacitance at each node are varied one after the other; each row is the worst of the whole"
             + " swing, and the present value is marked.");
     show(desk.now().get());
   }
