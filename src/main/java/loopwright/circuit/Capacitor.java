@@ -26,6 +26,16 @@ public final class Capacitor implements Element {
     return capacitance;
   }
 
+  /** Index of its first node. */
+  public int from() {
+    return from;
+  }
+
+  /** Index of its second node. */
+  public int to() {
+    return to;
+  }
+
   @Override
   public void addLinearSensitivity(
       CircuitState state, BilinearForm form, double[] byUnknown, ElementSensitivities sums) {

@@ -49,6 +49,7 @@ public final class CommandLineProgram {
     line.addSubcommand(new StabilityCommand(services, console));
     line.addSubcommand(new StepCommand(services, console));
     line.addSubcommand(new DistortionCommand(services, console));
+    line.addSubcommand(new SheetCommand(services, console));
     line.setOut(writer(console.out()));
     line.setErr(writer(console.err()));
     line.setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF));
@@ -72,7 +73,8 @@ public final class CommandLineProgram {
         HeatCommand.NAME,
         StabilityCommand.NAME,
         StepCommand.NAME,
-        DistortionCommand.NAME);
+        DistortionCommand.NAME,
+        SheetCommand.NAME);
   }
 
   private static PrintWriter writer(java.io.PrintStream stream) {

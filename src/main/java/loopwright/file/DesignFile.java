@@ -1,13 +1,9 @@
 package loopwright.file;
 
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import loopwright.design.Bench;
 import loopwright.design.Design;
-import loopwright.design.DesignPath;
 import loopwright.design.DesignValidation;
 import loopwright.design.UsedParts;
 import loopwright.part.Shelf;
@@ -74,19 +70,6 @@ public final class DesignFile {
     return JsonWriter.write(
         binding.write(
             design, previous.map(document -> new Before<>(document.written(), document.source()))));
-  }
-
-  /**
-   * The checksum by which paper and file know that they are about one design: SHA-256, in 64
-   * hexadecimal digits, of the text in UTF-8 that {@link #write} gives without a previous document,
-   * the bench left out, so that noting a reading does not change it.
-   *
-   * @throws loopwright.design.DesignException when the text could not be read again
-   */
-  public String checksum(Design design) {
-    Bench nothing = new Bench(Map.of(), List.of(), List.of(), Optional.empty());
-    String text = write(DesignPath.set(design, "bench", nothing), Optional.empty());
-    return Sha256.of(text.getBytes(StandardCharsets.UTF_8));
   }
 
   /**

@@ -33,19 +33,19 @@ class DesignChecksumTest {
 
   @Test
   void aReadingDoesNotChangeItButEverythingElseDoes() {
-    String checksum = files.checksum(design);
+    String checksum = DesignChecksum.of(design);
     assertThat(checksum).matches("[0-9a-f]{64}");
     assertThat(design.bench().readings()).isNotEmpty();
-    assertThat(files.checksum(DesignPath.set(design, "bench.readings", List.of())))
+    assertThat(DesignChecksum.of(DesignPath.set(design, "bench.readings", List.of())))
         .isEqualTo(checksum);
     assertThat(
-            files.checksum(
+            DesignChecksum.of(
                 DesignPath.set(
                     design,
                     "amplifier.gainStage.compensation.resistance.value",
                     Quantity.parse("160", Unit.OHM))))
         .isNotEqualTo(checksum);
-    assertThat(files.checksum(DesignPath.set(design, "name", "Another"))).isNotEqualTo(checksum);
+    assertThat(DesignChecksum.of(DesignPath.set(design, "name", "Another"))).isNotEqualTo(checksum);
   }
 
   @Test
@@ -53,7 +53,9 @@ class DesignChecksumTest {
     Design bare = DesignPath.set(design, "bench.readings", List.of());
     Design empty = DesignPath.set(bare, "bench.instruments", Map.of());
     String text = files.write(empty, Optional.empty());
-    assertThat(Sha256.of(text.getBytes(StandardCharsets.UTF_8))).isEqualTo(files.checksum(design));
-    assertThat(files.checksum(files.read(text, "text").design())).isEqualTo(files.checksum(design));
+    assertThat(Sha256.of(text.getBytes(StandardCharsets.UTF_8)))
+        .isEqualTo(DesignChecksum.of(design));
+    assertThat(DesignChecksum.of(files.read(text, "text").design()))
+        .isEqualTo(DesignChecksum.of(design));
   }
 }

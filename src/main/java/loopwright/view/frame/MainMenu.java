@@ -53,7 +53,7 @@ final class MainMenu extends JMenuBar {
     undo = item("Undo", "edit.undo", 'U', control(KeyEvent.VK_Z), commands::undo);
     redo = item("Redo", "edit.redo", 'R', controlShift(KeyEvent.VK_Z), commands::redo);
     this.commands = commands;
-    add(fileMenu(commands, beginnings, quit));
+    add(fileMenu(commands, studies, beginnings, quit));
     add(
         menu(
             "Edit",
@@ -73,7 +73,8 @@ final class MainMenu extends JMenuBar {
     FileMenus.fill(recent, files, commands::openFile);
   }
 
-  private JMenu fileMenu(Commands commands, Map<String, Design> beginnings, Runnable quit) {
+  private JMenu fileMenu(
+      Commands commands, Studies studies, Map<String, Design> beginnings, Runnable quit) {
     recent.setName("file.recent");
     recent.setMnemonic('R');
     recent.setEnabled(false);
@@ -86,6 +87,8 @@ final class MainMenu extends JMenuBar {
             recent,
             item("Save", "file.save", 'S', control(KeyEvent.VK_S), commands::save),
             item("Save as…", "file.saveAs", 'A', controlShift(KeyEvent.VK_S), commands::saveAs));
+    file.addSeparator();
+    file.add(item("Bench sheet…", "file.sheet", 'B', control(KeyEvent.VK_P), studies::sheet));
     file.addSeparator();
     file.add(item("Quit", "file.quit", 'Q', control(KeyEvent.VK_Q), quit));
     return file;

@@ -65,6 +65,11 @@ public final class Studies {
     show("bench", BenchStudy::new);
   }
 
+  /** The sheet for the bench. */
+  public void sheet() {
+    show("sheet", SheetStudy::new);
+  }
+
   /** Every field of the design. */
   public void whole() {
     show("whole", self -> new WholeStudy(self, shelf));

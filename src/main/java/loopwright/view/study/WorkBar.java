@@ -92,6 +92,11 @@ final class WorkBar extends JPanel {
     Theme.style(says, "failing");
   }
 
+  /** Says what was done. */
+  void say(String done) {
+    tell(done);
+  }
+
   private void tell(String what) {
     says.setText(what.isEmpty() ? " " : what);
     says.setToolTipText(null);

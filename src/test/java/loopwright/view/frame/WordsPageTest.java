@@ -30,6 +30,7 @@ import loopwright.view.study.BenchStudy;
 import loopwright.view.study.CureStudy;
 import loopwright.view.study.Desk;
 import loopwright.view.study.DividerStudy;
+import loopwright.view.study.SheetStudy;
 import loopwright.view.study.SpreadStudy;
 import loopwright.view.study.StabilityStudy;
 import loopwright.view.study.WholeStudy;
@@ -103,6 +104,7 @@ class WordsPageTest {
             new CureStudy(desk),
             new SpreadStudy(desk),
             new StabilityStudy(desk),
+            new SheetStudy(desk),
             new BenchStudy(desk),
             new WholeStudy(desk, shelf))) {
       studyWords(study, words);
