@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.stream.DoubleStream;
 import java.util.stream.IntStream;
 import loopwright.predict.ComplexPoint;
+import loopwright.quantity.Unit;
 
 /**
  * A response in the two ways that it is drawn.
@@ -62,11 +63,11 @@ record Bode(double[] frequencies, double[] decibels, double[] degrees) {
   }
 
   /** An axis from the lowest frequency to the last at which the level is above a floor. */
-  FrequencyAxis axis(double floor) {
+  DecadeAxis axis(double floor) {
     int last = frequencies.length - 1;
     while (last > 1 && !(decibels[last - 1] >= floor)) {
       last--;
     }
-    return new FrequencyAxis(frequencies[0], frequencies[last]);
+    return new DecadeAxis(Unit.HERTZ, frequencies[0], frequencies[last]);
   }
 }

@@ -17,7 +17,7 @@ import org.jfree.chart.ui.TextAnchor;
  * A linear axis in engineering form: steps of 1, 2 or 5, angles in steps of 30, 45 or 90 degrees,
  * one prefix for all its numbers.
  */
-final class EngineeringAxis extends NumberAxis {
+final class EngineeringAxis extends NumberAxis implements UnitAxis {
   private static final double[] STEPS = {1, 2, 5, 10};
   private static final double[] ANGLES = {1, 2, 5, 10, 15, 30, 45, 90, 180, 360, 720, 1440};
 
@@ -42,6 +42,11 @@ final class EngineeringAxis extends NumberAxis {
     this.scale = AxisScale.of(unit, Math.max(Math.abs(span.lower()), Math.abs(span.upper())));
     setAutoRange(false);
     setRange(span.lower(), span.upper());
+  }
+
+  @Override
+  public Unit unit() {
+    return unit;
   }
 
   /** The prefix and unit of its numbers. */

@@ -73,6 +73,7 @@ final class PlotPane extends JPanel {
     sentence.setFont(theme.font());
     sentence.setForeground(theme.quiet());
     canvas.show(picture.chart(), outOfDate);
+    canvas.titled(picture.title());
     canvas.getAccessibleContext().setAccessibleName(subject.tab() + ": " + picture.title());
     canvas.getAccessibleContext().setAccessibleDescription(picture.sentence());
     revalidate();

@@ -28,7 +28,7 @@ final class Strip {
   private final XYSeriesCollection dataset = new XYSeriesCollection();
   private final XYLineAndShapeRenderer renderer = new XYLineAndShapeRenderer(true, false);
   private final List<PlotLabel> labels = new ArrayList<>();
-  private final XYPlot plot;
+  private final StripPlot plot;
 
   /**
    * @param unit of its values
@@ -46,7 +46,7 @@ final class Strip {
     ChartStyle.axis(axis, theme);
     renderer.setDrawSeriesLineAsPath(true);
     renderer.setDefaultToolTipGenerator((data, series, item) -> says(series, item));
-    plot = new XYPlot(dataset, null, axis, renderer);
+    plot = new StripPlot(dataset, null, axis, renderer, along, unit, false);
     ChartStyle.plot(plot, theme);
   }
 

@@ -4,15 +4,16 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.awt.Font;
 import java.util.List;
+import loopwright.quantity.Unit;
 import org.jfree.chart.axis.Tick;
 import org.jfree.chart.axis.TickType;
 import org.jfree.chart.axis.ValueTick;
 import org.jfree.chart.ui.RectangleEdge;
 import org.junit.jupiter.api.Test;
 
-class FrequencyAxisTest {
-  private static FrequencyAxis axis(double lowest, double highest) {
-    FrequencyAxis axis = new FrequencyAxis(lowest, highest);
+class DecadeAxisTest {
+  private static DecadeAxis axis(double lowest, double highest) {
+    DecadeAxis axis = new DecadeAxis(Unit.HERTZ, lowest, highest);
     axis.setTickLabelFont(new Font(Font.SANS_SERIF, Font.PLAIN, 11));
     return axis;
   }

@@ -1,0 +1,73 @@
+package loopwright.view.chart;
+
+import java.util.function.BiFunction;
+import loopwright.quantity.EngineeringFormat;
+import loopwright.quantity.Unit;
+import org.jfree.chart.axis.ValueAxis;
+import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.renderer.xy.XYItemRenderer;
+import org.jfree.data.xy.XYDataset;
+
+/** A plot that knows the units of its two axes and what each of its points means. */
+final class StripPlot extends XYPlot {
+  private final transient Unit along;
+  private final transient Unit unit;
+  private final boolean isPlane;
+  private transient BiFunction<Integer, Integer, String> words = (series, item) -> "";
+
+  /**
+   * @param along unit of the places
+   * @param unit of the values
+   * @param isPlane whether both axes are values of a third quantity, so that a curve may turn back
+   */
+  StripPlot(
+      XYDataset data,
+      ValueAxis domain,
+      ValueAxis values,
+      XYItemRenderer renderer,
+      Unit along,
+      Unit unit,
+      boolean isPlane) {
+    super(data, domain, values, renderer);
+    this.along = along;
+    this.unit = unit;
+    this.isPlane = isPlane;
+  }
+
+  /** Says of a point what neither axis says. */
+  void pointsSay(BiFunction<Integer, Integer, String> says) {
+    words = says;
+  }
+
+  Unit along() {
+    return along;
+  }
+
+  Unit unit() {
+    return unit;
+  }
+
+  boolean isPlane() {
+    return isPlane;
+  }
+
+  /** A value of a curve in words. */
+  String says(String curve, double value) {
+    return (curve + " " + EngineeringFormat.format(value, unit)).strip();
+  }
+
+  /** A place in words. */
+  String places(double place) {
+    return EngineeringFormat.format(place, along);
+  }
+
+  /** A point of a curve in words. */
+  String point(int series, int item) {
+    String extra = words.apply(series, item);
+    XYDataset data = getDataset();
+    return (extra.isEmpty() ? "" : extra + ": ")
+        + places(data.getXValue(series, item))
+        + (isPlane ? ", " : " ")
+        + EngineeringFormat.format(data.getYValue(series, item), unit);
+  }
+}

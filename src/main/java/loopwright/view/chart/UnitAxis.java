@@ -1,0 +1,9 @@
+package loopwright.view.chart;
+
+import loopwright.quantity.Unit;
+
+/** An axis that knows what its numbers are. */
+interface UnitAxis {
+  /** Unit of its values. */
+  Unit unit();
+}
