@@ -2,7 +2,9 @@ package loopwright.view.chart;
 
 import java.awt.BorderLayout;
 import java.awt.Graphics;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import javax.swing.JComponent;
 import javax.swing.JTabbedPane;
@@ -12,7 +14,7 @@ import loopwright.view.theme.Palette;
 /** The plots of one hookup, a tab each. */
 public final class PlotDeck extends JComponent {
   private final JTabbedPane tabs = new JTabbedPane();
-  private final transient List<PlotPane> panes;
+  private final transient Map<PlotPane, PlotSubject> subjects = new LinkedHashMap<>();
   private transient Optional<HookupPrediction> shown = Optional.empty();
   private boolean current = true;
   private String message = "";
@@ -20,17 +22,21 @@ public final class PlotDeck extends JComponent {
   /** A deck with nothing to show yet. */
   public PlotDeck() {
     setLayout(new BorderLayout());
-    panes =
+    for (PlotSubject subject :
         List.of(
-            new PlotPane(new ResponsePlot()),
-            new PlotPane(new LoopGainPlot()),
-            new PlotPane(new WaveformPlot()),
-            new PlotPane(new SwingPlot()),
-            new PlotPane(new OffsetPlot()));
+            new ResponsePlot(),
+            new LoopGainPlot(),
+            new WaveformPlot(),
+            new SwingPlot(),
+            new OffsetPlot(),
+            new NyquistPlot(),
+            new RootsPlot())) {
+      subjects.put(new PlotPane(subject.tab()), subject);
+    }
     tabs.setName("plots");
     tabs.getAccessibleContext().setAccessibleName("Plots");
     tabs.setTabLayoutPolicy(JTabbedPane.SCROLL_TAB_LAYOUT);
-    panes.forEach(pane -> tabs.addTab(pane.tab(), pane));
+    subjects.keySet().forEach(pane -> tabs.addTab(pane.tab(), pane));
     tabs.addChangeListener(event -> refresh());
     setOpaque(true);
     add(tabs);
@@ -61,7 +67,7 @@ public final class PlotDeck extends JComponent {
   public void updateUI() {
     super.updateUI();
     // Called by the constructor of the superclass too, when there is nothing to colour yet.
-    if (panes != null) {
+    if (subjects != null) {
       refresh();
     }
   }
@@ -72,7 +78,8 @@ public final class PlotDeck extends JComponent {
     tabs.setBackground(Palette.card());
     if (tabs.getSelectedComponent() instanceof PlotPane pane) {
       shown.ifPresentOrElse(
-          prediction -> pane.show(prediction, current, message), () -> pane.showNone(message));
+          prediction -> pane.show(subjects.get(pane), prediction, current, message),
+          () -> pane.showNone(message));
     }
   }
 }

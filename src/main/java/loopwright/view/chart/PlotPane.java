@@ -11,15 +11,15 @@ import loopwright.predict.HookupPrediction;
 
 /** One tab of the deck: what is to be said first, the title, its sentence, the plot. */
 final class PlotPane extends JPanel {
-  private final transient PlotSubject subject;
+  private final String tab;
   private final WrappedText note = new WrappedText();
   private final WrappedText title = new WrappedText();
   private final WrappedText sentence = new WrappedText();
   private final ChartCanvas canvas = new ChartCanvas();
 
-  PlotPane(PlotSubject subject) {
+  PlotPane(String tab) {
     super(new BorderLayout(0, 6));
-    this.subject = subject;
+    this.tab = tab;
     JPanel words = new JPanel();
     words.setOpaque(false);
     words.setLayout(new BoxLayout(words, BoxLayout.Y_AXIS));
@@ -36,11 +36,11 @@ final class PlotPane extends JPanel {
   }
 
   String tab() {
-    return subject.tab();
+    return tab;
   }
 
   /** Shows the prediction, or why it has no picture. */
-  void show(HookupPrediction prediction, boolean current, String message) {
+  void show(PlotSubject subject, HookupPrediction prediction, boolean current, String message) {
     PlotTheme theme = PlotTheme.current();
     Picture picture =
         prediction.rest().isEmpty()
@@ -51,6 +51,12 @@ final class PlotPane extends JPanel {
     if (prediction.rest().isEmpty()) {
       title.setForeground(theme.fails());
     }
+  }
+
+  /** Shows a picture that belongs to what was worked out and to nothing else. */
+  void show(ResultPlot plot) {
+    PlotTheme theme = PlotTheme.current();
+    dress(theme, plot.picture(theme), "", false);
   }
 
   /** Shows that there is no prediction, and why. */
@@ -74,7 +80,7 @@ final class PlotPane extends JPanel {
     sentence.setForeground(theme.quiet());
     canvas.show(picture.chart(), outOfDate);
     canvas.titled(picture.title());
-    canvas.getAccessibleContext().setAccessibleName(subject.tab() + ": " + picture.title());
+    canvas.getAccessibleContext().setAccessibleName(tab + ": " + picture.title());
     canvas.getAccessibleContext().setAccessibleDescription(picture.sentence());
     revalidate();
     repaint();

@@ -10,6 +10,7 @@ import java.util.List;
 import loopwright.quantity.EngineeringFormat;
 import loopwright.quantity.Unit;
 import org.jfree.chart.annotations.XYLineAnnotation;
+import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.IntervalMarker;
 import org.jfree.chart.plot.Marker;
 import org.jfree.chart.plot.ValueMarker;
@@ -36,18 +37,31 @@ final class Strip {
    * @param along unit of the shared axis
    */
   Strip(Unit unit, Span span, Unit along, PlotTheme theme) {
+    this(unit, engineering(unit, span), along, theme);
+  }
+
+  /**
+   * @param unit of its values
+   * @param axis of its values
+   * @param along unit of the shared axis
+   */
+  Strip(Unit unit, ValueAxis axis, Unit along, PlotTheme theme) {
     this.theme = theme;
     this.unit = unit;
     this.along = along;
-    EngineeringAxis axis = new EngineeringAxis(unit, span);
-    if (!axis.scale().onAxis().isEmpty()) {
-      axis.setLabel(axis.scale().onAxis());
-    }
     ChartStyle.axis(axis, theme);
     renderer.setDrawSeriesLineAsPath(true);
     renderer.setDefaultToolTipGenerator((data, series, item) -> says(series, item));
     plot = new StripPlot(dataset, null, axis, renderer, along, unit, false);
     ChartStyle.plot(plot, theme);
+  }
+
+  private static ValueAxis engineering(Unit unit, Span span) {
+    EngineeringAxis axis = new EngineeringAxis(unit, span);
+    if (!axis.scale().onAxis().isEmpty()) {
+      axis.setLabel(axis.scale().onAxis());
+    }
+    return axis;
   }
 
   /**

@@ -120,6 +120,9 @@ final class MainMenu extends JMenuBar {
         item("Size a divider…", "work.divider", 'D', control(KeyEvent.VK_D), studies::divider),
         item("Cure an oscillation…", "work.cure", 'C', control(KeyEvent.VK_K), studies::cure),
         item("Stability…", "work.stability", 'T', control(KeyEvent.VK_L), studies::stability),
+        item("Steps and oscillation…", "work.time", 'O', control(KeyEvent.VK_R), studies::time),
+        item("Distortion…", "work.distortion", 'I', null, studies::distortion),
+        item("Noise and impedance…", "work.spectra", 'N', null, studies::spectra),
         item("Heat…", "work.heat", 'H', control(KeyEvent.VK_H), studies::heat),
         item("Spread…", "work.spread", 'S', control(KeyEvent.VK_T), studies::spread),
         item(

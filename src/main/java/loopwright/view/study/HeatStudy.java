@@ -14,6 +14,7 @@ import loopwright.predict.SwingHeat;
 import loopwright.quantity.Unit;
 import loopwright.session.Edit;
 import loopwright.session.Snapshot;
+import loopwright.view.chart.HeatPlots;
 import loopwright.view.theme.Theme;
 
 /** Idle current and runaway against ambient temperature, and dissipation over the swing. */
@@ -25,6 +26,7 @@ public final class HeatStudy extends Study {
   private final JLabel where = Theme.style(new JLabel(), "quiet");
   private final WorkBar bar;
   private final ProposalTable table;
+  private final ResultTabs results;
 
   /**
    * @param desk the window's session
@@ -37,7 +39,8 @@ public final class HeatStudy extends Study {
     where.setName("where");
     add(where);
     add(bar);
-    add(table, "hmin 240");
+    results = new ResultTabs("Table", table);
+    add(results, "hmin 240");
     table.show(
         List.of(),
         "The amplifier is solved at rest from a cold to a hot ambient with every junction at the"
@@ -82,6 +85,7 @@ public final class HeatStudy extends Study {
       rows.add(device(report, device, changes, cautions));
     }
     table.show(rows, report.swingReason());
+    results.show(HeatPlots.of(report));
   }
 
   private static Proposal ambient(

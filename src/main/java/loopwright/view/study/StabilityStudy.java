@@ -7,6 +7,7 @@ import javax.swing.JLabel;
 import loopwright.quantity.Unit;
 import loopwright.session.Snapshot;
 import loopwright.sizing.StabilitySweep;
+import loopwright.view.chart.StabilityPlots;
 import loopwright.view.theme.Theme;
 
 /** Worst margin and growth of the whole swing against one value after the other. */
@@ -18,6 +19,7 @@ public final class StabilityStudy extends Study {
   private final JLabel where = Theme.style(new JLabel(), "quiet");
   private final WorkBar bar;
   private final ProposalTable table;
+  private final ResultTabs results;
 
   /**
    * @param desk the window's session
@@ -30,7 +32,8 @@ public final class StabilityStudy extends Study {
     where.setName("where");
     add(where);
     add(bar);
-    add(table, "hmin 240");
+    results = new ResultTabs("Table", table);
+    add(results, "hmin 240");
     table.show(
         List.of(),
         "Load capacitance, compensation, stray capacitance, supply lead inductance, the divider's upper"
@@ -61,6 +64,7 @@ public final class StabilityStudy extends Study {
       sweep.points().forEach(point -> rows.add(row(sweep, point, says)));
     }
     table.show(rows, says);
+    results.show(sweeps.stream().map(StabilityPlots::of).toList());
   }
 
   private static Proposal row(StabilitySweep sweep, StabilitySweep.Point point, String says) {

@@ -50,6 +50,21 @@ public final class Studies {
     show("stability", StabilityStudy::new);
   }
 
+  /** Steps and oscillation in time. */
+  public void time() {
+    show("time", TimeStudy::new);
+  }
+
+  /** Distortion in a steady state. */
+  public void distortion() {
+    show("distortion", DistortionStudy::new);
+  }
+
+  /** Noise and impedances against frequency. */
+  public void spectra() {
+    show("spectra", SpectrumStudy::new);
+  }
+
   /** Idle current, runaway and dissipation. */
   public void heat() {
     show("heat", HeatStudy::new);

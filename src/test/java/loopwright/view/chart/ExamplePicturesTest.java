@@ -43,7 +43,9 @@ class ExamplePicturesTest {
           new LoopGainPlot(),
           new WaveformPlot(),
           new SwingPlot(),
-          new OffsetPlot());
+          new OffsetPlot(),
+          new NyquistPlot(),
+          new RootsPlot());
 
   @ParameterizedTest
   @ValueSource(
@@ -66,10 +68,13 @@ class ExamplePicturesTest {
       for (PlotSubject subject : SUBJECTS) {
         Picture picture = subject.picture(hookup, PlotTheme.current());
         boolean isOpen = hookup.hookup().feedback() instanceof Feedback.Open;
-        boolean needsLoop = subject instanceof LoopGainPlot || subject instanceof OffsetPlot;
+        boolean needsLoop =
+            subject instanceof LoopGainPlot
+                || subject instanceof OffsetPlot
+                || subject instanceof NyquistPlot;
         assertThat(picture.chart().isPresent())
             .as(name + " " + subject.tab() + ": " + picture.sentence())
-            .isEqualTo(!(isOpen && needsLoop));
+            .isEqualTo(!(isOpen && needsLoop || subject instanceof RootsPlot && !rings(hookup)));
         assertThat(picture.title() + picture.sentence()).doesNotContain("NaN", "null", "  ");
       }
       paintDeck(hookup, name);
@@ -82,6 +87,11 @@ class ExamplePicturesTest {
       Painting painting = Painting.of(card, 1000, 180).save(name + "-path");
       assertThat(painting.count(Palette.wire())).isGreaterThan(100);
     }
+  }
+
+  private static boolean rings(HookupPrediction hookup) {
+    return hookup.overSwing().stream()
+        .anyMatch(level -> level.growth().isPresent() && level.frequency().isPresent());
   }
 
   private static void paintDeck(HookupPrediction hookup, String name) {

@@ -1,0 +1,100 @@
+package loopwright.view.study;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.awt.Component;
+import java.awt.Container;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.Collectors;
+import javax.swing.JButton;
+import javax.swing.JTabbedPane;
+import javax.swing.JTextArea;
+import loopwright.file.DesignFile;
+import loopwright.file.ShelfFile;
+import loopwright.predict.Catalogue;
+import loopwright.predict.Figure;
+import loopwright.predict.Predictor;
+import loopwright.session.Assessment;
+import loopwright.session.Session;
+import loopwright.task.SameThreadRunner;
+import loopwright.view.Lookup;
+import loopwright.view.OnEventThread;
+import loopwright.view.Painting;
+import loopwright.view.theme.Theme;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.extension.ExtendWith;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
+
+/** The studies draw what they worked out, a tab for each plot, in both themes. */
+@ExtendWith(OnEventThread.class)
+class ResultPicturesTest {
+  private static Session session(String example) {
+    DesignFile files =
+        new DesignFile(
+            new ShelfFile().shipped(),
+            Catalogue.figures().stream().collect(Collectors.toMap(Figure::key, Figure::unit)));
+    return new Session(
+        files,
+        (design, hookups, progress) ->
+            new Assessment(
+                Predictor.predict(design, hookups, new double[] {1e3}, progress), List.of()),
+        new SameThreadRunner(),
+        Path.of("examples", example + ".json"));
+  }
+
+  private static Desk desk(String example) {
+    Session session = session(example);
+    return new Desk(session::snapshot, session::edit, SameThreadRunner::new);
+  }
+
+  /** Runs a study and paints each of its tabs; how many plots it has. */
+  private static int painted(Study study, String name) throws Exception {
+    Lookup.named(study, "start", JButton.class).doClick();
+    JTabbedPane tabs = Lookup.named(study, "results", JTabbedPane.class);
+    for (int k = 0; k < tabs.getTabCount(); k++) {
+      tabs.setSelectedIndex(k);
+      Painting.of(study, 980, 560).save(name + "-" + k);
+    }
+    return tabs.getTabCount() - 1;
+  }
+
+  @ParameterizedTest
+  @EnumSource(Theme.class)
+  void anOscillatingFollowerIsDrawn(Theme theme) throws Exception {
+    theme.apply();
+    String end = "-" + theme.name().toLowerCase(Locale.ROOT);
+    assertThat(painted(new TimeStudy(desk("hydrophone-follower")), "result.time" + end))
+        .isEqualTo(5);
+    assertThat(painted(new StabilityStudy(desk("hydrophone-follower")), "result.stability" + end))
+        .isGreaterThan(3);
+    assertThat(painted(new HeatStudy(desk("everything-fitted")), "result.heat" + end)).isEqualTo(1);
+  }
+
+  @ParameterizedTest
+  @EnumSource(Theme.class)
+  void aStableAmplifierIsDrawn(Theme theme) throws Exception {
+    theme.apply();
+    String end = "-stable-" + theme.name().toLowerCase(Locale.ROOT);
+    assertThat(painted(new TimeStudy(desk("seismometer-coil")), "result.time" + end)).isEqualTo(3);
+    assertThat(painted(new SpectrumStudy(desk("seismometer-coil")), "result.spectra" + end))
+        .isEqualTo(3);
+    assertThat(painted(new DistortionStudy(desk("seismometer-coil")), "result.distortion" + end))
+        .isEqualTo(4);
+  }
+
+  /** Where something grows there is no steady state: the plots say so and show no curve. */
+  @Test
+  void withoutASteadyStateThePlotsSayWhy() throws Exception {
+    Theme.LIGHT.apply();
+    DistortionStudy study = new DistortionStudy(desk("hydrophone-follower"));
+    painted(study, "result.distortion-none");
+    JTabbedPane tabs = Lookup.named(study, "results", JTabbedPane.class);
+    tabs.setSelectedIndex(0);
+    Component front = tabs.getSelectedComponent();
+    assertThat(Lookup.named((Container) front, "title", JTextArea.class).getText())
+        .isEqualTo("No steady state");
+  }
+}
