@@ -39,6 +39,8 @@ public final class CommandLineProgram {
   CommandLine line(Console console) {
     CommandLine line = new CommandLine(new TopCommand());
     line.addSubcommand(new PredictCommand(services, console));
+    line.addSubcommand(new FirstCommand(services, console));
+    line.addSubcommand(new TrimCommand(services, console));
     line.addSubcommand(new SizeCommand(services, console));
     line.addSubcommand(new CompareCommand(services, console));
     line.addSubcommand(new ExplainCommand(services, console));
@@ -64,6 +66,8 @@ public final class CommandLineProgram {
   public static Set<String> subCommands() {
     return Set.of(
         PredictCommand.NAME,
+        FirstCommand.NAME,
+        TrimCommand.NAME,
         SizeCommand.NAME,
         CompareCommand.NAME,
         ExplainCommand.NAME,

@@ -23,6 +23,11 @@ public final class DesignFile {
     this.binding = new Bindings(new BenchQuantities(figures)).block(Design.class);
   }
 
+  /** Where parts come from that a file does not bring along. */
+  public Shelf shelf() {
+    return shelf;
+  }
+
   /**
    * Reads a file.
    *
