@@ -41,8 +41,11 @@ final class Crosshair {
       g2.setColor(theme.text());
       g2.setStroke(new BasicStroke(1f));
       g2.draw(new Line2D.Double(x, area.getMinY(), x, area.getMaxY()));
-      for (Point2D point : reading.points(strip)) {
+      double sum = 0;
+      List<Point2D> points = reading.points(strip);
+      for (Point2D point : points) {
         double y = strip.pixelOfValue(point.getY());
+        sum += y;
         if (strip.plot().isPlane()) {
           g2.draw(new Line2D.Double(area.getMinX(), y, area.getMaxX(), y));
         }
@@ -54,11 +57,14 @@ final class Crosshair {
       if (i == 0 && !strip.plot().isPlane()) {
         lines.add(0, "at " + strip.plot().places(reading.place()));
       }
-      plate(g2, area, x, lines);
+      boolean isHigh = !points.isEmpty() && sum / points.size() < area.getCenterY();
+      plate(g2, area, x, lines, isHigh);
     }
   }
 
-  private void plate(Graphics2D g2, Rectangle2D area, double x, List<String> lines) {
+  /** The plate stands at the bottom where the curves are at the top. */
+  private void plate(
+      Graphics2D g2, Rectangle2D area, double x, List<String> lines, boolean atBottom) {
     if (lines.isEmpty()) {
       return;
     }
@@ -73,9 +79,9 @@ final class Crosshair {
     double whole = width + 2 * PADDING;
     boolean isRight = x + AWAY + whole < area.getMaxX();
     double left = isRight ? x + AWAY : Math.max(area.getMinX(), x - AWAY - whole);
-    double top = area.getMinY() + PADDING;
-    Rectangle2D plate =
-        new Rectangle2D.Double(left, top, whole, lines.size() * height + 2 * PADDING);
+    double tall = lines.size() * height + 2 * PADDING;
+    double top = atBottom ? area.getMaxY() - PADDING - tall : area.getMinY() + PADDING;
+    Rectangle2D plate = new Rectangle2D.Double(left, top, whole, tall);
     g2.setColor(PlotTheme.thin(theme.background(), 0.92f));
     g2.fill(plate);
     g2.setColor(theme.rule());

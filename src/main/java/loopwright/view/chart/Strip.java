@@ -7,6 +7,7 @@ import java.awt.geom.Ellipse2D;
 import java.awt.geom.Point2D;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.BiFunction;
 import loopwright.quantity.EngineeringFormat;
 import loopwright.quantity.Unit;
 import org.jfree.chart.annotations.XYLineAnnotation;
@@ -96,6 +97,16 @@ final class Strip {
     dotted.setSeriesShape(series, dot);
     dotted.setDefaultToolTipGenerator((data, row, item) -> says(row, item));
     plot.setRenderer(dotted);
+    return this;
+  }
+
+  /**
+   * Makes it a plane: both axes are values of a third quantity.
+   *
+   * @param says that quantity, by curve and point
+   */
+  Strip plane(BiFunction<Integer, Integer, String> says) {
+    plot.asPlane(says);
     return this;
   }
 

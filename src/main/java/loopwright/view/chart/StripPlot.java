@@ -12,7 +12,7 @@ import org.jfree.data.xy.XYDataset;
 final class StripPlot extends XYPlot {
   private final transient Unit along;
   private final transient Unit unit;
-  private final boolean isPlane;
+  private boolean isPlane;
   private transient BiFunction<Integer, Integer, String> words = (series, item) -> "";
 
   /**
@@ -34,8 +34,13 @@ final class StripPlot extends XYPlot {
     this.isPlane = isPlane;
   }
 
-  /** Says of a point what neither axis says. */
-  void pointsSay(BiFunction<Integer, Integer, String> says) {
+  /**
+   * Makes it a plane: both axes are values of a third quantity.
+   *
+   * @param says that quantity, by series and item
+   */
+  void asPlane(BiFunction<Integer, Integer, String> says) {
+    isPlane = true;
     words = says;
   }
 
