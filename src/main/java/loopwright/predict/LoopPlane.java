@@ -26,6 +26,10 @@ public record LoopPlane(
   /** A curve is followed in steps that turn no more about −1. */
   private static final double LARGEST_TURN = Math.toRadians(8);
 
+  /** Nor go further than this where it is nearer to 0 than {@link #NEAR}, to be drawn smooth. */
+  private static final double LONGEST_STEP = 0.15;
+
+  private static final double NEAR = 5;
   private static final int MOST_HALVINGS = 14;
 
   /**
@@ -149,7 +153,9 @@ public record LoopPlane(
     double re = (1 + last.re()) * (1 + next.re()) + last.im() * next.im();
     double im = (1 + last.re()) * next.im() - last.im() * (1 + next.re());
     double turned = Math.atan2(im, re);
-    if (Math.abs(turned) > LARGEST_TURN && halvings > 0) {
+    double moved = Math.hypot(next.re() - last.re(), next.im() - last.im());
+    boolean isCoarse = moved > LONGEST_STEP && Math.min(last.magnitude(), next.magnitude()) < NEAR;
+    if ((Math.abs(turned) > LARGEST_TURN || isCoarse) && halvings > 0) {
       double middle = Math.sqrt(last.frequency() * frequency);
       return extend(network, points, middle, halvings - 1)
           + extend(network, points, frequency, halvings - 1);

@@ -81,6 +81,26 @@ final class Strip {
     return this;
   }
 
+  /**
+   * Draws where something wanders, a small dot for each point, its name where there is room.
+   *
+   * @param style place in the theme's set of colours and strokes
+   */
+  Strip locus(Curve curve, int style, boolean isNamed) {
+    int series = dataset.getSeriesCount();
+    dataset.addSeries(curve.series());
+    Color colour = theme.curves().get(style % theme.curves().size());
+    double size = DOT - 1;
+    renderer.setSeriesPaint(series, colour);
+    renderer.setSeriesStroke(series, PlotTheme.stroke(style));
+    renderer.setSeriesShapesVisible(series, true);
+    renderer.setSeriesShape(series, new Ellipse2D.Double(-size / 2, -size / 2, size, size));
+    if (isNamed) {
+      labels.add(new PlotLabel(curve.name(), colour, curve.anchors(0.5), true));
+    }
+    return this;
+  }
+
   /** Puts dots on the latest curve: full where said, hollow elsewhere. */
   Strip dots(boolean[] full) {
     int series = dataset.getSeriesCount() - 1;

@@ -58,12 +58,12 @@ final class StripPlot extends XYPlot {
 
   /** A value of a curve in words. */
   String says(String curve, double value) {
-    return (curve + " " + EngineeringFormat.format(value, unit)).strip();
+    return (curve + " " + number(value, unit)).strip();
   }
 
   /** A place in words. */
   String places(double place) {
-    return EngineeringFormat.format(place, along);
+    return number(place, along);
   }
 
   /** A point of a curve in words. */
@@ -73,6 +73,17 @@ final class StripPlot extends XYPlot {
     return (extra.isEmpty() ? "" : extra + ": ")
         + places(data.getXValue(series, item))
         + (isPlane ? ", " : " ")
-        + EngineeringFormat.format(data.getYValue(series, item), unit);
+        + number(data.getYValue(series, item), unit);
+  }
+
+  /** Rates as the axes write them, since they have no prefixes: −3.064 · 10⁶/s. */
+  private static String number(double value, Unit unit) {
+    if (unit != Unit.PER_SECOND || Math.abs(value) < 1e3) {
+      return EngineeringFormat.format(value, unit);
+    }
+    AxisScale scale = AxisScale.of(unit, Math.abs(value));
+    return scale.say(value, Math.pow(10, AxisScale.leadingPower(Math.abs(value)) - 3))
+        + " · "
+        + scale.onAxis();
   }
 }
