@@ -16,11 +16,13 @@ import loopwright.task.Progress;
  * @param byAmplitude at its frequency, upward to its amplitude and a little beyond; empty without
  *     an amplitude
  * @param byFrequency at its amplitude, upward; empty without an amplitude
+ * @param crossover the dead zone divided by 1 + loop gain, V, by hand formula, or why there is none
  */
 public record DistortionSweep(
     SteadyDistortion present,
     List<SteadyDistortion> byAmplitude,
-    List<SteadyDistortion> byFrequency) {
+    List<SteadyDistortion> byFrequency,
+    FigureValue crossover) {
   private static final double[] AMPLITUDES = {0.03, 0.1, 0.2, 0.4, 0.7, 1, 1.3};
   private static final double[] FREQUENCIES = {20, 100, 300, 1e3, 3e3, 10e3, 20e3};
 
@@ -39,9 +41,12 @@ public record DistortionSweep(
    */
   public static DistortionSweep of(Design design, Hookup hookup, Progress progress) {
     SteadyDistortion present = SteadyDistortion.of(design, hookup, progress);
+    FigureValue crossover =
+        HookupFigures.of(design, hookup.name())
+            .formula(Catalogue.find("crossoverError").orElseThrow());
     double amplitude = hookup.source().amplitude().value();
     if (amplitude == 0 || present.thd().isEmpty()) {
-      return new DistortionSweep(present, List.of(), List.of());
+      return new DistortionSweep(present, List.of(), List.of(), crossover);
     }
     List<Design> variants = new ArrayList<>();
     String source = "hookups." + hookup.name() + ".source.";
@@ -65,6 +70,7 @@ public record DistortionSweep(
     return new DistortionSweep(
         present,
         results.subList(0, AMPLITUDES.length),
-        results.subList(AMPLITUDES.length, results.size()));
+        results.subList(AMPLITUDES.length, results.size()),
+        crossover);
   }
 }

@@ -2,9 +2,12 @@ package loopwright.predict;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
+import java.util.function.Function;
 import loopwright.assembly.AssembledHookup;
 import loopwright.assembly.Nodes;
 import loopwright.circuit.Lead;
+import loopwright.circuit.VoltageSource;
 import loopwright.design.Design;
 import loopwright.design.Load;
 import loopwright.design.PartValue;
@@ -20,13 +23,18 @@ import loopwright.task.Progress;
  * @param outputImpedance at the output, or behind isolation and coupling at the load, with the load
  *     removed, Ω
  * @param impedanceReason why they are empty; empty otherwise
+ * @param positiveRejection change of the positive supply over that of the output divided by the
+ *     noise gain; empty with an open hookup
+ * @param negativeRejection the same of the negative supply
  */
 public record Spectra(
     List<NoiseDensity> noise,
     String noiseReason,
     List<ComplexPoint> inputImpedance,
     List<ComplexPoint> outputImpedance,
-    String impedanceReason) {
+    String impedanceReason,
+    List<ComplexPoint> positiveRejection,
+    List<ComplexPoint> negativeRejection) {
   private static final double NOISE_LOWEST = 1;
   private static final double NOISE_HIGHEST = 1e6;
   private static final double LOWEST = 10;
@@ -38,6 +46,8 @@ public record Spectra(
     noise = List.copyOf(noise);
     inputImpedance = List.copyOf(inputImpedance);
     outputImpedance = List.copyOf(outputImpedance);
+    positiveRejection = List.copyOf(positiveRejection);
+    negativeRejection = List.copyOf(negativeRejection);
   }
 
   /**
@@ -69,7 +79,9 @@ public record Spectra(
         figures.solved(Catalogue.find("inputNoise").orElseThrow()).says(),
         input,
         output,
-        network.reason());
+        network.reason(),
+        rejection(figures, network, AssembledHookup::positiveSupply),
+        rejection(figures, network, AssembledHookup::negativeSupply));
   }
 
   /** Voltage at the driven terminal over the current into it, with the generator driving. */
@@ -94,6 +106,23 @@ public record Spectra(
     double size = loaded[0] * loaded[0] + loaded[1] * loaded[1];
     double[] admittance = {loaded[0] / size - conductance, -loaded[1] / size - susceptance};
     return quotient(hertz, new double[] {1, 0}, admittance);
+  }
+
+  /** The noise gain over what a volt more of the supply, behind its resistance, gives at out. */
+  private static List<ComplexPoint> rejection(
+      HookupFigures figures,
+      Outcome<LinearNetwork> network,
+      Function<AssembledHookup, VoltageSource> supply) {
+    OptionalDouble noiseGain = figures.gains().noiseGain();
+    List<ComplexPoint> points = new ArrayList<>();
+    if (network.isPresent() && noiseGain.isPresent() && !network.value().hookup().isOpen()) {
+      AssembledHookup hookup = network.value().hookup();
+      for (double hertz : grid(LOWEST, HIGHEST)) {
+        double[] out = network.value().response(hertz, supply.apply(hookup).branch(), hookup.out());
+        points.add(quotient(hertz, new double[] {noiseGain.getAsDouble(), 0}, out));
+      }
+    }
+    return points;
   }
 
   private static ComplexPoint quotient(double hertz, double[] a, double[] b) {

@@ -2,6 +2,7 @@ package loopwright.view.chart;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.DoubleStream;
 import loopwright.predict.DistortionSweep;
@@ -15,6 +16,10 @@ import loopwright.quantity.Unit;
  */
 public final class DistortionPlots {
   private static final int SHOWN = 12;
+
+  /** A hand estimate beyond so many heights of the residual would only flatten it. */
+  private static final double COMPARABLE = 2;
+
   private static final double FLOOR = -140;
 
   private DistortionPlots() {}
@@ -22,7 +27,7 @@ public final class DistortionPlots {
   /** All plots of a sweep. */
   public static List<ResultPlot> of(DistortionSweep sweep) {
     List<ResultPlot> plots = new ArrayList<>();
-    plots.add(new ResultPlot("Residual", theme -> residual(sweep.present(), theme)));
+    plots.add(new ResultPlot("Residual", theme -> residual(sweep, theme)));
     plots.add(new ResultPlot("Harmonics", theme -> harmonics(sweep.present(), theme)));
     plots.add(
         new ResultPlot(
@@ -47,7 +52,8 @@ public final class DistortionPlots {
     return plots;
   }
 
-  private static Picture residual(SteadyDistortion result, PlotTheme theme) {
+  private static Picture residual(DistortionSweep sweep, PlotTheme theme) {
+    SteadyDistortion result = sweep.present();
     if (result.output().isEmpty()) {
       return Picture.none("No steady state", Words.sentences(result.says()));
     }
@@ -60,14 +66,24 @@ public final class DistortionPlots {
     Strip upper =
         new Strip(Unit.VOLT, Span.of(DoubleStream.of(output)).padded(0.12), Unit.SECOND, theme)
             .curve(new Curve("out", time, output), 0, 0.75);
+    OptionalDouble crossover = sweep.crossover().number();
+    Span wide = Span.of(DoubleStream.of(residual)).with(0);
+    boolean isComparable =
+        crossover.isPresent() && crossover.getAsDouble() < COMPARABLE * wide.length();
+    Span residuals =
+        (isComparable ? wide.with(crossover.getAsDouble()).with(-crossover.getAsDouble()) : wide)
+            .padded(0.12);
     Strip lower =
-        new Strip(
-                Unit.VOLT,
-                Span.of(DoubleStream.of(residual)).with(0).padded(0.12),
-                Unit.SECOND,
-                theme)
+        new Strip(Unit.VOLT, residuals, Unit.SECOND, theme)
             .level(0, theme.quiet())
             .curve(new Curve("residual", time, residual), 1, 0.6);
+    if (isComparable) {
+      lower.level(crossover.getAsDouble(), theme.accent());
+      lower.level(-crossover.getAsDouble(), theme.accent());
+      lower.label(
+          PlotLabel.at(0, crossover.getAsDouble(), "dead zone/(1 + loop gain)", theme.accent())
+              .orNone());
+    }
     return Picture.of(
         "Distortion " + EngineeringFormat.percent(result.thd().getAsDouble()),
         Words.sentences(
@@ -76,7 +92,12 @@ public final class DistortionPlots {
             "Without capacitances "
                 + (result.staticThd().number().isPresent()
                     ? EngineeringFormat.percent(result.staticThd().number().getAsDouble())
-                    : result.staticThd().says())),
+                    : result.staticThd().says()),
+            crossover.isPresent()
+                ? "The dead zone divided by 1 + loop gain is "
+                    + Words.volts(crossover.getAsDouble())
+                    + " by hand"
+                : "No dead zone by hand: " + sweep.crossover().says()),
         ChartStyle.stack(
             new EngineeringAxis(Unit.SECOND, new Span(0, 1 / result.frequency())),
             List.of(upper.plot(), lower.plot()),

@@ -45,6 +45,9 @@ final class NyquistPlot implements PlotSubject {
             .distance(-1, -0.06, 0.06, theme.fails())
             .labelFirst(PlotLabel.at(-1, 0, "\u22121", theme.fails()));
     mark(strip, points, theme);
+    strip.plane(
+        (series, item) ->
+            series < 2 && item < points.size() ? Words.hertz(points.get(item).frequency()) : "");
     int turns = turns(points);
     int growing = (int) prediction.unstablePoles().stream().filter(root -> root.im() > 0).count();
     return Picture.of(

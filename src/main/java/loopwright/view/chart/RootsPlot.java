@@ -40,7 +40,8 @@ final class RootsPlot implements PlotSubject {
         new Strip(Unit.HERTZ, up, Unit.PER_SECOND, theme)
             .place(0, theme.quiet())
             .curve(locus(growth, hertz, across, up), 0, 0.5)
-            .dots(growing);
+            .dots(growing)
+            .plane((series, item) -> "");
     if (across.upper() > 0) {
       strip.shadePlaces(new Span(0, across.upper()), theme.fails());
     }

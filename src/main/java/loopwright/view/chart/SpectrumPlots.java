@@ -24,8 +24,8 @@ public final class SpectrumPlots {
             "Output impedance",
             theme -> impedance(spectra.outputImpedance(), spectra, true, theme)),
         new ResultPlot(
-            "Input impedance",
-            theme -> impedance(spectra.inputImpedance(), spectra, false, theme)));
+            "Input impedance", theme -> impedance(spectra.inputImpedance(), spectra, false, theme)),
+        new ResultPlot("Supply rejection", theme -> SupplyRejectionPlot.picture(spectra, theme)));
   }
 
   private static Picture noise(Spectra spectra, PlotTheme theme) {

@@ -65,6 +65,15 @@ public final class StabilityPlots {
                       "present " + EngineeringFormat.format(present.value(), sweep.unit(), 3),
                       theme.accent()));
             });
+    lowestStable(points)
+        .ifPresent(
+            value -> {
+              String says = EngineeringFormat.format(value, sweep.unit(), 3);
+              upper.place(value, theme.risky());
+              upper.label(
+                  PlotLabel.along(
+                      value, List.of(margins.upper(), 0.0), "stable from " + says, theme.risky()));
+            });
     return Picture.of(
         sweep.says(),
         "The worst of the whole swing at each value; full dots are stable. Damping is that of the"
@@ -74,6 +83,17 @@ public final class StabilityPlots {
             List.of(upper.plot(), lower.plot()),
             List.of(3, 3),
             theme));
+  }
+
+  /** From which value on nothing grows, if there is one at which something does. */
+  private static OptionalDouble lowestStable(List<StabilitySweep.Point> points) {
+    int from = points.size();
+    while (from > 0 && points.get(from - 1).stable()) {
+      from--;
+    }
+    return from == 0 || from == points.size()
+        ? OptionalDouble.empty()
+        : OptionalDouble.of(points.get(from).value());
   }
 
   /** Damping ratio of the leading pair: −σ/|s|. */

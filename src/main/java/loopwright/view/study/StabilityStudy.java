@@ -4,9 +4,13 @@ import java.util.ArrayList;
 import java.util.List;
 import javax.swing.JButton;
 import javax.swing.JLabel;
+import loopwright.design.Hookup;
+import loopwright.predict.LoopPlane;
 import loopwright.quantity.Unit;
 import loopwright.session.Snapshot;
 import loopwright.sizing.StabilitySweep;
+import loopwright.view.chart.LoopPlanePlots;
+import loopwright.view.chart.ResultPlot;
 import loopwright.view.chart.StabilityPlots;
 import loopwright.view.theme.Theme;
 
@@ -54,17 +58,29 @@ public final class StabilityStudy extends Study {
 
   private void find() {
     Snapshot now = desk.now().get();
-    bar.run(progress -> StabilitySweep.of(now.design(), now.hookup(), progress), this::showSweeps);
+    Hookup hookup = now.design().hookup(now.hookup()).orElseThrow();
+    bar.run(
+        progress ->
+            new Found(
+                LoopPlane.of(now.design(), hookup, progress),
+                StabilitySweep.of(now.design(), now.hookup(), progress)),
+        this::showFound);
   }
 
-  private void showSweeps(List<StabilitySweep> sweeps) {
+  /** The loop at the present values, and what varied values make of it. */
+  private record Found(LoopPlane plane, List<StabilitySweep> sweeps) {}
+
+  private void showFound(Found found) {
+    List<StabilitySweep> sweeps = found.sweeps();
     List<Proposal> rows = new ArrayList<>();
     String says = String.join(".\n", sweeps.stream().map(StabilitySweep::says).toList()) + ".";
     for (StabilitySweep sweep : sweeps) {
       sweep.points().forEach(point -> rows.add(row(sweep, point, says)));
     }
     table.show(rows, says);
-    results.show(sweeps.stream().map(StabilityPlots::of).toList());
+    List<ResultPlot> plots = new ArrayList<>(LoopPlanePlots.of(found.plane()));
+    sweeps.forEach(sweep -> plots.add(StabilityPlots.of(sweep)));
+    results.show(plots);
   }
 
   private static Proposal row(StabilitySweep sweep, StabilitySweep.Point point, String says) {
