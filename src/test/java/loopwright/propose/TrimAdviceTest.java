@@ -24,6 +24,8 @@ class TrimAdviceTest {
           .read(Path.of("examples", "seismometer-coil.json"))
           .design();
 
+  private static final TrimAdvice ADVICE = TrimAdvice.of(DESIGN, "divider", Progress.none());
+
   private static double solved(Design design, String key) {
     return HookupFigures.of(design, "divider")
         .solved(Catalogue.find(key).orElseThrow())
@@ -33,17 +35,16 @@ class TrimAdviceTest {
 
   @Test
   void tellsWhichPartWhichWayAndHowMuch() {
-    TrimAdvice advice = TrimAdvice.of(DESIGN, "divider", Progress.none());
-    assertThat(advice.offsetTrims())
+    assertThat(ADVICE.offsetTrims())
         .hasSizeGreaterThan(5)
         .isSortedAccordingTo(Comparator.comparingDouble(trim -> -Math.abs(trim.perCent())));
-    Trim strongest = advice.offsetTrims().get(0);
+    Trim strongest = ADVICE.offsetTrims().get(0);
     Design moved = moved(strongest);
     double change = solved(moved, "outputOffset") - solved(DESIGN, "outputOffset");
     assertThat(change).isEqualTo(strongest.perCent(), within(0.03 * Math.abs(strongest.perCent())));
     assertThat(strongest.says()).contains(strongest.perCent() > 0 ? "raises" : "lowers", "mV");
 
-    Trim gain = advice.gainTrims().get(0);
+    Trim gain = ADVICE.gainTrims().get(0);
     double ratio = solved(moved(gain), "closedLoopGain") / solved(DESIGN, "closedLoopGain");
     assertThat(ratio - 1).isEqualTo(gain.perCent(), within(0.03 * Math.abs(gain.perCent())));
     assertThat(gain.path()).startsWith("hookups.divider.feedback.");
@@ -56,7 +57,7 @@ class TrimAdviceTest {
 
   @Test
   void theBestChangeLeavesLessOffsetAndTheGain() {
-    TrimAdvice.Best best = TrimAdvice.of(DESIGN, "divider", Progress.none()).best().orElseThrow();
+    TrimAdvice.Best best = ADVICE.best().orElseThrow();
     Design changed = Change.applyAll(DESIGN, List.of(best.change()));
     double before = solved(DESIGN, "outputOffset");
     double after = solved(changed, "outputOffset");

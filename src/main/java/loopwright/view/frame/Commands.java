@@ -10,6 +10,7 @@ import loopwright.design.Hookup;
 import loopwright.design.Problem;
 import loopwright.file.FileException;
 import loopwright.file.Recovery;
+import loopwright.session.Edit;
 import loopwright.session.KeptWork;
 import loopwright.session.Session;
 import loopwright.session.Snapshot;
@@ -57,6 +58,18 @@ final class Commands {
     commitTyping.run();
     if (mayLeave()) {
       session.begin(design);
+    }
+  }
+
+  /**
+   * Takes a design of the program's own making, if the present one may be left; to undo it brings
+   * the present one back, which is then in no file.
+   */
+  void take(Design design) {
+    commitTyping.run();
+    if (mayLeave()) {
+      session.begin(session.snapshot().design());
+      session.edit(Edit.of("First design", design));
     }
   }
 

@@ -69,6 +69,8 @@ final class ProposalTable extends JPanel {
       case "Noise" -> 105;
       case "Matters most" -> 240;
       case "Verdict" -> 120;
+      case "Predicted or chosen" -> 170;
+      case "Demand or choice", "Resistor" -> 330;
       default -> column == 0 ? 200 : 80;
     };
   }

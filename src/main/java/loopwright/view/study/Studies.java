@@ -5,11 +5,13 @@ import java.awt.Dimension;
 import java.awt.Window;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.function.Consumer;
 import java.util.function.Function;
 import javax.swing.JComponent;
 import javax.swing.JDialog;
 import javax.swing.KeyStroke;
 import javax.swing.WindowConstants;
+import loopwright.design.Design;
 import loopwright.part.Shelf;
 import loopwright.session.Snapshot;
 
@@ -38,6 +40,20 @@ public final class Studies {
   /** Ranked dividers for a wanted gain. */
   public void divider() {
     show("divider", DividerStudy::new);
+  }
+
+  /**
+   * A first design from a specification.
+   *
+   * @param onOpen takes the design in place of the present one
+   */
+  public void first(Consumer<Design> onOpen) {
+    show("first", self -> new FirstDesignStudy(self, shelf, onOpen));
+  }
+
+  /** Which resistor trims offset and gain. */
+  public void trim() {
+    show("trim", TrimStudy::new);
   }
 
   /** Cures of an oscillation. */

@@ -6,6 +6,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.attribute.FileTime;
+import java.util.List;
 import java.util.Optional;
 import loopwright.design.Change;
 import loopwright.design.Design;
@@ -39,6 +40,17 @@ class CommandsTest {
     assertThat(commands.save()).isTrue();
     assertThat(SampleSessions.files().read(file).design()).isEqualTo(session.snapshot().design());
     assertThat(dialogs.said).isEmpty();
+  }
+
+  @Test
+  void aDesignOfTheProgramsMakingTakesThePlaceOfThePresentOneAndCanBeUndone() {
+    Design before = session.snapshot().design();
+    Design made = Change.applyAll(before, List.of(new Change("rails.positive", "15")));
+    commands.take(made);
+    assertThat(session.snapshot().design()).isEqualTo(made);
+    assertThat(session.snapshot().path()).isEmpty();
+    commands.undo();
+    assertThat(session.snapshot().design()).isEqualTo(before);
   }
 
   @Test

@@ -30,9 +30,11 @@ import loopwright.view.study.BenchStudy;
 import loopwright.view.study.CureStudy;
 import loopwright.view.study.Desk;
 import loopwright.view.study.DividerStudy;
+import loopwright.view.study.FirstDesignStudy;
 import loopwright.view.study.SheetStudy;
 import loopwright.view.study.SpreadStudy;
 import loopwright.view.study.StabilityStudy;
+import loopwright.view.study.TrimStudy;
 import loopwright.view.study.WholeStudy;
 import loopwright.view.theme.Theme;
 import org.junit.jupiter.api.Test;
@@ -101,6 +103,8 @@ class WordsPageTest {
     for (Container study :
         List.of(
             new DividerStudy(desk),
+            new FirstDesignStudy(desk, shelf, design -> {}),
+            new TrimStudy(desk),
             new CureStudy(desk),
             new SpreadStudy(desk),
             new StabilityStudy(desk),
