@@ -32,6 +32,8 @@ final class LargeSignal {
   private final Lazy<StepRun> rising;
   private final Lazy<StepRun> falling;
   private final Lazy<StepRun> small;
+  private final Lazy<Overload.Run> above;
+  private final Lazy<Overload.Run> below;
 
   LargeSignal(HookupSolution solution, Progress progress) {
     this.solution = solution;
@@ -41,6 +43,8 @@ final class LargeSignal {
     this.rising = new Lazy<>(() -> step(low.get(), high.get(), Accuracy.USUAL));
     this.falling = new Lazy<>(() -> step(high.get(), low.get(), Accuracy.USUAL));
     this.small = new Lazy<>(this::smallStep);
+    this.above = new Lazy<>(() -> overload(1));
+    this.below = new Lazy<>(() -> overload(-1));
   }
 
   /** The circuit where the large step ends: direction 1 upward, −1 downward. */
@@ -106,12 +110,21 @@ final class LargeSignal {
    * overload upward.
    */
   double recovery(int direction) {
+    return overloaded(direction).recovery();
+  }
+
+  /** The overload itself: direction 1 upward, −1 downward. */
+  Overload.Run overloaded(int direction) {
+    return (direction > 0 ? above : below).get();
+  }
+
+  private Overload.Run overload(int direction) {
     CircuitState rest = solution.linearRest();
     CircuitState edge = (direction > 0 ? high : low).get();
     int out = solution.assembled().out();
     double beyond = OVERLOAD / RANGE * (edge.generator() - rest.generator());
     double width =
         LASTS * (settling() + Math.abs(edge.voltage(out) - rest.voltage(out)) / slew(direction));
-    return Overload.recovery(rest, out, rest.generator() + beyond, width, BAND, progress);
+    return Overload.run(rest, out, rest.generator() + beyond, width, BAND, progress);
   }
 }

@@ -19,6 +19,7 @@ import loopwright.task.Progress;
  * @param figures in the catalogue's order those that are solved in time, by hand formula and solved
  * @param curves the small step and the large ones, in this order; what could not be run has a
  *     reason
+ * @param overloads beyond clipping, above and below, in this order
  * @param oscillation what grows at some level of the swing; empty when nothing does
  * @param says why the oscillation could not be run, or empty
  */
@@ -26,6 +27,7 @@ public record StepResponses(
     String hookup,
     Map<String, FigureResult> figures,
     List<Curve> curves,
+    List<Recovery> overloads,
     Optional<Oscillation> oscillation,
     String says) {
   /**
@@ -47,10 +49,37 @@ public record StepResponses(
     }
   }
 
+  /**
+   * The output while the generator drives it half as far again as clips it, and after.
+   *
+   * @param isAbove whether it clips above
+   * @param rest output at rest, V
+   * @param width how long the overload lasts from time 0, s
+   * @param recovery how long after it the output stays near rest, s
+   * @param times s; empty where it could not be run
+   * @param output V, as many
+   * @param says why it could not be run, or empty
+   */
+  public record Recovery(
+      boolean isAbove,
+      double rest,
+      double width,
+      double recovery,
+      List<Double> times,
+      List<Double> output,
+      String says) {
+    /** Keeps its own copies. */
+    public Recovery {
+      times = List.copyOf(times);
+      output = List.copyOf(output);
+    }
+  }
+
   /** Keeps its own copies. */
   public StepResponses {
     figures = Collections.unmodifiableMap(new LinkedHashMap<>(figures));
     curves = List.copyOf(curves);
+    overloads = List.copyOf(overloads);
   }
 
   /**
@@ -89,8 +118,26 @@ public record StepResponses(
         hookup.name(),
         figures,
         curves,
+        List.of(recovery(steps, true), recovery(steps, false)),
         oscillation.isPresent() ? oscillation.value() : Optional.empty(),
         oscillation.reason());
+  }
+
+  private static Recovery recovery(LargeSignal steps, boolean isAbove) {
+    Outcome<Overload.Run> run = Outcome.of(() -> steps.overloaded(isAbove ? 1 : -1));
+    if (!run.isPresent()) {
+      return new Recovery(
+          isAbove, Double.NaN, Double.NaN, Double.NaN, List.of(), List.of(), run.reason());
+    }
+    Overload.Run value = run.value();
+    return new Recovery(
+        isAbove,
+        value.rest(),
+        value.width(),
+        value.recovery(),
+        boxed(value.times()),
+        boxed(value.volts()),
+        "");
   }
 
   private static StepRun run(LargeSignal steps, int direction) {

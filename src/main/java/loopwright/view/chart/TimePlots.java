@@ -31,6 +31,7 @@ public final class TimePlots {
     for (StepResponses.Curve curve : run.curves()) {
       plots.add(new ResultPlot(tab(curve.kind()), theme -> step(run, curve, theme)));
     }
+    run.overloads().forEach(overload -> plots.add(RecoveryPlot.of(overload)));
     return plots;
   }
 

@@ -68,7 +68,7 @@ class ResultPicturesTest {
   @Test
   void anOscillatingFollowerIsDrawn() throws Exception {
     Theme.LIGHT.apply();
-    assertThat(painted(new TimeStudy(desk("hydrophone-follower")), "result.time")).isEqualTo(5);
+    assertThat(painted(new TimeStudy(desk("hydrophone-follower")), "result.time")).isEqualTo(7);
     assertThat(painted(new StabilityStudy(desk("hydrophone-follower")), "result.stability"))
         .isGreaterThan(5);
     assertThat(painted(new HeatStudy(desk("everything-fitted")), "result.heat")).isEqualTo(1);
@@ -77,11 +77,26 @@ class ResultPicturesTest {
   @Test
   void aStableAmplifierIsDrawn() throws Exception {
     Theme.LIGHT.apply();
-    assertThat(painted(new TimeStudy(desk("seismometer-coil")), "result.time-stable")).isEqualTo(3);
+    assertThat(painted(new TimeStudy(desk("seismometer-coil")), "result.time-stable")).isEqualTo(5);
     assertThat(painted(new SpectrumStudy(desk("seismometer-coil")), "result.spectra-stable"))
         .isEqualTo(4);
     assertThat(painted(new DistortionStudy(desk("seismometer-coil")), "result.distortion-stable"))
         .isEqualTo(4);
+  }
+
+  /** The follower's input pair is driven so far that its output goes to the other rail. */
+  @Test
+  void anOverloadThatTurnsThePhaseRoundIsSaid() {
+    Theme.LIGHT.apply();
+    TimeStudy study = new TimeStudy(desk("hydrophone-follower"));
+    Lookup.named(study, "start", JButton.class).doClick();
+    JTabbedPane tabs = Lookup.named(study, "results", JTabbedPane.class);
+    tabs.setSelectedIndex(tabs.indexOfTab("Clipping above"));
+    Container front = (Container) tabs.getSelectedComponent();
+    assertThat(Lookup.named(front, "title", JTextArea.class).getText())
+        .startsWith("Held at \u2212");
+    assertThat(Lookup.named(front, "sentence", JTextArea.class).getText())
+        .startsWith("The output goes the wrong way");
   }
 
   /** Where something grows there is no steady state: the plots say so and show no curve. */
