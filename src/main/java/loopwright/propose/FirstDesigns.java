@@ -144,7 +144,11 @@ public final class FirstDesigns {
           Draft.WITHIN + "feedback", "as it was", "No divider could be ranked: " + e.getMessage());
       return false;
     }
-    DividerProposal best = ranked.get(0);
+    Optional<DividerProposal> chosen = serving(ranked);
+    if (chosen.isEmpty()) {
+      return false;
+    }
+    DividerProposal best = chosen.get();
     double upper = draft.upper;
     double lower = draft.lower;
     for (Change change : best.changes()) {
@@ -164,11 +168,27 @@ public final class FirstDesigns {
     draft.changed(
         Draft.WITHIN + "feedback",
         Draft.text(draft.upper, Unit.OHM) + " / " + Draft.text(draft.lower, Unit.OHM),
-        "Best of all dividers of the stock, each weighed by gain error, band, load, offset, noise"
+        "Best of the stock's dividers whose gain and margin serve, each weighed by gain error, band, load, offset, noise"
             + " and phase: "
             + best.says());
     adjustBlocking(draft);
     return true;
+  }
+
+  /** The best whose gain is near enough, of those that hold the margin at rest where one does. */
+  private Optional<DividerProposal> serving(List<DividerProposal> ranked) {
+    List<DividerProposal> near =
+        ranked.stream()
+            .filter(
+                one ->
+                    one.gain().number().isPresent()
+                        && Math.abs(Math.abs(one.gain().number().getAsDouble()) / wanted.gain() - 1)
+                            <= wanted.gainTolerance())
+            .toList();
+    return near.stream()
+        .filter(one -> one.phaseMargin().number().orElse(180) >= wanted.margin())
+        .findFirst()
+        .or(() -> near.stream().findFirst());
   }
 
   private void adjustBlocking(Draft draft) {

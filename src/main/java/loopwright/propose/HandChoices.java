@@ -146,7 +146,7 @@ final class HandChoices {
       }
       double ratio = wanted.noiseGain() - 1;
       if (wanted.inverting()) {
-        draft.lower = resistors.nearest(Math.max(10 * source, total / (1 + ratio)));
+        draft.lower = resistors.nearest(Math.max(source, total / (1 + ratio)));
         draft.upper = resistors.nearest(wanted.gain() * (draft.lower + wanted.sourceResistance()));
       } else {
         draft.lower = resistors.nearest(Math.max(total / (1 + ratio), 20));
