@@ -76,9 +76,9 @@ public final class FirstDesignStudy extends Study {
     open.setEnabled(false);
     open.addActionListener(event -> offered.ifPresent(onOpen));
     add(form());
-    add(bar);
+    add(bar, "split 2, pushx");
+    add(open, "growx 0");
     add(table, "hmin 200");
-    add(open, "growx 0, align right");
     table.show(
         List.of(),
         "Say what the amplifier is to do. Every value is then chosen with its reason, the whole is"
@@ -93,8 +93,8 @@ public final class FirstDesignStudy extends Study {
             new JPanel(
                 new MigLayout(
                     "insets 0, gapx 6, wrap 8, fillx",
-                    "[][44:100,grow 50,fill]14[][44:100,grow 50,fill]14[][44:100,grow 50,fill]"
-                        + "14[][44:100,grow 50,fill]")),
+                    "[][36:100,grow 50,fill]10[][36:100,grow 50,fill]10[][36:100,grow 50,fill]"
+                        + "10[][36:100,grow 50,fill]")),
             "plain");
     field(form, "Positive rail", 'P', positive, "positive");
     field(form, "Gain", 'G', gain, "gain");
