@@ -22,6 +22,16 @@ public final class CurrentSourceElement implements Element {
     this.current = current;
   }
 
+  /** Index of the node that the current leaves. */
+  public int from() {
+    return from;
+  }
+
+  /** Index of the node that it enters. */
+  public int to() {
+    return to;
+  }
+
   @Override
   public String name() {
     return name;

@@ -52,6 +52,7 @@ public final class CommandLineProgram {
     line.addSubcommand(new StepCommand(services, console));
     line.addSubcommand(new DistortionCommand(services, console));
     line.addSubcommand(new SheetCommand(services, console));
+    line.addSubcommand(new SchematicCommand(services, console));
     line.setOut(writer(console.out()));
     line.setErr(writer(console.err()));
     line.setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF));
@@ -78,6 +79,7 @@ public final class CommandLineProgram {
         StabilityCommand.NAME,
         StepCommand.NAME,
         DistortionCommand.NAME,
+        SchematicCommand.NAME,
         SheetCommand.NAME);
   }
 

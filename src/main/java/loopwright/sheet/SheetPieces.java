@@ -1,7 +1,9 @@
 package loopwright.sheet;
 
+import java.awt.Graphics2D;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import loopwright.quantity.EngineeringFormat;
 import loopwright.quantity.Unit;
 import loopwright.sheet.Piece.Beside;
@@ -18,6 +20,8 @@ import loopwright.sheet.Piece.Words;
 /** The sheet in the order in which it is worked through. */
 final class SheetPieces {
   private static final double HALF = 0.5;
+  private static final double WIDEST = 520;
+  private static final double HIGHEST = 230;
 
   private SheetPieces() {}
 
@@ -49,6 +53,8 @@ final class SheetPieces {
    */
   static List<Piece> of(BenchSheet sheet, boolean further) {
     List<Piece> pieces = new ArrayList<>();
+    pieces.add(new Heading("Schematic"));
+    pieces.add(new Pictures(List.of(schematic(sheet))));
     pieces.add(new Heading("Parts"));
     int half = (sheet.parts().size() + 1) / 2;
     pieces.add(
@@ -199,5 +205,21 @@ final class SheetPieces {
       pieces.add(new Words("Also: " + String.join("; ", hookup.further()) + "."));
     }
     return pieces;
+  }
+
+  /** The schematic, as large as the width of the narrower paper and a part of its height allow. */
+  private static Piece.Picture schematic(BenchSheet sheet) {
+    SchematicDrawing drawing = SchematicDrawing.of(sheet.design(), sheet.hookup());
+    double scale = Math.min(1, Math.min(WIDEST / drawing.width(), HIGHEST / drawing.height()));
+    return new Piece.Picture(
+        "Schematic of hookup " + sheet.hookup(),
+        scale * drawing.width(),
+        scale * drawing.height(),
+        graphics -> {
+          Graphics2D scaled = (Graphics2D) graphics.create();
+          scaled.scale(scale, scale);
+          drawing.paint(scaled, SchematicInk.PAPER, Optional.empty());
+          scaled.dispose();
+        });
   }
 }

@@ -63,7 +63,7 @@ final class MainMenu extends JMenuBar {
             item("Whole design…", "edit.whole", 'W', control(KeyEvent.VK_E), studies::whole),
             item("Copy this hookup", "edit.copyHookup", 'C', null, commands::copyHookup),
             item("Remove this hookup", "edit.removeHookup", 'M', null, commands::removeHookup)));
-    add(viewMenu(commands, theme, chooseTheme));
+    add(viewMenu(commands, studies, theme, chooseTheme));
     add(workMenu(studies));
     add(menu("Help", 'H', item("About Loopwright", "help.about", 'A', null, commands::about)));
   }
@@ -100,7 +100,8 @@ final class MainMenu extends JMenuBar {
     return file;
   }
 
-  private JMenu viewMenu(Commands commands, Theme present, Consumer<Theme> chooseTheme) {
+  private JMenu viewMenu(
+      Commands commands, Studies studies, Theme present, Consumer<Theme> chooseTheme) {
     JMenu view = menu("View", 'V');
     ButtonGroup group = new ButtonGroup();
     for (Theme theme : Theme.values()) {
@@ -115,6 +116,7 @@ final class MainMenu extends JMenuBar {
     hookups.setMnemonic('H');
     hookups.setName("view.hookup");
     view.add(hookups);
+    view.add(item("Schematic…", "view.schematic", 'S', null, studies::schematic));
     view.add(item("Parts: printed and modelled…", "view.parts", 'P', null, commands::parts));
     return view;
   }

@@ -86,6 +86,11 @@ public final class Studies {
     show("heat", HeatStudy::new);
   }
 
+  /** The schematic. */
+  public void schematic() {
+    show("schematic", SchematicStudy::new);
+  }
+
   /** Bands for the tolerances. */
   public void spread() {
     show("spread", SpreadStudy::new);

@@ -30,6 +30,7 @@ import loopwright.task.SameThreadRunner;
 import loopwright.view.Lookup;
 import loopwright.view.OnEventThread;
 import loopwright.view.Painting;
+import loopwright.view.theme.Palette;
 import loopwright.view.theme.Theme;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.extension.ExtendWith;
@@ -193,5 +194,21 @@ class StudyTest {
           .isGreaterThan(5000);
       assertThat(table(study).getRowCount()).as(study.title()).isPositive();
     }
+  }
+
+  @ParameterizedTest
+  @EnumSource(Theme.class)
+  void theSchematicIsDrawnAndWalked(Theme theme) throws Exception {
+    theme.apply();
+    SchematicStudy study = new SchematicStudy(desk(session("hydrophone-follower")));
+    Painting painting =
+        Painting.of(study, 980, 560)
+            .save("study.schematic-" + theme.name().toLowerCase(Locale.ROOT));
+    assertThat(painting.countOther(Palette.card(), new Rectangle(20, 90, 940, 450)))
+        .isGreaterThan(4000);
+    click(study, "next");
+    String first = Lookup.named(study, "where", JLabel.class).getText();
+    click(study, "next");
+    assertThat(Lookup.named(study, "where", JLabel.class).getText()).isNotEqualTo(first);
   }
 }
