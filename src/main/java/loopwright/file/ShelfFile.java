@@ -50,7 +50,7 @@ public final class ShelfFile {
     return read(TextFile.read(file), file.toString());
   }
 
-  private RecordShelf read(String text, String where) {
+  RecordShelf read(String text, String where) {
     Json json = JsonReader.read(text, where);
     if (!(json instanceof Json.Block block)) {
       throw new FileException(
