@@ -25,6 +25,12 @@ public final class LeastSquaresFit {
   /** Steps of differences, in standard uncertainties of an unknown alone. */
   private static final double FINE = 0.05;
 
+  /** Share of the usual step below which rounding would spoil the differences. */
+  private static final double FINEST = 1e-3;
+
+  /** Residuals that are so small beside what the unknowns do are rounding. */
+  private static final double EXACT = 1e-12;
+
   private static final int MOST_POLISHING = 8;
 
   /** Change of the sum of squares, as a share of it, that is rounding. */
@@ -37,10 +43,14 @@ public final class LeastSquaresFit {
   private static final double DEPENDENT = 1e-11;
 
   private final Residuals residuals;
+  private final double[] sizes;
+  private final int mostSteps;
   private int evaluations;
 
-  private LeastSquaresFit(Residuals residuals) {
+  private LeastSquaresFit(Residuals residuals, double[] sizes, int mostSteps) {
+    this.mostSteps = mostSteps;
     this.residuals = residuals;
+    this.sizes = sizes;
   }
 
   /** What is to be made small. */
@@ -99,7 +109,22 @@ public final class LeastSquaresFit {
    * @return where it ended, and whether that is a minimum
    */
   public static Fit of(Residuals residuals, double... start) {
-    LeastSquaresFit fit = new LeastSquaresFit(residuals);
+    double[] sizes = Arrays.stream(start).map(x -> x == 0 ? 1 : Math.abs(x)).toArray();
+    return of(residuals, start, sizes, MOST_STEPS);
+  }
+
+  /**
+   * Makes the sum of squares least.
+   *
+   * @param residuals more of them than unknowns
+   * @param start first guess; not modified
+   * @param sizes of the unknowns where they are at home, above 0: what a small step is small
+   *     beside, also where an unknown passes through 0
+   * @param mostSteps after so many it gives up
+   * @return where it ended, and whether that is a minimum
+   */
+  public static Fit of(Residuals residuals, double[] start, double[] sizes, int mostSteps) {
+    LeastSquaresFit fit = new LeastSquaresFit(residuals, sizes.clone(), mostSteps);
     Fit first = null;
     for (double damping : FIRST_DAMPING) {
       Fit next = fit.from(start, damping);
@@ -126,7 +151,7 @@ public final class LeastSquaresFit {
     double damping = firstDamping;
     double growth = 2;
     double[][] slopes = slopes(at, residual.length);
-    for (int step = 0; step < MOST_STEPS; step++) {
+    for (int step = 0; step < mostSteps; step++) {
       if (!isFinite(slopes)) {
         return failed("the residuals have no slope where it ended", at, residual, cost);
       }
@@ -163,7 +188,7 @@ public final class LeastSquaresFit {
         return polished(at, residual, slopes);
       }
     }
-    return failed("it had not settled after " + MOST_STEPS + " steps", at, residual, cost);
+    return failed("it had not settled after " + mostSteps + " steps", at, residual, cost);
   }
 
   /**
@@ -227,7 +252,13 @@ public final class LeastSquaresFit {
             cost);
       }
     }
-    if (steepest > RIGHT_ANGLE) {
+    double reach = 0;
+    for (int j = 0; j < at.length; j++) {
+      reach = Math.max(reach, lengths[j] * Math.max(Math.abs(at[j]), sizes[j]));
+    }
+    // Residuals that are rounding themselves stand at no angle to anything.
+    boolean exact = Math.sqrt(cost) <= EXACT * reach;
+    if (steepest > RIGHT_ANGLE && !exact) {
       return failed("no step, however short, leads further down", at, residual, cost);
     }
     double variance = cost / (residual.length - at.length);
@@ -290,27 +321,25 @@ public final class LeastSquaresFit {
   private double[][] slopes(double[] at, int rows) {
     double[] steps = new double[at.length];
     for (int j = 0; j < at.length; j++) {
-      steps[j] = relative(at[j]);
+      steps[j] = relative(at[j], j);
     }
     return slopes(at, rows, steps);
   }
 
-  private static double relative(double value) {
-    return Math.pow(Math.ulp(1.0), 0.2) * (value == 0 ? 1 : Math.abs(value));
+  private double relative(double value, int j) {
+    return Math.pow(Math.ulp(1.0), 0.2) * Math.max(Math.abs(value), 0.01 * sizes[j]);
   }
 
   /** Steps that are small beside what the unknowns are known to, where that is less. */
-  private static double[] fine(double[] at, double[] residual, double[][] slopes) {
+  private double[] fine(double[] at, double[] residual, double[][] slopes) {
     double[] lengths = new double[at.length];
     widen(lengths, slopes);
     double deviation = Math.sqrt(square(residual) / (residual.length - at.length));
     double[] steps = new double[at.length];
     for (int j = 0; j < at.length; j++) {
       double known = FINE * deviation / lengths[j];
-      steps[j] = relative(at[j]);
-      if (known > SETTLED * steps[j]) {
-        steps[j] = Math.min(steps[j], known);
-      }
+      double usual = relative(at[j], j);
+      steps[j] = Math.min(usual, Math.max(FINEST * usual, known));
     }
     return steps;
   }
