@@ -48,7 +48,8 @@ class ExamplesTest {
         "hydrophone-follower",
         "measured-amplifier",
         "nine-volt-preamplifier",
-        "everything-fitted"
+        "everything-fitted",
+        "river-gauge-faulty"
       })
   void opensAndSolves(String name) {
     Prediction prediction = predict(open(name).design());

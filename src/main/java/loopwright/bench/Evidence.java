@@ -3,12 +3,14 @@ package loopwright.bench;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
+import java.util.stream.IntStream;
 import loopwright.design.Design;
 import loopwright.design.Reading;
 import loopwright.numeric.Cholesky;
 import loopwright.predict.Catalogue;
 import loopwright.predict.CostClass;
 import loopwright.predict.Figure;
+import loopwright.predict.HookupFigures;
 import loopwright.predict.TolerancedPart;
 import loopwright.quantity.Unit;
 
@@ -103,6 +105,16 @@ final class Evidence {
     return predicted.moves(judged.get(row));
   }
 
+  /** The design's first hookup. */
+  HookupFigures first() {
+    return predicted.first();
+  }
+
+  /** The circuits in which builds that differ little are predicted. */
+  List<ReadingGroup> light() {
+    return predicted.light();
+  }
+
   /** Number of readings that are judged. */
   int count() {
     return judged.size();
@@ -168,6 +180,30 @@ final class Evidence {
     Cholesky cholesky = new Cholesky(wider);
     double misfit = cholesky.quadraticForm(differences);
     return new Fit(misfit, -0.5 * (misfit + cholesky.logDeterminant()) + scale());
+  }
+
+  /**
+   * The most that {@link #fit} can come to when values that are not known yet turn out as well as
+   * they can. The misfit of some of the readings is never more than that of all, and what a fault
+   * changes never makes the covariance less.
+   *
+   * @param values NaN where not known
+   */
+  Fit atMost(double[] values) {
+    int[] known = IntStream.range(0, count()).filter(row -> Double.isFinite(values[row])).toArray();
+    double[] differences = new double[known.length];
+    double[][] part = new double[known.length][known.length];
+    for (int i = 0; i < known.length; i++) {
+      int row = known[i];
+      differences[i] = (measured[row] - values[row]) / spread[row];
+      for (int j = 0; j < known.length; j++) {
+        part[i][j] = covariance[row][known[j]];
+      }
+      double change = OF_CHANGE * (values[row] - nominal[row]) / spread[row];
+      part[i][i] += change * change + TINY;
+    }
+    double misfit = known.length == 0 ? 0 : new Cholesky(part).quadraticForm(differences);
+    return new Fit(misfit, -0.5 * (misfit + cholesky().logDeterminant()) + scale());
   }
 
   /** aᵀ C⁻¹ b for two changes of the readings. */

@@ -17,6 +17,7 @@ import loopwright.predict.ComplexPoint;
 import loopwright.predict.DeviceState;
 import loopwright.predict.FigureValue;
 import loopwright.predict.HookupFigures;
+import loopwright.quantity.Quantity;
 
 /**
  * What a reading should show: the circuit that it was taken in, with what the instrument lays on
@@ -32,20 +33,37 @@ final class Expectation {
   }
 
   /**
-   * The design as the reading found it: its instrument on the node, its amplitude and frequency at
-   * the generator.
+   * The design as the reading found it: its instrument on the node and, where its figure depends on
+   * them, its amplitude and frequency at the generator.
    */
   Design circuit(Design design) {
+    return circuit(design, probe(design));
+  }
+
+  /** The same without the instrument. */
+  Design unloaded(Design design) {
+    return circuit(design, Optional.empty());
+  }
+
+  private Design circuit(Design design, Optional<Probe> probe) {
     Optional<Hookup> hookup = reading.hookup().flatMap(design::hookup);
     if (hookup.isEmpty()) {
       return design;
     }
     Hookup old = hookup.get();
     List<Probe> probes = new ArrayList<>(old.probes());
-    probe(design).ifPresent(probes::add);
-    Hookup loaded =
-        new Hookup(old.name(), source(old.source()), old.feedback(), old.load(), probes);
+    probe.ifPresent(probes::add);
+    Source source = dependsOnSignal() ? source(old.source()) : old.source();
+    Hookup loaded = new Hookup(old.name(), source, old.feedback(), old.load(), probes);
     return loaded.equals(old) ? design : DesignPath.set(design, "hookups." + old.name(), loaded);
+  }
+
+  /** Whether amplitude and frequency decide more than where its response is taken. */
+  private boolean dependsOnSignal() {
+    return switch (reading.quantity()) {
+      case "nodeVoltage", "gain", "phase" -> false;
+      default -> !onDevice();
+    };
   }
 
   /**
@@ -117,15 +135,15 @@ final class Expectation {
       return figures.node(node);
     }
     FigureValue gain = response(figures, node, false);
-    double amplitude = figures.hookup().source().amplitude().value();
+    Quantity amplitude = reading.amplitude().orElseGet(() -> figures.hookup().source().amplitude());
     return gain.number().isPresent()
-        ? FigureValue.of(gain.number().getAsDouble() * amplitude)
+        ? FigureValue.of(gain.number().getAsDouble() * amplitude.value())
         : gain;
   }
 
   private FigureValue response(HookupFigures figures, String node, boolean phase) {
-    Optional<ComplexPoint> point =
-        figures.response(node, figures.hookup().source().frequency().value());
+    Quantity frequency = reading.frequency().orElseGet(() -> figures.hookup().source().frequency());
+    Optional<ComplexPoint> point = figures.response(node, frequency.value());
     if (point.isEmpty()) {
       return FigureValue.none(figures.failure().orElse("the circuit has no node " + node));
     }

@@ -31,6 +31,12 @@ public final class FaultSearch {
   /** Drifts that the first-order estimate ranks below so many others are not searched. */
   private static final int DRIFTS = 6;
 
+  /**
+   * A fault that some of the readings leave this much less probable than what is known already,
+   * natural logarithm, is not solved further: one in ten milliards.
+   */
+  private static final double HOPELESS = 23;
+
   private static final int SHOWN = 12;
   private static final double LEAST_SHOWN = 1e-4;
 
@@ -77,7 +83,9 @@ public final class FaultSearch {
 
   private Explanations search(Progress progress) {
     Evidence.Fit none = evidence.fit(evidence.nominal());
-    FaultyReadings readings = new FaultyReadings(design, evidence.judged());
+    FaultyReadings readings =
+        new FaultyReadings(design, evidence.judged(), evidence.light(), evidence.first());
+    double anywhere = Math.log(NONE_OF_THESE) + evidence.logDensityAnywhere();
     hypotheses.add(
         new Hypothesis(
             Kind.NO_FAULT,
@@ -87,7 +95,7 @@ public final class FaultSearch {
             none.misfit(),
             Math.log(NO_FAULT) + none.logDensity(),
             Optional.of(readings.of(Build::nominal))));
-    faults(progress);
+    faults(Math.max(anywhere, hypotheses.get(0).logWeight()) - HOPELESS, progress);
     drifts(readings, progress);
     hypotheses.add(
         new Hypothesis(
@@ -96,29 +104,37 @@ public final class FaultSearch {
             "none of these: a fault that is not on the list, or several at once",
             OptionalDouble.empty(),
             Double.NaN,
-            Math.log(NONE_OF_THESE) + evidence.logDensityAnywhere(),
+            anywhere,
             Optional.empty()));
     return ranked();
   }
 
-  private void faults(Progress progress) {
-    HookupFigures nominal = HookupFigures.of(design, firstHookup());
+  /**
+   * @param least logarithm of the weight below which it does not matter how little a fault weighs
+   */
+  private void faults(double least, Progress progress) {
+    HookupFigures nominal = evidence.first().apart(design, firstHookup());
     List<Candidate> candidates = FaultCatalogue.of(nominal);
     double prior = Math.log(FAULT / candidates.size());
     Hypothesis[] found = new Hypothesis[candidates.size()];
     AtomicInteger done = new AtomicInteger();
+    List<ReadingGroup> circuits = ReadingGroup.of(design);
     int lanes = Runtime.getRuntime().availableProcessors();
     IntStream.range(0, lanes)
         .parallel()
         .forEach(
             lane -> {
               // What is solved of a hookup serves one thread, so each lane has its own.
-              FaultyReadings readings = new FaultyReadings(design, evidence.judged());
+              FaultyReadings readings =
+                  new FaultyReadings(design, evidence.judged(), circuits, evidence.first());
               for (int i = lane; i < candidates.size(); i += lanes) {
                 progress.check();
                 Candidate candidate = candidates.get(i);
-                FaultyReadings.Shown shown = readings.of(candidate);
-                Evidence.Fit fit = evidence.fit(shown.values());
+                FaultyReadings.Shown shown =
+                    readings.of(
+                        candidate, values -> prior + evidence.atMost(values).logDensity() >= least);
+                Evidence.Fit fit =
+                    shown.whole() ? evidence.fit(shown.values()) : evidence.atMost(shown.values());
                 found[i] =
                     new Hypothesis(
                         Kind.FAULT,

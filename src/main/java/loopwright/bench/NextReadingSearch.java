@@ -18,6 +18,9 @@ import loopwright.quantity.Unit;
 final class NextReadingSearch {
   private static final int LEADING = 6;
 
+  /** Less probable explanations do not decide what to read. */
+  private static final double LEAST = 1e-3;
+
   /** A hand-held meter: 0.5 % of the reading and 3 mV; common practice, no source. */
   private static final double SHARE = 0.005;
 
@@ -30,7 +33,12 @@ final class NextReadingSearch {
 
   static Optional<NextReading> of(Design design, List<Hypothesis> ranked, double sum, double most) {
     List<Hypothesis> leading =
-        ranked.stream().filter(each -> each.shown().isPresent()).limit(LEADING).toList();
+        ranked.stream()
+            .filter(each -> each.shown().isPresent())
+            .filter(
+                each -> Math.exp(each.logWeight() - most) / sum > LEAST || isFirstTwo(ranked, each))
+            .limit(LEADING)
+            .toList();
     if (leading.size() < 2) {
       return Optional.empty();
     }
@@ -76,6 +84,11 @@ final class NextReadingSearch {
                                         volts(each, hookup.getKey(), node)
                                             - volts(each, hookup.getKey(), other))
                                     < VOLTS / 3));
+  }
+
+  /** With a single cause left, the next one says what would speak against it. */
+  private static boolean isFirstTwo(List<Hypothesis> ranked, Hypothesis one) {
+    return ranked.stream().filter(each -> each.shown().isPresent()).limit(2).anyMatch(one::equals);
   }
 
   private static double worth(

@@ -2,6 +2,7 @@ package loopwright.bench;
 
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.stream.IntStream;
 import loopwright.design.Design;
 import loopwright.design.Reading;
@@ -21,15 +22,18 @@ import loopwright.task.Progress;
  */
 final class PredictedReadings {
   private final Design design;
+  private final HookupFigures first;
   private final List<Reading> readings;
   private final List<TolerancedPart> parts;
   private final FigureValue[] nominal;
   private final double[][] moves;
+  private List<ReadingGroup> light = List.of();
 
-  private PredictedReadings(Design design, List<TolerancedPart> parts) {
+  private PredictedReadings(Design design, HookupFigures first) {
     this.design = design;
     this.readings = design.bench().readings();
-    this.parts = parts;
+    this.first = first;
+    this.parts = TolerancedParts.of(first);
     this.nominal = new FigureValue[readings.size()];
     this.moves = new double[readings.size()][parts.size()];
   }
@@ -37,17 +41,33 @@ final class PredictedReadings {
   /** Predicts all readings of a design. */
   static PredictedReadings of(Design design, Progress progress) {
     HookupFigures first = HookupFigures.of(design, design.hookups().get(0).name());
-    PredictedReadings predicted = new PredictedReadings(design, TolerancedParts.of(first));
+    PredictedReadings predicted = new PredictedReadings(design, first);
     List<ReadingGroup> groups = ReadingGroup.of(design);
-    int[] done = {0};
-    for (ReadingGroup group : groups) {
-      predicted.solve(group, progress);
-      done[0]++;
-      progress.report(
-          (double) done[0] / groups.size(), "predicting what " + group.hookup() + " shows");
+    List<HookupFigures> start = ReadingGroup.nominal(groups, first);
+    for (int i = 0; i < groups.size(); i++) {
+      for (int reading : groups.get(i).readings()) {
+        predicted.nominal[reading] = predicted.expected(reading, start.get(i));
+      }
     }
-    predicted.looseParts(first);
+    predicted.light =
+        ReadingGroup.light(
+            design,
+            first,
+            i -> MeasuredValue.of(design, predicted.readings.get(i)).uncertainty().standard(),
+            i -> predicted.nominal[i].number().orElse(Double.NaN));
+    predicted.move(progress);
+    predicted.looseParts();
     return predicted;
+  }
+
+  /** The design's first hookup. */
+  HookupFigures first() {
+    return first;
+  }
+
+  /** The circuits in which builds that differ little are predicted. */
+  List<ReadingGroup> light() {
+    return light;
   }
 
   /** What a reading should show, or why nothing can be said. */
@@ -76,23 +96,28 @@ final class PredictedReadings {
         : OptionalDouble.empty();
   }
 
-  private void solve(ReadingGroup group, Progress progress) {
-    HookupFigures start = HookupFigures.of(group.circuit(), group.hookup());
-    for (int reading : group.readings()) {
-      nominal[reading] = expected(reading, start);
-    }
-    List<TolerancedPart> own = TolerancedParts.in(parts, group.hookup());
+  private void move(Progress progress) {
     int lanes = Runtime.getRuntime().availableProcessors();
+    AtomicInteger done = new AtomicInteger();
     IntStream.range(0, lanes)
         .parallel()
         .forEach(
             lane -> {
               // What is solved of a hookup serves one thread, so each lane has its own nominal.
-              HookupFigures mine = HookupFigures.of(group.circuit(), group.hookup());
-              group.readings().forEach(reading -> expected(reading, mine));
-              for (int part = lane; part < own.size(); part += lanes) {
-                progress.check();
-                move(group, mine, own, part);
+              List<HookupFigures> mine = ReadingGroup.nominal(light, first);
+              for (int i = 0; i < light.size(); i++) {
+                ReadingGroup group = light.get(i);
+                List<TolerancedPart> own = TolerancedParts.in(parts, group.hookup());
+                for (int reading : group.readings()) {
+                  expected(reading, mine.get(i));
+                }
+                for (int part = lane; part < own.size(); part += lanes) {
+                  progress.check();
+                  move(group, mine.get(i), own, part);
+                }
+                progress.report(
+                    (double) done.incrementAndGet() / light.size() / lanes,
+                    "predicting what " + group.hookup() + " shows");
               }
             });
   }
@@ -132,7 +157,7 @@ final class PredictedReadings {
         .isEmpty();
   }
 
-  private void looseParts(HookupFigures first) {
+  private void looseParts() {
     for (int i = 0; i < readings.size(); i++) {
       if (readings.get(i).hookup().isEmpty()) {
         LoosePart loose = LoosePart.of(design, first, readings.get(i));

@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.function.Predicate;
 import loopwright.assembly.AssembledHookup;
+import loopwright.assembly.Deviations;
 import loopwright.assembly.DeviceModels;
 import loopwright.assembly.Nodes;
 import loopwright.circuit.Element;
@@ -50,6 +51,17 @@ public final class HookupFigures {
     Hookup hookup = find(design, solution.hookup().name());
     return new HookupFigures(
         others, new HookupSolution(design, hookup, others, Optional.of(solution)));
+  }
+
+  /**
+   * A hookup of a design with the same part records, which takes nothing over but the fits of those
+   * records. May serve another thread, where this one's circuit finds a rest or was asked for it.
+   *
+   * @throws IllegalArgumentException when the design has no hookup of this name
+   */
+  public HookupFigures apart(Design design, String hookup) {
+    DeviceModels others = models.of(design, Deviations.NONE);
+    return new HookupFigures(others, new HookupSolution(design, find(design, hookup), others));
   }
 
   /**
