@@ -12,7 +12,9 @@ import javax.swing.JComboBox;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
+import javax.swing.JTabbedPane;
 import loopwright.design.Design;
+import loopwright.file.DesignChecksum;
 import loopwright.session.Snapshot;
 import loopwright.sheet.BenchSheet;
 import loopwright.sheet.Paper;
@@ -35,12 +37,12 @@ public final class SheetStudy extends Study {
   private final JButton save = Theme.style(new JButton("Save sheet…"), "pill");
   private final JButton print = Theme.style(new JButton("Print…"), "pill");
   private final PagesView pages = new PagesView();
+  private final SheetReadings readings;
   private final WorkBar bar;
   private transient Optional<Made> made = Optional.empty();
 
   /** A sheet and its pages. */
-  private record Made(
-      Design design, String hookup, BenchSheet sheet, SheetPages pages, List<BufferedImage> seen) {}
+  private record Made(BenchSheet sheet, SheetPages pages, List<BufferedImage> seen) {}
 
   /**
    * @param desk the window's session
@@ -69,11 +71,19 @@ public final class SheetStudy extends Study {
     print.addActionListener(event -> print());
     add(new Inputs().field("Paper", 'R', paper, 90).own(where));
     add(buttons());
+    readings = new SheetReadings(desk);
+    JTabbedPane tabs = new JTabbedPane();
+    tabs.setName("tabs");
     JScrollPane scroll = new JScrollPane(pages);
     scroll.setName("scroll");
-    add(scroll, "hmin 200");
+    tabs.addTab("Pages", scroll);
+    tabs.addTab("Type readings", readings);
+    tabs.setMnemonicAt(0, 'G');
+    tabs.setMnemonicAt(1, 'T');
+    add(tabs, "hmin 200");
     show(desk.now().get());
     forget();
+    bar.say("Nothing made yet.");
   }
 
   private JPanel buttons() {
@@ -88,13 +98,18 @@ public final class SheetStudy extends Study {
   @Override
   public void show(Snapshot snapshot) {
     where.setText("hookup " + snapshot.hookup() + " is drawn and powered first");
-    boolean same =
-        made.filter(now -> now.design().equals(snapshot.design()))
-            .filter(now -> now.hookup().equals(snapshot.hookup()))
-            .isPresent();
-    if (made.isPresent() && !same) {
+    if (made.filter(sheet -> !isStillSo(sheet, snapshot)).isPresent()) {
       forget();
+      bar.say("The design or its hookup changed: make the sheet again.");
+    } else {
+      readings.show(made.map(Made::sheet));
     }
+  }
+
+  /** Readings may come in; anything else would stand on another sheet. */
+  private static boolean isStillSo(Made sheet, Snapshot snapshot) {
+    return sheet.sheet().hookup().equals(snapshot.hookup())
+        && sheet.sheet().checksum().equals(DesignChecksum.of(snapshot.design()));
   }
 
   @Override
@@ -106,6 +121,7 @@ public final class SheetStudy extends Study {
   private void forget() {
     made = Optional.empty();
     pages.show(List.of());
+    readings.show(Optional.empty());
     save.setEnabled(false);
     print.setEnabled(false);
   }
@@ -121,7 +137,7 @@ public final class SheetStudy extends Study {
           progress.check();
           progress.report(0.9, "laying out");
           SheetPages laid = new SheetPages(sheet, size);
-          return new Made(design, hookup, sheet, laid, laid.pictures(DOTS_PER_INCH));
+          return new Made(sheet, laid, laid.pictures(DOTS_PER_INCH));
         },
         this::showMade);
   }
@@ -131,13 +147,13 @@ public final class SheetStudy extends Study {
   }
 
   private void showMade(Made sheet) {
-    Snapshot now = desk.now().get();
-    if (!now.design().equals(sheet.design()) || !now.hookup().equals(sheet.hookup())) {
+    if (!isStillSo(sheet, desk.now().get())) {
       bar.complain("The design changed meanwhile: make the sheet again.");
       return;
     }
     made = Optional.of(sheet);
     pages.show(sheet.seen());
+    readings.show(Optional.of(sheet.sheet()));
     save.setEnabled(true);
     print.setEnabled(true);
   }
