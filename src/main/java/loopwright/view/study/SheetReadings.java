@@ -118,8 +118,7 @@ final class SheetReadings extends JPanel {
   private static Quantity volts(String text) {
     Quantity read = Quantity.parse(text, Unit.VOLT);
     if (!Double.isFinite(read.value())) {
-      throw new QuantityException(
-          "found \"" + text + "\", expected what an instrument can show");
+      throw new QuantityException("found \"" + text + "\", expected what an instrument can show");
     }
     return read;
   }

@@ -60,7 +60,9 @@ final class SheetRows extends AbstractTableModel {
     return sheet.map(BenchSheet::nodes).orElse(List.of());
   }
 
-  /** What is to be said about the reading in a row; empty where it is within its band, or absent. */
+  /**
+   * What is to be said about the reading in a row; empty where it is within its band, or absent.
+   */
   String says(int row) {
     SheetNode node = nodes().get(row);
     return switch (verdict(row)) {
