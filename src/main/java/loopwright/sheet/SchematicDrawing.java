@@ -2,6 +2,7 @@ package loopwright.sheet;
 
 import java.awt.Font;
 import java.awt.Graphics2D;
+import java.awt.RenderingHints;
 import java.awt.font.FontRenderContext;
 import java.awt.geom.AffineTransform;
 import java.awt.geom.Line2D;
@@ -114,6 +115,9 @@ public final class SchematicDrawing {
     Graphics2D g2 = (Graphics2D) graphics.create();
     try {
       g2.translate(-bounds.getX(), -bounds.getY());
+      // Words are laid out with the widths that they have between pixels.
+      g2.setRenderingHint(
+          RenderingHints.KEY_FRACTIONALMETRICS, RenderingHints.VALUE_FRACTIONALMETRICS_ON);
       SymbolPainter painter = new SymbolPainter(g2, ink);
       for (Line2D wire : layout.wires()) {
         painter.wire(scaled(wire.getP1()), scaled(wire.getP2()));
